@@ -1,0 +1,4 @@
+/** Whether this server answers. */
+export function GET() {
+  return Response.json({ status: 'up' });
+}
