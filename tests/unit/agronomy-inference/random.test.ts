@@ -4,7 +4,7 @@ import { randomStream, randomStreamFromState, shuffled } from '../../../lib/agro
 
 describe('randomStream', () => {
   it('gives the numbers of the generator it names', () => {
-    // State 1 2 3 4. Source: rand_xoshiro 0.6, src/xoshiro128starstar.rs, made there with the authors' C program, v1.1.
+    // State 1 2 3 4. Source: rust-random/rngs, rand_xoshiro/src/xoshiro128starstar.rs, made there with the authors' C program, v1.1.
     const stream = randomStreamFromState([1, 2, 3, 4]);
     const words = Array.from({ length: 10 }, () => stream.nextWord());
     expect(words).toEqual([
