@@ -17,7 +17,7 @@ async function isHealthy(address) {
   }
 }
 
-/** Starts `next start`, or `next dev`, and answers once it is healthy: its address, and a promise of its end. */
+/** Starts `next start`, or `next dev`, and answers once it is healthy: its address, a promise of its end, and a way to stop it. */
 export async function startWebServer({ dev = false, host, port, env, stdio = ['ignore', 'inherit', 'inherit'] }) {
   const child = start(
     process.execPath,
@@ -35,7 +35,8 @@ export async function startWebServer({ dev = false, host, port, env, stdio = ['i
     },
   );
   child.on('error', () => {});
-  beforeLeaving(() => end(child, { graceSeconds: 10 }));
+  const stop = () => end(child, { graceSeconds: 10 });
+  beforeLeaving(stop);
   const reach = host === '0.0.0.0' || host === '::' ? '127.0.0.1' : host.includes(':') ? `[${host}]` : host;
   const address = `http://${reach}:${port}`;
   const deadline = Date.now() + healthSecondsMost * 1000;
@@ -45,5 +46,5 @@ export async function startWebServer({ dev = false, host, port, env, stdio = ['i
     if (Date.now() > deadline) throw new Stop(`The web server did not answer at ${address}/api/health in ${healthSecondsMost} s.`);
     await pause(150);
   }
-  return { address, over: ended(child) };
+  return { address, over: ended(child), stop };
 }
