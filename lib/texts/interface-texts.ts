@@ -31,14 +31,16 @@ export const interfaceTexts = {
     themeAuto: 'As this device is set',
   },
   tape: {
-    legend:
-      'Height is how early the plant came up. An open head is a late plant, a cross is a seed that never came, a bracket is a double.',
+    legendHeight: 'the taller, the earlier it came up',
+    legendLate: 'open head: a late plant',
+    legendMissing: 'cross: a seed that never came',
+    legendDouble: 'bracket: a double',
+    legendUnknown: 'dot: nobody saw the day',
+    legendMark: 'thick end: a mark, not a plant',
     gap: (length: string) => `gap ${length}`,
     double: 'double',
     summary: (parts: { plants: number; late: number; doubles: number; missing: number; length: string }) =>
       `${parts.plants} ${parts.plants === 1 ? 'plant' : 'plants'} in ${parts.length} of row, of which ${parts.late} late; ${parts.doubles} ${parts.doubles === 1 ? 'double' : 'doubles'}; ${parts.missing} ${parts.missing === 1 ? 'seed' : 'seeds'} never came.`,
-    endAtMark: 'mark',
-    endAtPlant: 'plant',
   },
   charts: {
     numbersBehind: 'The numbers behind this picture',
