@@ -25,7 +25,7 @@ export function ontarioLate(late: LatePlants): Outcome<Penalty> {
   });
   return mapOutcome(loss, ({ lossPercent, basis }) => ({
     study: 'ontario-late',
-    source: 'Ontario corn guide, uneven emergence',
+    source: 'Ontario guide',
     reading: 'read',
     lossLow: lossPercent,
     lossHigh: lossPercent,
