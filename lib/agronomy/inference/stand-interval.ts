@@ -2,7 +2,7 @@ import { SAME_NUMBER } from '../constants';
 import { ImpossibleInput, insufficient, value, type Outcome } from '../outcome';
 import { requiredNumber } from '../required-number';
 import type { StandInterval } from '../stand-interval-shape';
-import { standStudentQuantile } from './stand-quantiles';
+import { studentQuantile } from './student-t';
 
 /** Plants held and the part of an acre they were found on: one row sample, or all of one strip's added. */
 export type StandUnit = { plantsHeld: number; areaAcres: number };
@@ -44,7 +44,7 @@ export function standInterval(
   }
   const squares = units.reduce((sum, unit) => sum + (unit.plantsHeld - density * unit.areaAcres) ** 2, 0);
   const standardError = Math.sqrt(squares / (count - 1) / count) / areaMean;
-  const reach = standStudentQuantile(0.975, count - 1) * standardError;
+  const reach = studentQuantile(0.975, count - 1) * standardError;
   const equalAreas = units.every((unit) => Math.abs(unit.areaAcres / areaMean - 1) <= SAME_NUMBER);
   return value({
     plantsPerAcre: density,

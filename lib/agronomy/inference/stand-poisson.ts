@@ -1,6 +1,6 @@
 import { requiredNumber } from '../required-number';
 import type { StandInterval } from '../stand-interval-shape';
-import { standChiSquareQuantile } from './stand-quantiles';
+import { standChiSquareQuantile } from './stand-chi-square';
 import type { StandUnit } from './stand-interval';
 
 /**

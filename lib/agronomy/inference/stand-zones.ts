@@ -1,7 +1,7 @@
 import { insufficient, value, type Outcome } from '../outcome';
 import { requiredNumber } from '../required-number';
 import { standInterval, type StandEstimate, type StandUnit } from './stand-interval';
-import { standStudentQuantile } from './stand-quantiles';
+import { studentQuantile } from './student-t';
 
 export type StandZone = { acres: number; rowSamples: readonly StandUnit[] };
 
@@ -47,7 +47,7 @@ export function standZones(zones: readonly StandZone[]): Outcome<StandEstimate> 
       ? variance ** 2 / spreadOfVariance
       : Math.min(...variances.map((part) => part.degrees));
   const standardError = Math.sqrt(variance);
-  const reach = standStudentQuantile(0.975, degreesOfFreedom) * standardError;
+  const reach = studentQuantile(0.975, degreesOfFreedom) * standardError;
   return value({
     plantsPerAcre,
     interval: value({
