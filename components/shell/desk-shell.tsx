@@ -41,15 +41,12 @@ export function DeskShell({
         {texts.skipToContent}
       </a>
       {demoNotice ? (
-        <p
-          role="note"
-          className="bg-ink px-4 py-1.5 text-center text-13 text-paper print:border print:border-ink"
-        >
+        <p role="note" className="bg-bone px-4 py-1.5 text-center text-13 print:border print:border-ink">
           {demoNotice}
         </p>
       ) : null}
       <header className="border-b-2 border-ink">
-        <div className="mx-auto flex max-w-page flex-wrap items-center gap-x-8 gap-y-1 px-4 py-2 md:px-6">
+        <div className="mx-auto flex max-w-page flex-wrap items-center gap-x-4 gap-y-1 px-4 sm:gap-x-8 py-2 md:px-6">
           <Link href={homeHref} className="flex min-h-press items-center no-underline">
             <Wordmark />
           </Link>
@@ -72,7 +69,7 @@ export function DeskShell({
               ))}
             </ul>
           </nav>
-          <div className="ml-auto flex items-center gap-x-4 text-right">
+          <div className="ml-auto flex min-w-0 flex-1 basis-0 items-center justify-end gap-x-1 text-right">
             <p className="min-w-0 text-13">
               <span className="block font-bold">{personName}</span>
               <span className="block text-ink-soft">{organisationName}</span>

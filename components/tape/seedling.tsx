@@ -25,7 +25,7 @@ export function Seedling({ x, y, height, grows, look, size = 1 }: SeedlingProps)
       {look === 'on-time' ? (
         <path
           transform={`translate(0 ${(-height).toFixed(1)}) scale(${size})`}
-          d="M0 1.5C-1.8-.5-3.2-3.8-6.2-4.200C-6.2-.8-3.6 1.8 0 2.200C3.6 1.8 6.2-.8 6.2-4.200C3.2-3.8 1.8-.5 0 1.5Z"
+          d="M0 1.5C-1.8-.5-3.2-3.8-6.2-4.2C-6.2-.8-3.6 1.8 0 2.2C3.6 1.8 6.2-.8 6.2-4.2C3.2-3.8 1.8-.5 0 1.5Z"
           className="fill-ink"
         />
       ) : null}

@@ -30,7 +30,12 @@ export function UprightNotes({ x, yOf, height, gaps, doubles, units }: UprightNo
     })),
   ];
   const middles = notes.map((note) => (yOf(note.fromInches) + yOf(note.toInches)) / 2);
-  const lines = spreadLabels(middles, lineDistance, lineDistance / 2, height - lineDistance / 2);
+  const lines = spreadLabels(
+    middles,
+    notes.map(() => lineDistance),
+    0,
+    height,
+  );
   return notes.map((note, index) => {
     const middle = middles[index] ?? 0;
     const line = lines[index] ?? 0;

@@ -50,9 +50,9 @@ export function UprightTape({
   const standing = plants.filter((plant) => plant.kind === 'plant');
   const labelYs = spreadLabels(
     standing.map((plant) => yOf(plant.positionInches)),
-    labelDistance,
-    edge / 2,
-    height - edge / 2,
+    standing.map(() => labelDistance),
+    0,
+    height,
   );
   const [top, bottom] = [yOf(lengthInches), yOf(0)];
   const pegs = [startEnd === 'mark' ? bottom : null, farEnd === 'mark' ? top : null];
@@ -88,7 +88,7 @@ export function UprightTape({
               <text
                 x={tapeLeft + tapeWidth - 5}
                 // Under its mark where the tape ends right above.
-                y={(y - top < 16 ? y + 14 : y - 4).toFixed(1)}
+                y={(y - top < 20 ? y + 14 : y - 4).toFixed(1)}
                 textAnchor="end"
                 fontSize={16}
                 className="fill-tape-red font-mono font-bold"

@@ -11,9 +11,9 @@ const inch = tapeWidth / 12;
 /** The name, standing on a piece of the tape. */
 export function Wordmark({ size = 'header' }: WordmarkProps) {
   return (
-    <span className={`inline-flex flex-col ${size === 'page' ? 'w-44 text-34' : 'w-24 text-21'}`}>
+    <span className={`inline-flex flex-col ${size === 'page' ? 'text-34' : 'text-21'}`}>
       <span className="font-bold leading-none tracking-[0.01em]">{interfaceTexts.product.name}</span>
-      <svg aria-hidden="true" viewBox={`0 0 ${tapeWidth} 10`} className="-mt-px block h-auto w-full">
+      <svg aria-hidden="true" viewBox={`0 0 ${tapeWidth} 10`} className="-mt-px block h-auto w-0 min-w-full">
         <rect
           x={0.5}
           y={0.5}

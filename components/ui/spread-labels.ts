@@ -1,21 +1,29 @@
 /**
- * Moves labels apart along one line so that no two centers are nearer than `leastDistance`, each as little as can be.
- * Takes wished centers in any order and gives the places back in that order; places stay within `from` and `to`
- * as long as all the labels fit there. Method: neighbors that overlap are pooled and their block centered on the
- * mean wish, as in isotonic regression. For example `spreadLabels([10, 11], 4, 0, 100)` is `[8.5, 12.5]`.
+ * Moves labels apart along one line so that none overlap, each as little as can be. Takes wished centers in any
+ * order and the size each label takes along the line, its clearance included; gives the centers back in that order.
+ * They stay within `from` and `to` as long as all the labels fit there. Method: neighbors that overlap are pooled
+ * and their block centered on the mean wish, as in isotonic regression.
+ * For example `spreadLabels([10, 11], [4, 4], 0, 100)` is `[8.5, 12.5]`.
  */
 export function spreadLabels(
   wishes: readonly number[],
-  leastDistance: number,
+  sizes: readonly number[],
   from: number,
   to: number,
 ): number[] {
   const order = wishes.map((_, index) => index).sort((a, b) => (wishes[a] ?? 0) - (wishes[b] ?? 0));
-  // Without its rank times the distance, a wish only has to be no smaller than the one before it.
+  const sizeAt = (rank: number) => sizes[order[rank] ?? 0] ?? 0;
+  // How far a label's center lies behind the first one's when all of them touch.
+  const offsets: number[] = [];
+  order.forEach((_, rank) => {
+    const before = offsets[rank - 1];
+    offsets.push(before === undefined ? 0 : before + (sizeAt(rank - 1) + sizeAt(rank)) / 2);
+  });
+  // Without its offset, a wish only has to be no smaller than the one before it.
   const blocks: { sum: number; count: number }[] = [];
   const mean = (block: { sum: number; count: number }) => block.sum / block.count;
   order.forEach((index, rank) => {
-    blocks.push({ sum: (wishes[index] ?? 0) - rank * leastDistance, count: 1 });
+    blocks.push({ sum: (wishes[index] ?? 0) - (offsets[rank] ?? 0), count: 1 });
     for (;;) {
       const last = blocks.at(-1);
       const before = blocks.at(-2);
@@ -24,12 +32,12 @@ export function spreadLabels(
     }
   });
   const free = blocks.flatMap((block) => Array.from({ length: block.count }, () => mean(block)));
-  const last = wishes.length - 1;
+  const lastRank = wishes.length - 1;
+  const lowest = from + sizeAt(0) / 2;
+  const highest = Math.max(lowest, to - sizeAt(lastRank) / 2 - (offsets[lastRank] ?? 0));
   const places: number[] = new Array<number>(wishes.length).fill(0);
   order.forEach((index, rank) => {
-    const lowest = from;
-    const highest = Math.max(lowest, to - last * leastDistance);
-    places[index] = Math.min(highest, Math.max(lowest, free[rank] ?? 0)) + rank * leastDistance;
+    places[index] = Math.min(highest, Math.max(lowest, free[rank] ?? 0)) + (offsets[rank] ?? 0);
   });
   return places;
 }

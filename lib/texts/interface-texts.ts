@@ -44,12 +44,20 @@ export const interfaceTexts = {
   },
   charts: {
     numbersBehind: 'The numbers behind this picture',
+    noNumbers: 'There are no numbers yet.',
+    notVisited: 'not visited',
+    thousandPlants: (units: 'us' | 'metric') =>
+      units === 'us' ? 'thousand plants per acre' : 'thousand plants per hectare',
+    shareOfSeed: 'percent of the seed planted',
+    plantsUpSoFar: 'plants up so far',
     daysAfterPlanting: 'days after planting',
-    day: 'Day',
+    dayAfterPlanting: 'Day after planting',
+    setting: 'Setting',
+    choice: 'Choice',
+    range: 'Range',
     difference: 'Difference',
     interval: '95 % interval',
-    seedsPlanted: (seeds: string) => `${seeds} seeds planted`,
-    better: (direction: 'fewer' | 'more') => (direction === 'fewer' ? 'lower is better' : 'higher is better'),
     noDifference: 'no difference',
+    seedsPlanted: (seeds: string) => `${seeds} seeds planted`,
   },
 } as const;
