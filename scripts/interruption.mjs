@@ -14,13 +14,28 @@ let interrupted = null;
 
 export function listenForSignals() {
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
-    process.on(signal, () => {
-      // A second press changes nothing: the first one is being carried out, and cutting it short leaves servers behind.
-      if (interrupted) return;
-      interrupted = new Interrupted(signal);
-      for (const tell of [...waiting]) tell(interrupted);
-    });
+    process.on(signal, () => giveUp(new Interrupted(signal)));
   }
+}
+
+/** Ends whatever is under way. A second reason, or a second press, changes nothing: cutting the end short leaves servers behind. */
+function giveUp(reason) {
+  if (interrupted) return;
+  interrupted = reason;
+  for (const tell of [...waiting]) tell(interrupted);
+}
+
+/** Does several things at once; when one fails the others are ended before the failure is passed on. */
+export async function together(...works) {
+  const guarded = works.map((work) =>
+    work.catch((error) => {
+      giveUp(error);
+      throw error;
+    }),
+  );
+  const results = await Promise.allSettled(guarded);
+  if (results.some(({ status }) => status === 'rejected')) throw interrupted;
+  return results.map(({ value }) => value);
 }
 
 export function throwIfInterrupted() {

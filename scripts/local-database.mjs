@@ -3,7 +3,7 @@ import { copyFileSync, existsSync, mkdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { databaseUrls, makeDatabase, makeRoles, withClient } from './databases.mjs';
 import { checkout, everyoneMayPass, localFolder, stateFolder } from './places.mjs';
-import { majorOnDisk, makeCluster } from './postgres-cluster.mjs';
+import { majorOnDisk, makeCluster, refuseOtherMajor } from './postgres-cluster.mjs';
 import { postgresPrograms } from './postgres-programs.mjs';
 import { startPostgres } from './postgres-server.mjs';
 import { keepSecrets, newSecrets, readSecrets } from './secrets.mjs';
@@ -21,8 +21,8 @@ export function homeFolder() {
   return localFolder;
 }
 
-/** Starts the cluster, made first when there is none, and answers with its port and secrets. */
-export async function startLocalCluster() {
+/** Finds PostgreSQL's programs and makes the cluster when there is none; this part needs no modules yet. */
+export async function prepareLocalCluster() {
   const home = homeFolder();
   const dataFolder = join(home, 'postgres');
   const secretsFile = join(home, 'secrets.json');
@@ -31,7 +31,7 @@ export async function startLocalCluster() {
   if (!existsSync(dataFolder)) {
     secrets ??= newSecrets();
     keepSecrets(secretsFile, secrets);
-    await step('Making the database cluster', () =>
+    await step(`Making the database cluster in ${dataFolder}`, () =>
       makeCluster({ programs, dataFolder, password: secrets.superuser }),
     );
   }
@@ -41,11 +41,18 @@ export async function startLocalCluster() {
         'Put it back, or move that folder away to begin with a new database.',
     );
   }
+  refuseOtherMajor(programs, dataFolder);
+  return { programs, dataFolder, secrets, home };
+}
+
+/** Starts the cluster and adds its port to what is known of it. */
+export async function startLocalCluster(cluster) {
+  const { programs, dataFolder, secrets } = cluster;
   const logFile = join(localFolder, 'postgres.log');
   const port = await step(`Starting PostgreSQL ${programs.major}`, () =>
     startPostgres({ programs, dataFolder, password: secrets.superuser, logFile, settings: {} }),
   );
-  return { port, secrets, home };
+  return { ...cluster, port };
 }
 
 const beingFilled = 'Demo data is being filled in; a start that finds this note makes the database anew.';

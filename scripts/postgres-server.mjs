@@ -4,7 +4,7 @@ import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import { beforeLeaving, throwIfInterrupted } from './interruption.mjs';
 import { freePort } from './port.mjs';
-import { postgresEnvironment, refuseOtherMajor, runningPostmaster } from './postgres-cluster.mjs';
+import { postgresEnvironment, runningPostmaster } from './postgres-cluster.mjs';
 import { postgresUser } from './postgres-programs.mjs';
 import { end, ended, run, start } from './run.mjs';
 import { Stop, say } from './say.mjs';
@@ -93,7 +93,6 @@ async function startOnce(cluster, port) {
 
 /** Starts the cluster `{ programs, dataFolder, password, settings, logFile }` and answers with its port. */
 export async function startPostgres(cluster) {
-  refuseOtherMajor(cluster.programs, cluster.dataFolder);
   cluster.portTaken = await freePort(firstPort, '127.0.0.1');
   let current = await startOnce(cluster, cluster.portTaken);
   cluster.portSettled = true;

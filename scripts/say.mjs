@@ -16,11 +16,11 @@ export function say(sentence) {
   process.stdout.write(`${sentence}\n`);
 }
 
-/** Says what begins, does it, and says how long it took. */
+/** Says what begins, does it, and says how long it took; two steps at once stay apart by their names. */
 export async function step(sentence, work) {
   const startedAt = performance.now();
   say(`${sentence} …`);
   const result = await work();
-  say(`  done in ${secondsSince(startedAt)} s`);
+  say(`  ${sentence}: done in ${secondsSince(startedAt)} s`);
   return result;
 }

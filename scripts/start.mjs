@@ -2,9 +2,9 @@
 import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { build, buildIsCurrent } from './build.mjs';
-import { Interrupted, beforeLeaving, leave, listenForSignals, onInterruption } from './interruption.mjs';
+import { Interrupted, beforeLeaving, leave, listenForSignals, onInterruption, together } from './interruption.mjs';
 import { takeLock } from './lock.mjs';
-import { migrate, prepareDatabase, startLocalCluster } from './local-database.mjs';
+import { migrate, prepareDatabase, prepareLocalCluster, startLocalCluster } from './local-database.mjs';
 import { installModules } from './modules.mjs';
 import { checkout, localFolder, lockPath, makeLocalFolder } from './places.mjs';
 import { freePort } from './port.mjs';
@@ -45,8 +45,8 @@ function holdLock(about) {
   return lock;
 }
 
-async function prepareLocal({ empty }) {
-  const cluster = await startLocalCluster();
+async function prepareLocal(parts, { empty }) {
+  const cluster = await startLocalCluster(parts);
   const urls = await prepareDatabase(cluster, empty ? 'rowrise_empty' : 'rowrise', { demo: !empty });
   return { app: urls.app, migrator: urls.migrator, session: cluster.secrets.session };
 }
@@ -81,9 +81,12 @@ async function main() {
   const { host } = environment;
   const port = await freePort(environment.port, host);
   if (port !== environment.port) say(`Port ${environment.port} is taken, so ${port} is used.`);
-  await installModules();
-  const database = environment.given ? await prepareGiven(environment) : await prepareLocal(options);
-  if (!options.dev && !buildIsCurrent()) await step('Building', () => build());
+  // Modules and packages come from elsewhere, so that fetching both at once saves a third of the first start.
+  const [, parts] = await together(installModules(), environment.given ? Promise.resolve() : prepareLocalCluster());
+  const [database] = await together(
+    parts ? prepareLocal(parts, options) : prepareGiven(environment),
+    options.dev || buildIsCurrent() ? Promise.resolve() : step('Building', () => build()),
+  );
   const server = await step('Starting the web server', () =>
     startWebServer({ dev: options.dev, host, port, env: { DATABASE_URL: database.app, SESSION_SECRET: database.session } }),
   );

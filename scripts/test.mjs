@@ -1,7 +1,7 @@
 // Runs every check there is, or the parts that are named: npm test -- unit, npm test -- database tests/access.
 import { setTimeout as pause } from 'node:timers/promises';
 import { join } from 'node:path';
-import { Interrupted, beforeLeaving, leave, listenForSignals, throwIfInterrupted } from './interruption.mjs';
+import { Interrupted, beforeLeaving, leave, listenForSignals, throwIfInterrupted, together } from './interruption.mjs';
 import { takeLock } from './lock.mjs';
 import { installModules } from './modules.mjs';
 import { localFolder, makeLocalFolder } from './places.mjs';
@@ -37,7 +37,10 @@ async function waitForTurn() {
 }
 
 async function prepare(parts) {
-  await installModules();
+  await together(installModules(), installPrograms(parts));
+}
+
+async function installPrograms(parts) {
   if (parts.includes('database') || parts.includes('browser')) await postgresPrograms();
   if (parts.includes('browser') && !findOnPath('chromium')) await installSystemPackages('Chromium', ['chromium']);
 }
