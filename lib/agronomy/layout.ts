@@ -16,7 +16,7 @@ export type LaidBlock = { blockNumber: number; strips: LaidStrip[] };
 
 export type Layout = {
   /** Two settings make pairs, three or more make randomised complete blocks: the same shuffle, two names. */
-  design: 'pairs' | 'randomised-complete-blocks';
+  design: 'pairs' | 'complete-blocks';
   seed: number;
   blocks: LaidBlock[];
   smallestAttainableP: number;
@@ -40,7 +40,7 @@ export function layout(plan: { settings: readonly string[]; blocks: number; seed
   refuseUnlayable(settings, blocks);
   const stream = randomStream(seed);
   return {
-    design: settings.length === 2 ? 'pairs' : 'randomised-complete-blocks',
+    design: settings.length === 2 ? 'pairs' : 'complete-blocks',
     seed,
     blocks: Array.from({ length: blocks }, (_, blockIndex) => ({
       blockNumber: blockIndex + 1,

@@ -45,9 +45,7 @@ describe('layout', () => {
 
   it('calls two settings pairs and more of them blocks', () => {
     expect(layout({ settings: ['A', 'B'], blocks: 4, seed: 1 }).design).toBe('pairs');
-    expect(layout({ settings: ['A', 'B', 'C'], blocks: 4, seed: 1 }).design).toBe(
-      'randomised-complete-blocks',
-    );
+    expect(layout({ settings: ['A', 'B', 'C'], blocks: 4, seed: 1 }).design).toBe('complete-blocks');
   });
 
   it.each([
