@@ -10,6 +10,16 @@ type CurveEndLabelsProps = { series: readonly CurveSeries[]; scale: number; line
 
 const lineHeight = 15;
 const intervalStep = 7;
+const intervalLeft = 5;
+const leaderWidth = 16;
+// A bold letter of 13 px is on average a little narrower than this.
+const letterWidth = 7.6;
+
+/** How much room right of the lines their intervals and names take. */
+export function labelRoom(series: readonly CurveSeries[], lineLength: number): number {
+  const lengths = series.flatMap((one) => wrappedLabel(one.label, lineLength)).map((line) => line.length);
+  return intervalLeft + series.length * intervalStep + leaderWidth + Math.max(0, ...lengths) * letterWidth;
+}
 
 /** Each line's name beside its end, moved apart where lines end together, and the interval of its last value. */
 export function CurveEndLabels({ series, scale, lineLength }: CurveEndLabelsProps) {
@@ -29,14 +39,14 @@ export function CurveEndLabels({ series, scale, lineLength }: CurveEndLabelsProp
   );
   const right = plot.x + plot.width;
   // The thin lines to the names start right of all intervals and so cannot cross each other.
-  const leaderLeft = right + 6 + ends.length * intervalStep;
-  const labelLeft = leaderLeft + 16;
+  const leaderLeft = right + intervalLeft + ends.length * intervalStep;
+  const labelLeft = leaderLeft + leaderWidth;
   return (
     <g>
       {ends.map(({ one, y, lines }, index) => {
         const { color } = seriesStyle(one.seriesIndex);
         const place = places[index] ?? y;
-        const barX = right + 8 + index * intervalStep;
+        const barX = right + intervalLeft + (index + 0.5) * intervalStep;
         const lower = one.lastInterval ? yScale(one.lastInterval.lower * scale) : undefined;
         const upper = one.lastInterval ? yScale(one.lastInterval.upper * scale) : undefined;
         return (

@@ -9,7 +9,7 @@ import { shownInUnits } from '@/lib/format/shown-in-units';
 import type { UnitSystem } from '@/lib/schemas/vocabulary';
 import { interfaceTexts } from '@/lib/texts/interface-texts';
 import { ChartFrame, type ChartNotes } from './chart-frame';
-import { CurveEndLabels } from './curve-end-labels';
+import { CurveEndLabels, labelRoom } from './curve-end-labels';
 import { curveRows } from './curve-rows';
 import type { CurveMeasure, CurveSeries } from './curve-series';
 import { SeriesMarker } from './series-marker';
@@ -45,6 +45,7 @@ export function EmergenceCurves({ series, measure, units, fileName, ...notes }: 
   const yTop = yTicks.at(-1) ?? 1;
   const [firstDay, lastDay] = [days[0] ?? 0, days.at(-1) ?? 1];
   const narrow = width < narrowBelow;
+  const lineLength = narrow ? 11 : 24;
   const xTicks = scaleLinear()
     .domain([firstDay, lastDay])
     .ticks(Math.min(lastDay - firstDay, narrow ? 5 : 12))
@@ -85,7 +86,7 @@ export function EmergenceCurves({ series, measure, units, fileName, ...notes }: 
             data={rows}
             width={width}
             height={320}
-            margin={{ top: 12, right: narrow ? 126 : 210, bottom: 22, left: 0 }}
+            margin={{ top: 12, right: labelRoom(series, lineLength), bottom: 22, left: 0 }}
             accessibilityLayer={false}
           >
             <CartesianGrid vertical={false} stroke="var(--rule)" />
@@ -139,7 +140,7 @@ export function EmergenceCurves({ series, measure, units, fileName, ...notes }: 
                 />
               );
             })}
-            <CurveEndLabels series={series} scale={scale} lineLength={narrow ? 11 : 24} />
+            <CurveEndLabels series={series} scale={scale} lineLength={lineLength} />
           </LineChart>
         ) : null}
       </div>

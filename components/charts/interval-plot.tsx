@@ -2,8 +2,7 @@ import { scaleLinear } from 'd3-scale';
 import { decimalText } from '@/lib/format/decimal-text';
 import { interfaceTexts } from '@/lib/texts/interface-texts';
 import { ChartFrame, type ChartNotes } from './chart-frame';
-import { SeriesMarker } from './series-marker';
-import { seriesStyle } from './series-style';
+import { IntervalOfRow } from './interval-of-row';
 
 export type IntervalRow = {
   id: string;
@@ -35,14 +34,7 @@ export function IntervalPlot({ rows, unit, fileName, ...notes }: IntervalPlotPro
   const x = scaleLinear().domain(domain).nice(4).range([3, 97]);
   const ticks = x.ticks(4);
   const percent = (value: number) => `${x(value).toFixed(2)}%`;
-  const tickDecimals = ticks.every(Number.isInteger)
-    ? 0
-    : ticks.every((tick) => Number.isInteger(tick * 10))
-      ? 1
-      : 2;
-  const zeroLine = (
-    <line x1={percent(0)} x2={percent(0)} y1={0} y2="100%" strokeWidth={1.5} className="stroke-ink" />
-  );
+  const tickDecimals = decimalsOf(ticks);
   return (
     <ChartFrame
       {...notes}
@@ -63,46 +55,15 @@ export function IntervalPlot({ rows, unit, fileName, ...notes }: IntervalPlotPro
       }))}
     >
       <div className="@container">
-        <ul className="grid grid-cols-1 @md:grid-cols-[minmax(6rem,10rem)_1fr_auto] @md:gap-x-4">
+        <ul className="grid grid-cols-1 @md:grid-cols-[minmax(6rem,10rem)_minmax(9rem,1fr)_auto] @md:gap-x-4">
           {rows.map((row) => (
             <li key={row.id} className="contents">
               <span className="pt-2 text-15 font-bold @md:self-center @md:pt-0">{row.label}</span>
-              <span className="font-mono text-15 @md:hidden">
-                {row.text} <span className="text-13 text-ink-soft">{row.intervalText}</span>
-              </span>
-              <svg aria-hidden="true" width="100%" height={rowHeight} className="block overflow-visible">
-                {zeroLine}
-                {row.interval ? (
-                  <>
-                    <line
-                      x1={percent(row.interval.lower)}
-                      x2={percent(row.interval.upper)}
-                      y1={middle}
-                      y2={middle}
-                      stroke={seriesStyle(row.seriesIndex).color}
-                      strokeWidth={3}
-                    />
-                    {[row.interval.lower, row.interval.upper].map((end) => (
-                      <line
-                        key={end}
-                        x1={percent(end)}
-                        x2={percent(end)}
-                        y1={middle - 6}
-                        y2={middle + 6}
-                        stroke={seriesStyle(row.seriesIndex).color}
-                        strokeWidth={2}
-                      />
-                    ))}
-                    <svg x={percent(row.interval.estimate)} y={middle} className="overflow-visible">
-                      <SeriesMarker index={row.seriesIndex} size={6} />
-                    </svg>
-                  </>
-                ) : null}
-              </svg>
-              <span className="hidden self-center text-right font-mono text-15 @md:block">
-                {row.text}
-                <span className="block text-13 text-ink-soft">{row.intervalText}</span>
-              </span>
+              {row.interval ? (
+                <IntervalOfRow row={row} interval={row.interval} percent={percent} />
+              ) : (
+                <span className="py-2 text-15 @md:col-span-2 @md:min-h-10">{row.text}</span>
+              )}
             </li>
           ))}
           <li aria-hidden="true" className="contents">
@@ -132,6 +93,14 @@ export function IntervalPlot({ rows, unit, fileName, ...notes }: IntervalPlotPro
       </div>
     </ChartFrame>
   );
+}
+
+/** As many decimals, up to two, as tell the ticks apart. */
+function decimalsOf(ticks: readonly number[]): number {
+  const isWhole = (factor: number) =>
+    ticks.every((tick) => Math.abs(tick * factor - Math.round(tick * factor)) < 1e-9);
+  if (isWhole(1)) return 0;
+  return isWhole(10) ? 1 : 2;
 }
 
 /** The words under the zero line stay within the picture where the line stands near an edge. */

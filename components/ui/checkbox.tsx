@@ -27,10 +27,13 @@ export function Checkbox({ label, hint, error, id, ...rest }: CheckboxProps) {
           aria-invalid={error ? true : undefined}
           className="size-6 shrink-0 accent-ink"
         />
-        <span>{label}</span>
+        <span className="py-2">{label}</span>
       </label>
       {hint ? (
-        <div id={`${controlId}-hint`} className="text-13 text-ink-soft in-data-[place=field]:text-15">
+        <div
+          id={`${controlId}-hint`}
+          className="-mt-2 pl-9 text-13 text-ink-soft in-data-[place=field]:text-15"
+        >
           {hint}
         </div>
       ) : null}

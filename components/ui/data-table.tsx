@@ -119,9 +119,15 @@ export function DataTable({
                         }
                         className={`min-h-press w-full cursor-pointer py-2 align-bottom font-bold hover:underline hover:underline-offset-4 ${side} ${sorted ? 'underline decoration-2 underline-offset-4' : ''}`}
                       >
-                        {column.head}
-                        <span aria-hidden="true" className="inline-block w-3 text-right">
-                          {sorted === 'ascending' ? '↑' : sorted === 'descending' ? '↓' : ''}
+                        <span className="relative">
+                          {column.head}
+                          {/* Beside the words, on the side away from the numbers, so that heads and numbers stay in line. */}
+                          <span
+                            aria-hidden="true"
+                            className={`absolute ${column.align === 'number' ? 'right-full' : 'left-full'}`}
+                          >
+                            {sorted === 'ascending' ? '↑' : sorted === 'descending' ? '↓' : ''}
+                          </span>
                         </span>
                       </button>
                     )}

@@ -14,8 +14,8 @@ export function Figure({ label, value, detail, needsAttention = false }: FigureP
   return (
     <div className="flex min-w-0 flex-col">
       <p className="text-15 font-bold">{label}</p>
-      <p className={`text-34 font-bold ${needsAttention ? 'text-flag-text' : ''}`}>{value}</p>
-      {detail ? <div className="text-13 text-ink-soft">{detail}</div> : null}
+      <div className={`text-34 font-bold ${needsAttention ? 'text-flag-text' : ''}`}>{value}</div>
+      {detail ? <div className="pt-1 text-13 text-ink-soft">{detail}</div> : null}
     </div>
   );
 }

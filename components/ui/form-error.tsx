@@ -19,7 +19,7 @@ export function FormError({ title, items = [], attempt = 0 }: FormErrorProps) {
     box.current?.focus();
   }, [attempt]);
   return (
-    <div ref={box} tabIndex={-1} role="alert" className="border-l-8 border-flag py-2 pl-4">
+    <div ref={box} tabIndex={-1} role="alert" className="border-l-8 border-flag py-2 pl-4 outline-none">
       <p className="text-18 font-bold text-flag-text">{title}</p>
       {items.length > 0 ? (
         <ul className="mt-1 flex flex-col gap-1">

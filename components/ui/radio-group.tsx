@@ -35,7 +35,7 @@ export function RadioGroup({
     .join(' ');
   return (
     <fieldset aria-describedby={describedBy || undefined} className="flex min-w-0 flex-col gap-1">
-      <legend className="text-15 font-bold in-data-[place=field]:text-18">{legend}</legend>
+      <legend className="pb-1 text-15 font-bold in-data-[place=field]:text-18">{legend}</legend>
       {hint ? (
         <div id={`${groupId}-hint`} className="text-13 text-ink-soft in-data-[place=field]:text-15">
           {hint}

@@ -16,7 +16,7 @@ export function TableCell({ cell, align, heads }: TableCellProps) {
     return (
       <th
         scope="row"
-        className="sticky left-0 max-w-[45vw] bg-inherit py-3 pr-4 text-left align-baseline font-bold"
+        className="sticky left-0 max-w-[45vw] min-w-32 bg-inherit py-3 pr-4 text-left align-baseline font-bold"
       >
         {body}
       </th>
