@@ -26,13 +26,13 @@ const numbers = localFont({
   style: 'normal',
   display: 'swap',
   variable: '--font-numbers',
+  adjustFontFallback: false,
+  fallback: ['ui-monospace', 'monospace'],
   declarations: [
     { prop: 'ascent-override', value: '95.3%' },
     { prop: 'descent-override', value: '31.3%' },
     { prop: 'line-gap-override', value: '0%' },
   ],
-  adjustFontFallback: false,
-  fallback: ['ui-monospace', 'monospace'],
 });
 
 export const metadata: Metadata = {

@@ -22,9 +22,6 @@ type IntervalPlotProps = ChartNotes & {
   fileName: string;
 };
 
-const rowHeight = 40;
-const middle = rowHeight / 2;
-
 /** Differences from the reference with their intervals, around a line where there is none. */
 export function IntervalPlot({ rows, unit, fileName, ...notes }: IntervalPlotProps) {
   const texts = interfaceTexts.charts;

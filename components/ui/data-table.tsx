@@ -117,9 +117,11 @@ export function DataTable({
                             direction: sorted === 'ascending' ? 'descending' : 'ascending',
                           })
                         }
-                        className={`min-h-press w-full cursor-pointer py-2 align-bottom font-bold hover:underline hover:underline-offset-4 ${side} ${sorted ? 'underline decoration-2 underline-offset-4' : ''}`}
+                        className={`min-h-press w-full cursor-pointer py-2 align-bottom font-bold ${side}`}
                       >
-                        <span className="relative">
+                        <span
+                          className={`relative inline-block underline-offset-4 hover:underline ${sorted ? 'underline decoration-2' : ''}`}
+                        >
                           {column.head}
                           {/* Beside the words, on the side away from the numbers, so that heads and numbers stay in line. */}
                           <span
