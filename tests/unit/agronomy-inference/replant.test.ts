@@ -95,6 +95,45 @@ describe('replant', () => {
     expect(again).toMatchObject({ recommendation: 'too-close', because: 'within-table-rounding' });
   });
 
+  it('bounds the break-even stand from the side that the table leaves', () => {
+    const costs = [{ label: 'All', dollarsPerAcre: 20 }];
+    // Planted before the table: keeping makes at most the first row, so at least this stand is needed.
+    const early = answered(
+      replant({ ...purdue, costs, plantedOn: { month: 4, day: 1 }, replantOn: { month: 6, day: 4 } }),
+    );
+    // By hand: 75 % of 200 bu less $20 / $4 is 145 bu, 72.5 %; the row of 10 April has 68 at 12,000 and 73 at 14,000.
+    expect(early.breakEven).toMatchObject({ kind: 'stand', bound: 'at-least' });
+    if (early.breakEven.kind === 'stand') expect(early.breakEven.plantsPerAcre).toBeCloseTo(13_800, 6);
+    // Replanted above the table's highest stand: replanting makes at most 84 %, 168 − 5 bu is 81.5 %, on 30 April 15,000.
+    const thick = answered(replant({ ...purdue, costs, replantPlantsPerAcre: 38_000 }));
+    expect(thick.breakEven).toMatchObject({ kind: 'stand', bound: 'at-most' });
+    if (thick.breakEven.kind === 'stand') expect(thick.breakEven.plantsPerAcre).toBeCloseTo(15_000, 6);
+    // Both: nothing can be said.
+    const both = answered(
+      replant({ ...purdue, costs, plantedOn: { month: 4, day: 1 }, replantPlantsPerAcre: 38_000 }),
+    );
+    expect(both.breakEven).toEqual({ kind: 'cannot-tell' });
+    // Nothing up to full stand makes what a free, paid-for replant makes.
+    const paid = answered(replant({ ...purdue, costs: [], insurancePaymentDollarsPerAcre: 200 }));
+    expect(paid.breakEven).toEqual({ kind: 'none-in-table' });
+  });
+
+  it('calls a gain or a loss too close while one printed percent of the table is worth more', () => {
+    // One percent of 200 bu at $4 is $8. At 17,500 plants keeping makes 87 %, as replanting does.
+    const even = { ...purdue, stand: { plantsPerAcre: 17_500, error: null } };
+    const lossOf = (dollarsPerAcre: number) =>
+      replant({ ...even, costs: [{ label: 'All', dollarsPerAcre }] });
+    expect(answered(lossOf(7))).toMatchObject({
+      recommendation: 'too-close',
+      because: 'within-table-rounding',
+    });
+    expect(answered(lossOf(9))).toMatchObject({ recommendation: 'keep', tableRoundingDollarsPerAcre: 8 });
+    const gainOf = (payment: number) =>
+      replant({ ...even, costs: [], insurancePaymentDollarsPerAcre: payment });
+    expect(answered(gainOf(7)).recommendation).toBe('too-close');
+    expect(answered(gainOf(9)).recommendation).toBe('replant');
+  });
+
   it('adds the dollar lines up to the gain', () => {
     const answer = answered(
       replant({
