@@ -62,11 +62,12 @@ function spacingRatios(row: RowSpacings): number[] {
   requiredNumber(row.theoreticalSpacingInches, 'theoreticalSpacingInches', { above: 0 });
   return row.spacingsInches.map((spacing) => {
     requiredNumber(spacing, 'spacingsInches', { atLeast: 0 });
-    return Math.round((spacing / row.theoreticalSpacingInches) * 1e9) / 1e9;
+    return spacing / row.theoreticalSpacingInches;
   });
 }
 
-function regionOf(ratio: number): 0 | 1 | 2 | 3 | 4 {
+function regionOf(exactRatio: number): 0 | 1 | 2 | 3 | 4 {
+  const ratio = Math.round(exactRatio * 1e9) / 1e9;
   if (ratio <= 0.5) return 0;
   if (ratio <= 1.5) return 1;
   if (ratio <= 2.5) return 2;
