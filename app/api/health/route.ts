@@ -1,4 +1,6 @@
-/** Whether this server answers. */
-export function GET() {
-  return Response.json({ status: 'up' });
-}
+import { answering, respond } from '@/lib/server/http/respond';
+import { readHealth } from '@/lib/server/services/session/read-health';
+
+export const dynamic = 'force-dynamic';
+
+export const GET = () => answering(async () => respond(await readHealth()));

@@ -1,0 +1,4 @@
+import { batchRoute, handlerAmong } from '@/lib/server/http/operation-route';
+import { allOperations } from '@/lib/server/operations/all-operations';
+
+export const POST = batchRoute(handlerAmong(allOperations));
