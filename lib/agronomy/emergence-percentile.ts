@@ -38,6 +38,7 @@ export function emergencePercentile(curve: EmergenceCurve, share: number): Outco
     return value({ days: reached.days, bound: 'at-latest', afterDays: null, byDays: reached.days });
   }
   const around = { afterDays: before.days, byDays: reached.days };
+  // Kept apart from the line below, whose division could leave a hair's breadth off the day of a tie.
   if (Math.abs(reached.plantsUp - target) <= tolerance) {
     return value({ days: reached.days, bound: 'exact', ...around });
   }

@@ -81,6 +81,14 @@ describe('rowScores on counts and a tape sheet', () => {
     expect(reasonOf(penalties['liu-2004-late'])).toBe('leaf-stage-not-known');
   });
 
+  test('knows a late share only as "at least" while plants still come', () => {
+    const stillComing = { ...counted, counts: counted.counts.filter((count) => count.days < 21) };
+    expect(answerOf(rowScores(stillComing).figures.lateShare)).toMatchObject({
+      source: 'tape-sheet',
+      bound: 'at-least',
+    });
+  });
+
   test('has every part of the score', () => {
     expect(answerOf(rowScores(counted).figures.score).leftOut).toEqual([]);
   });
