@@ -110,7 +110,6 @@ export function DataTable({
                     ) : (
                       <button
                         type="button"
-                        aria-label={texts.sortBy(column.head)}
                         onClick={() =>
                           setSort({
                             key: column.key,

@@ -49,7 +49,7 @@ export type RowEnd = (typeof rowEnds)[number];
 export const countKinds = ['so-far', 'new'] as const;
 export type CountKind = (typeof countKinds)[number];
 
-export const tapeEntryKinds = ['plant', 'late', 'double', 'late-double', 'missing'] as const;
+export const tapeEntryKinds = ['plant', 'late', 'double', 'missing'] as const;
 export type TapeEntryKind = (typeof tapeEntryKinds)[number];
 
 export const tapeUnits = ['in', 'ft-in', 'ft-tenths', 'cm'] as const;

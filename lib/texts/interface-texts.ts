@@ -11,7 +11,6 @@ export const interfaceTexts = {
     filter: 'Show only rows with',
     rowsShown: (shown: number, all: number) => `${shown} of ${all} rows`,
     noRowMatches: 'No row has these words.',
-    sortBy: (column: string) => `Sort by ${column}`,
     scrollsSideways: 'scrolls sideways',
     openNumber: (label: string, text: string) => `${label}: ${text}. Show where it comes from`,
     inputs: 'From',

@@ -1,1 +1,0 @@
-export default function Page() { return <p>Rowrise</p>; }

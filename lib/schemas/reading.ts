@@ -1,0 +1,102 @@
+import type { ReadingUnit } from './vocabulary';
+
+/** A reading as it is kept: what was typed, its unit, and the number as whole thousandths of that unit. */
+export type Reading = { typed: string; unit: ReadingUnit; thousandths: number };
+
+export type ReadingRule = {
+  /** The unit that holds when none is typed. */
+  unit: ReadingUnit;
+  /** Other units that may be typed after the number. */
+  otherUnits?: readonly ReadingUnit[];
+  /** In the default unit; a limit for another unit follows by conversion. */
+  least: number;
+  most: number;
+  /** Whether "34,000" means thirty-four thousand; for lengths a comma is a decimal comma. */
+  thousandsComma?: boolean;
+  /** Said in errors: "row spacing". */
+  name: string;
+};
+
+export type ParsedReading = { ok: true; reading: Reading } | { ok: false; message: string };
+
+const spellings: Record<string, ReadingUnit> = {
+  in: 'in', inch: 'in', inches: 'in', '"': 'in', '″': 'in', ft: 'ft', foot: 'ft', feet: 'ft', "'": 'ft', '′': 'ft',
+  cm: 'cm', m: 'm', mm: 'mm', ac: 'acres', acre: 'acres', acres: 'acres', ha: 'ha',
+  '/ac': 'per-acre', 'per acre': 'per-acre', '/ha': 'per-ha', 'per ha': 'per-ha', '%': 'percent', percent: 'percent',
+  'bu/ac': 'bu/ac', bu: 'bu/ac', 't/ha': 't/ha', lb: 'lb', lbs: 'lb', kg: 'kg', lbf: 'lbf', psi: 'psi', kpa: 'kPa', n: 'N',
+};
+
+/** How many of the second unit one of the first holds; used for limits and for figures, never to change what is kept. */
+const perCanonical: Record<ReadingUnit, { of: string; factor: number }> = {
+  in: { of: 'length', factor: 1 }, ft: { of: 'length', factor: 12 }, cm: { of: 'length', factor: 1 / 2.54 },
+  m: { of: 'length', factor: 100 / 2.54 }, mm: { of: 'length', factor: 1 / 25.4 },
+  acres: { of: 'area', factor: 1 }, ha: { of: 'area', factor: 2.47105381 },
+  'per-acre': { of: 'density', factor: 1 }, 'per-ha': { of: 'density', factor: 1 / 2.47105381 },
+  percent: { of: 'share', factor: 1 },
+  // 1 Mg/ha of corn is 15.93 bu/ac (56 lb a bushel).
+  'bu/ac': { of: 'yield', factor: 1 }, 't/ha': { of: 'yield', factor: 15.93 },
+  lb: { of: 'weight', factor: 1 }, kg: { of: 'weight', factor: 2.20462262 },
+  lbf: { of: 'force', factor: 1 }, N: { of: 'force', factor: 0.224808943 },
+  psi: { of: 'pressure', factor: 1 }, kPa: { of: 'pressure', factor: 0.145037738 },
+};
+
+/** A reading in another unit of the same quantity. Throws where the two measure different things. */
+export function readingIn(reading: { unit: ReadingUnit; thousandths: number }, unit: ReadingUnit): number {
+  const from = perCanonical[reading.unit];
+  const to = perCanonical[unit];
+  if (from.of !== to.of) throw new RangeError(`${reading.unit} cannot be read as ${unit}`);
+  return ((reading.thousandths / 1000) * from.factor) / to.factor;
+}
+
+const feetInches = /^(\d+)\s*(?:ft|feet|foot|'|′)\s*(?:(\S.*?)\s*(?:in|inch|inches|"|″)?)?$/i;
+const numberAndUnit = /^([-+−]?[\d.,/½¼¾\s]+)\s*([^\d\s.,/½¼¾].*)?$/;
+
+/** One number as people write it: 17.5, 17,5, 5 1/4, 5¼, 34,000. Undefined where it is none, or could be read two ways. */
+function numberOf(text: string, thousandsComma: boolean): number | undefined {
+  let rest = text.trim().replace('−', '-');
+  const glyph = { '½': ' 1/2', '¼': ' 1/4', '¾': ' 3/4' };
+  rest = rest.replace(/[½¼¾]/g, (each) => glyph[each as keyof typeof glyph]).trim();
+  const fraction = /^(?:(\d+)\s+)?(\d+)\/(\d+)$/.exec(rest);
+  if (fraction) {
+    const [, whole, top, bottom] = fraction;
+    return Number(bottom) === 0 ? undefined : Number(whole ?? 0) + Number(top) / Number(bottom);
+  }
+  if (thousandsComma && /^[-+]?\d{1,3}([, ]\d{3})+(\.\d+)?$/.test(rest)) return Number(rest.replace(/[, ]/g, ''));
+  // A comma before three digits could be read two ways where lengths are typed, so it is asked about instead of guessed.
+  if (/^[-+]?\d{1,3},\d{3}$/.test(rest)) return undefined;
+  return /^[-+]?(\d+([.,]\d+)?|[.,]\d+)$/.test(rest) ? Number(rest.replace(',', '.')) : undefined;
+}
+
+/** The one parser of everything that is measured. Keeps the text as typed and says in a sentence what is wrong. */
+export function parseReading(text: string, rule: ReadingRule): ParsedReading {
+  const typed = text.trim();
+  const example = rule.unit === 'in' ? '30 or 5 1/4' : rule.unit === 'ft' ? '17 ft 5 in' : rule.unit === 'per-acre' ? '34,000' : '12.5';
+  const wrong = (message: string): ParsedReading => ({ ok: false, message });
+  if (typed === '') return wrong(`Type the ${rule.name}.`);
+  if (typed.length > 40) return wrong(`That is too long for a ${rule.name}. Write it such as ${example}.`);
+  const allowed = [rule.unit, ...(rule.otherUnits ?? [])];
+  const parts = splitReading(typed, rule, allowed);
+  if (!parts) return wrong(`Write the ${rule.name} as a number such as ${example}.`);
+  if (!allowed.includes(parts.unit)) return wrong(`The ${rule.name} is given in ${allowed.join(' or ')}.`);
+  if (parts.value < 0) return wrong(`The ${rule.name} cannot be below zero.`);
+  const thousandths = Math.round(parts.value * 1000);
+  const inRuleUnit = readingIn({ unit: parts.unit, thousandths }, rule.unit);
+  if (inRuleUnit < rule.least || inRuleUnit > rule.most) {
+    return wrong(`The ${rule.name} is expected between ${rule.least.toLocaleString('en-US')} and ${rule.most.toLocaleString('en-US')} ${rule.unit}; this says ${typed}.`);
+  }
+  return { ok: true, reading: { typed, unit: parts.unit, thousandths } };
+}
+
+function splitReading(typed: string, rule: ReadingRule, allowed: readonly ReadingUnit[]): { value: number; unit: ReadingUnit } | undefined {
+  const mixed = allowed.includes('ft') || allowed.includes('in') ? feetInches.exec(typed) : null;
+  if (mixed) {
+    const inches = mixed[2] === undefined ? 0 : numberOf(mixed[2], false);
+    if (inches === undefined || inches < 0 || inches >= 12) return undefined;
+    return { value: Number(mixed[1]) * 12 + inches, unit: 'in' };
+  }
+  const simple = numberAndUnit.exec(typed);
+  if (!simple) return undefined;
+  const value = numberOf(simple[1] ?? '', rule.thousandsComma ?? false);
+  const unit = simple[2] === undefined ? rule.unit : spellings[simple[2].trim().toLowerCase().replace(/\.$/, '')];
+  return value === undefined || unit === undefined ? undefined : { value, unit };
+}

@@ -1,0 +1,26 @@
+import { z } from 'zod';
+import type { ReadingRule } from './reading';
+import { readingSchema } from './reading-schema';
+import { rowEnds } from './vocabulary';
+
+export const rowLengthRule: ReadingRule = { unit: 'ft', otherUnits: ['in', 'm', 'cm'], least: 0.5, most: 1_000, name: 'row length' };
+export const rowSamplesMost = 400;
+
+export const rowSampleSchema = z.object({
+  stripId: z.uuid().nullable(),
+  zoneId: z.uuid().nullable(),
+  label: z.string().trim().min(1, 'Give the peg a label, such as S7-2.').max(20, 'Use at most 20 characters.').regex(/^[\w .#/-]+$/, 'Use letters, digits and - . / # only.'),
+  planterRow: z.number().int().min(1).max(99).nullable(),
+  length: readingSchema(rowLengthRule),
+  startEnd: z.enum(rowEnds),
+  farEnd: z.enum(rowEnds),
+});
+export type RowSampleInput = z.output<typeof rowSampleSchema>;
+
+export const addRowSamplesSchema = z.object({
+  plantingId: z.uuid(),
+  samples: z.array(rowSampleSchema.extend({ id: z.uuid() })).min(1).max(rowSamplesMost),
+});
+export type AddRowSamplesInput = z.output<typeof addRowSamplesSchema>;
+
+export const removeSchema = z.object({});
