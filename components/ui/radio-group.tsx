@@ -55,7 +55,6 @@ export function RadioGroup({
               value={option.value}
               checked={value === undefined ? undefined : value === option.value}
               defaultChecked={initialValue === undefined ? undefined : initialValue === option.value}
-              aria-invalid={error ? true : undefined}
               className="size-5 shrink-0 accent-ink outline-none"
             />
             <span className="flex flex-col">

@@ -6,7 +6,6 @@ export const interfaceTexts = {
   },
   controls: {
     close: 'Close',
-    choose: 'Choose one',
     downloadCsv: 'Download CSV',
     filter: 'Show only rows with',
     rowsShown: (shown: number, all: number) => `${shown} of ${all} rows`,
@@ -18,7 +17,6 @@ export const interfaceTexts = {
     source: 'Source',
     limits: 'What it does not tell',
     optional: 'may stay empty',
-    working: 'Working',
   },
   shell: {
     skipToContent: 'Skip to the content',
