@@ -9,10 +9,10 @@ import type { TapeGap } from './tape-gaps';
 import { tapeMarks } from './tape-marks';
 import type { TapeEnd, TapePlant } from './tape-plant';
 
-export const pieceHeight = 100;
+export const pieceHeight = 104;
 
 const groundY = 56;
-const tapeHeight = 20;
+const tapeHeight = 24;
 const leastHeight = 11;
 const mostHeight = 38;
 const labelSize = 11;
@@ -81,21 +81,22 @@ export function LyingPiece({
       />
       {tapeMarks(fromInches, toInches, units, inchSize).map((mark) => {
         const x = xOf(mark.atInches);
-        const length = { whole: 12, half: 7, minor: 3.5 }[mark.rank];
-        const numeralLeft = x + 4 + (mark.numeral?.length ?? 0) * 7 > tapeEnd;
+        const length = { whole: 9, half: 6.5, minor: 3.5 }[mark.rank];
+        const halfWidth = ((mark.numeral?.length ?? 0) * 7.2) / 2 + 2;
         return (
           <g key={mark.atInches}>
             <path
               d={`M${x.toFixed(1)} ${groundY}v${length}`}
               fill="none"
-              strokeWidth={mark.rank === 'whole' ? 1.6 : 0.8}
+              strokeWidth={mark.rank === 'whole' ? 1.8 : 0.8}
               className="stroke-ink"
             />
             {mark.numeral ? (
               <text
-                x={numeralLeft ? x - 3 : x + 3}
-                y={groundY + tapeHeight - 4.5}
-                textAnchor={numeralLeft ? 'end' : 'start'}
+                // Under its mark, but never across an end of the tape.
+                x={Math.min(tapeEnd - halfWidth, Math.max(edge + halfWidth, x)).toFixed(1)}
+                y={groundY + tapeHeight - 4}
+                textAnchor="middle"
                 fontSize={12}
                 className="fill-tape-red font-mono font-bold"
               >

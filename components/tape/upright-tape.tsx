@@ -87,8 +87,8 @@ export function UprightTape({
             {mark.numeral ? (
               <text
                 x={tapeLeft + tapeWidth - 5}
-                // Under its mark where the tape ends right above.
-                y={(y - top < 20 ? y + 14 : y - 4).toFixed(1)}
+                // Level with its mark, but never across an end of the tape.
+                y={Math.min(bottom - 3, Math.max(top + 14, y + 5.5)).toFixed(1)}
                 textAnchor="end"
                 fontSize={16}
                 className="fill-tape-red font-mono font-bold"
