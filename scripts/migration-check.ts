@@ -23,7 +23,7 @@ function readJournal(folder: string): (JournalEntry & { hash: string })[] {
 
 async function readApplied(client: Client): Promise<Applied[]> {
   const known = await client.query<{ found: string | null }>(`select to_regclass('drizzle.__drizzle_migrations') as found`);
-  if (known.rows[0]?.found == null) return [];
+  if (known.rows[0]?.found === undefined || known.rows[0].found === null) return [];
   const applied = await client.query<Applied>('select hash, created_at from drizzle.__drizzle_migrations order by created_at');
   return applied.rows;
 }

@@ -33,6 +33,9 @@ export async function installModules() {
     await step('Installing modules', () =>
       run(command, [...before, 'ci', '--include=dev', '--no-audit', '--no-fund'], {
         cwd: checkout,
+        // npm answers a polite signal by taking back what it did, long after; a next start begins by clearing anyway.
+        deathSignal: 'KILL',
+        interruptWith: 'SIGKILL',
         failure: 'The modules could not be installed. npm said:',
       }),
     );

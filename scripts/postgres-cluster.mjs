@@ -9,7 +9,6 @@ import {
   rmSync,
   writeFileSync,
 } from 'node:fs';
-import { tmpdir } from 'node:os';
 import { basename, dirname, join } from 'node:path';
 import { bornAt } from './process-identity.mjs';
 import { postgresUser } from './postgres-programs.mjs';
@@ -33,22 +32,21 @@ export async function makeCluster({ programs, dataFolder, password, lasting = tr
     rmSync(join(parent, name), { recursive: true, force: true });
   }
   const making = mkdtempSync(join(parent, prefix));
-  const passwordFolder = mkdtempSync(join(tmpdir(), 'rowrise-init-'));
   try {
-    const passwordFile = join(passwordFolder, 'password');
+    const passwordFile = join(making, 'password');
+    const made = join(making, 'data');
     writeFileSync(passwordFile, password, { mode: 0o600 });
-    if (user) for (const path of [making, passwordFolder, passwordFile]) chownSync(path, user.uid, user.gid);
+    if (user) for (const path of [making, passwordFile]) chownSync(path, user.uid, user.gid);
     await run(
       join(programs.folder, 'initdb'),
       [
-        ...['-D', making, '-U', 'postgres', '--auth=scram-sha-256', `--pwfile=${passwordFile}`],
+        ...['-D', made, '-U', 'postgres', '--auth=scram-sha-256', `--pwfile=${passwordFile}`],
         ...['--encoding=UTF8', '--locale=C.UTF-8', lasting ? '--data-checksums' : '--no-sync'],
       ],
       { user, cwd: '/', env: postgresEnvironment, failure: 'The database could not be made. initdb said:' },
     );
-    renameSync(making, dataFolder);
+    renameSync(made, dataFolder);
   } finally {
-    rmSync(passwordFolder, { recursive: true, force: true });
     rmSync(making, { recursive: true, force: true });
   }
 }
