@@ -2,7 +2,7 @@ const token = (name) => `var(--${name})`;
 
 /** Only these names exist in class lists: a palette number or another size yields no style at all. */
 /** @type {import('tailwindcss').Config} */
-export default {
+const config = {
   theme: {
     colors: {
       transparent: 'transparent',
@@ -47,3 +47,5 @@ export default {
     },
   },
 };
+
+export default config;
