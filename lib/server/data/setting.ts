@@ -1,0 +1,49 @@
+import 'server-only';
+import { and, asc, eq, isNull, sql } from 'drizzle-orm';
+import type { Transaction } from '@/db/connection';
+import { setting } from '@/db/schema/setting';
+
+export type SettingRow = typeof setting.$inferSelect;
+
+export async function listSettings(tx: Transaction, params: { organisationId: string }) {
+  return tx
+    .select()
+    .from(setting)
+    .where(and(eq(setting.organisationId, params.organisationId), isNull(setting.removedAt)))
+    .orderBy(asc(setting.createdAt), asc(setting.id));
+}
+
+export async function findSetting(tx: Transaction, params: { organisationId: string; settingId: string }) {
+  const rows = await tx
+    .select()
+    .from(setting)
+    .where(and(eq(setting.organisationId, params.organisationId), eq(setting.id, params.settingId), isNull(setting.removedAt)));
+  return rows[0];
+}
+
+export async function insertSetting(tx: Transaction, values: typeof setting.$inferInsert) {
+  const inserted = await tx.insert(setting).values(values).onConflictDoNothing().returning({ id: setting.id });
+  return inserted.length === 1;
+}
+
+/** Changes a setting that still stands at the version the edit was made on; says whether it did. */
+export async function updateSetting(
+  tx: Transaction,
+  params: { organisationId: string; settingId: string; version: number; values: Partial<typeof setting.$inferInsert> },
+) {
+  const changed = await tx
+    .update(setting)
+    .set({ ...params.values, version: params.version + 1 })
+    .where(and(eq(setting.organisationId, params.organisationId), eq(setting.id, params.settingId), eq(setting.version, params.version)))
+    .returning({ id: setting.id });
+  return changed.length === 1;
+}
+
+export async function removeSetting(tx: Transaction, params: { organisationId: string; settingId: string; version: number }) {
+  const removed = await tx
+    .update(setting)
+    .set({ removedAt: sql`now()`, version: params.version + 1 })
+    .where(and(eq(setting.organisationId, params.organisationId), eq(setting.id, params.settingId), eq(setting.version, params.version)))
+    .returning({ id: setting.id });
+  return removed.length === 1;
+}
