@@ -87,14 +87,14 @@ export async function prepareDatabase({ port, secrets, home }, database, { demo 
     }
     await makeDatabase(client, database);
   });
-  await step('Bringing the tables up to date', () => migrate(urls.migrator));
+  await step('Bringing the tables up to date', () => migrate(urls.migrator, urls.app));
   if (demo) await fillDemo({ urls, adminUrl, database, secrets, home });
   return urls;
 }
 
-export function migrate(migratorUrl) {
+export function migrate(migratorUrl, appUrl) {
   return runScript('scripts/migrate.ts', [], {
-    env: { MIGRATION_DATABASE_URL: migratorUrl },
+    env: { MIGRATION_DATABASE_URL: migratorUrl, DATABASE_URL: appUrl },
     failure: 'The tables could not be brought up to date.',
   });
 }

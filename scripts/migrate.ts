@@ -3,7 +3,9 @@ import { existsSync } from 'node:fs';
 import { drizzle } from 'drizzle-orm/node-postgres';
 import { migrate } from 'drizzle-orm/node-postgres/migrator';
 import pg from 'pg';
-import { assertMayBypassRowSecurity, assertMigrationsAgree } from './migration-check.ts';
+import { applyGrants } from '../db/grants.ts';
+import { assertMigrationsAgree } from './migration-check.ts';
+import { assertBoundByRowSecurity, assertMayBypassRowSecurity, assertRolesExist } from './role-check.ts';
 
 const folder = './migrations';
 // Any number does, as long as every process takes the same one.
@@ -18,25 +20,28 @@ async function main() {
   await client.connect();
   try {
     await client.query('select pg_advisory_lock($1)', [advisoryLockKey]);
+    await assertRolesExist(client);
     await assertMigrationsAgree(client, folder);
     await assertMayBypassRowSecurity(client);
     await migrate(drizzle(client), { migrationsFolder: folder, migrationsSchema: 'drizzle' });
     await assertMayBypassRowSecurity(client);
-    if (existsSync('./db/grants.ts')) {
-      const grants: string = '../db/grants.ts';
-      const { applyGrants } = await import(grants);
-      await applyGrants(client);
-    }
+    // In one transaction, so that a server that is running meanwhile never finds its rights taken away.
+    await client.query('BEGIN');
+    await applyGrants(client);
+    await client.query('COMMIT');
   } finally {
     await client.end();
   }
+  if (process.env.DATABASE_URL) await assertBoundByRowSecurity(process.env.DATABASE_URL);
 }
 
 try {
   await main();
 } catch (error) {
   // The ORM's message carries the whole statement; the database's own, kept as the cause, is the shorter and safer one.
-  const told = error instanceof Error && error.cause instanceof Error ? error.cause : error;
+  const cause = error instanceof Error && error.cause instanceof Error ? error.cause : error;
+  // Two refused addresses of one host come as a bundle without a message of its own.
+  const told = cause instanceof AggregateError ? cause.errors[0] : cause;
   process.stderr.write(`${told instanceof Error ? told.message : String(told)}\n`);
   process.exitCode = 1;
 }

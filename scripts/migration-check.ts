@@ -57,16 +57,3 @@ export async function assertMigrationsAgree(client: Client, folder: string): Pro
     throw new Error('This database has migrations that this version of Rowrise does not know. Use the newer version.');
   }
 }
-
-/** A migrator under row security would see no rows: its backfills would change nothing and report success. */
-export async function assertMayBypassRowSecurity(client: Client): Promise<void> {
-  const answer = await client.query<{ role: string; may: boolean; guarded: boolean }>(
-    `select current_user as role, rolbypassrls or rolsuper as may,
-       exists (select 1 from pg_class where relrowsecurity and relkind in ('r', 'p')) as guarded
-     from pg_roles where rolname = current_user`,
-  );
-  const row = answer.rows[0];
-  if (row?.guarded && !row.may) {
-    throw new Error(`The role ${row.role} migrates the tables but may not pass row security. Give it BYPASSRLS.`);
-  }
-}

@@ -6,7 +6,7 @@ import { Interrupted, beforeLeaving, leave, listenForSignals, onInterruption, to
 import { takeLock } from './lock.mjs';
 import { migrate, prepareDatabase, prepareLocalCluster, startLocalCluster } from './local-database.mjs';
 import { installModules } from './modules.mjs';
-import { checkout, localFolder, lockPath, makeLocalFolder } from './places.mjs';
+import { localFolder, lockPath, makeLocalFolder } from './places.mjs';
 import { freePort } from './port.mjs';
 import { Stop, say, secondsSince, step } from './say.mjs';
 import { runScript } from './typescript.mjs';
@@ -52,7 +52,7 @@ async function prepareLocal(parts, { empty }) {
 }
 
 async function prepareGiven({ given, givenMigrator, session }) {
-  await step('Bringing the tables up to date', () => migrate(givenMigrator));
+  await step('Bringing the tables up to date', () => migrate(givenMigrator, given));
   return { app: given, migrator: givenMigrator, session };
 }
 

@@ -56,7 +56,8 @@ export async function startTestCluster() {
     await makeRoles(client, secrets);
     await makeDatabase(client, templateName);
   });
-  await migrate(databaseUrls(port, secrets, templateName).migrator);
+  const template = databaseUrls(port, secrets, templateName);
+  await migrate(template.migrator, template.app);
   return { port, secrets, folder };
 }
 
