@@ -1,9 +1,10 @@
 import 'server-only';
-import { and, asc, desc, eq } from 'drizzle-orm';
+import { and, asc, desc, eq, isNull } from 'drizzle-orm';
 import type { Transaction } from '@/db/connection';
 import { block } from '@/db/schema/block';
 import { strip } from '@/db/schema/strip';
 import { stripAsPlanted } from '@/db/schema/strip-as-planted';
+import { trial } from '@/db/schema/trial';
 
 export type ListedStrip = {
   id: string;
@@ -52,4 +53,16 @@ export async function insertStrips(tx: Transaction, values: (typeof strip.$infer
 
 export async function insertStripsAsPlanted(tx: Transaction, values: (typeof stripAsPlanted.$inferInsert)[]) {
   await tx.insert(stripAsPlanted).values(values);
+}
+
+/** Whether any standing trial drew this setting for a strip. */
+export async function isSettingLaidOut(tx: Transaction, params: { organisationId: string; settingId: string }) {
+  const rows = await tx
+    .select({ id: strip.id })
+    .from(strip)
+    .innerJoin(block, and(eq(block.organisationId, strip.organisationId), eq(block.id, strip.blockId)))
+    .innerJoin(trial, and(eq(trial.organisationId, block.organisationId), eq(trial.id, block.trialId), isNull(trial.removedAt)))
+    .where(and(eq(strip.organisationId, params.organisationId), eq(strip.plannedSettingId, params.settingId)))
+    .limit(1);
+  return rows.length > 0;
 }

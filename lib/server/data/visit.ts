@@ -26,3 +26,13 @@ export async function findFirstVisitDay(tx: Transaction, params: { organisationI
     .where(and(eq(visit.organisationId, params.organisationId), eq(rowSample.plantingId, params.plantingId)));
   return rows[0]?.day ?? undefined;
 }
+
+/** Whether anybody has been at a row sample. */
+export async function hasVisits(tx: Transaction, params: { organisationId: string; rowSampleId: string }) {
+  const rows = await tx
+    .select({ id: visit.id })
+    .from(visit)
+    .where(and(eq(visit.organisationId, params.organisationId), eq(visit.rowSampleId, params.rowSampleId)))
+    .limit(1);
+  return rows.length > 0;
+}

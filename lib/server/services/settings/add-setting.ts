@@ -1,0 +1,16 @@
+import 'server-only';
+import { AppError } from '@/lib/errors/app-error';
+import { settingSchema, type SettingInput } from '@/lib/schemas/setting';
+import { insertSetting } from '../../data/setting';
+import type { WriteContext, Written } from '../../operations/context';
+import { defineOperation } from '../../operations/define-operation';
+import { originColumns } from '../../operations/origin-columns';
+import { settingColumns } from './setting-columns';
+
+async function service(context: WriteContext, body: SettingInput): Promise<Written> {
+  const added = await insertSetting(context.tx, { id: context.operation.thingId, ...settingColumns(body), ...originColumns(context) });
+  if (!added) throw new AppError('operation-reused');
+  return { version: 1 };
+}
+
+export const addSetting = defineOperation({ kind: 'setting.add', version: 1, action: 'settings.write', body: settingSchema, service });
