@@ -1,0 +1,14 @@
+import 'server-only';
+import { eq } from 'drizzle-orm';
+import type { Transaction } from '@/db/connection';
+import { withdrawal } from '@/db/schema/withdrawal';
+
+/** The ids of all that was taken back in an organisation: observations, and imports with all they brought. */
+export async function listWithdrawnIds(tx: Transaction, params: { organisationId: string }): Promise<Set<string>> {
+  const rows = await tx.select({ id: withdrawal.targetId }).from(withdrawal).where(eq(withdrawal.organisationId, params.organisationId));
+  return new Set(rows.map((row) => row.id));
+}
+
+export async function insertWithdrawal(tx: Transaction, values: typeof withdrawal.$inferInsert) {
+  await tx.insert(withdrawal).values(values);
+}

@@ -1,0 +1,89 @@
+import 'server-only';
+import type { Transaction } from '@/db/connection';
+import { placeInches } from '@/lib/schemas/tape-place';
+import type { TapeEntryKind, TapeUnit } from '@/lib/schemas/vocabulary';
+import { listCounts } from '../../data/count';
+import { listResidueReadings } from '../../data/residue-reading';
+import { listTapeSheets, type TapeSheetRow } from '../../data/tape-sheet';
+import { listWithdrawnIds } from '../../data/withdrawal';
+import { momentOf, resolveCounts, type ObservedCount } from './resolve-counts';
+
+export type ObservedPlace = {
+  typed: string;
+  positionInches: number;
+  kind: TapeEntryKind;
+  marker: string | null;
+  leafStage: number | null;
+  /** Between which visits the plant came up, by its marker; null where the marker tells nothing. */
+  firstSeen: { after: { on: string; at: string | null } | null; by: { on: string; at: string | null } } | null;
+};
+
+export type ObservedTapeSheet = {
+  id: string;
+  rowSampleId: string;
+  visitId: string;
+  visitedOn: string;
+  personName: string;
+  tapeUnit: TapeUnit;
+  /** The newest standing sheet of its row sample. */
+  used: boolean;
+  places: ObservedPlace[];
+};
+
+export type ObservedResidue = { id: string; rowSampleId: string; readOn: string; marksRead: number; marksCovered: number };
+
+export type Observations = { counts: ObservedCount[]; tapeSheets: ObservedTapeSheet[]; residueReadings: ObservedResidue[] };
+
+/** What stands of everything observed in a planting: corrections in the place of what they replaced, withdrawn ones left out. */
+export async function readObservations(tx: Transaction, params: { organisationId: string; plantingId: string }): Promise<Observations> {
+  const withdrawn = await listWithdrawnIds(tx, params);
+  const standing = <Row extends { id: string; importId: string | null; replacesId?: string | null }>(rows: readonly Row[]) => {
+    const present = rows.filter((row) => !withdrawn.has(row.id) && !(row.importId && withdrawn.has(row.importId)));
+    // A correction that was itself taken back no longer replaces anything.
+    const replaced = new Set(present.map((row) => row.replacesId));
+    return present.filter((row) => !replaced.has(row.id));
+  };
+  const countRows = standing(await listCounts(tx, params));
+  const counts = [...groupByRowSample(countRows).values()].flatMap((rows) =>
+    resolveCounts(rows).map(({ replacesId: _replaces, importId: _import, ...count }) => count),
+  );
+  const countsByRow = groupByRowSample(counts);
+  const tapeSheets = [...groupByRowSample(standing(await listTapeSheets(tx, params))).values()].flatMap((rows) =>
+    rows.map((row, index) => observedTapeSheet(row, index === rows.length - 1, countsByRow.get(row.rowSampleId) ?? [])),
+  );
+  const residueReadings = standing(await listResidueReadings(tx, params)).map(({ importId: _import, ...reading }) => reading);
+  return { counts, tapeSheets, residueReadings };
+}
+
+export function groupByRowSample<Row extends { rowSampleId: string }>(rows: readonly Row[]): Map<string, Row[]> {
+  const groups = new Map<string, Row[]>();
+  for (const row of rows) groups.set(row.rowSampleId, [...(groups.get(row.rowSampleId) ?? []), row]);
+  return groups;
+}
+
+function observedTapeSheet(row: TapeSheetRow, used: boolean, counts: readonly ObservedCount[]): ObservedTapeSheet {
+  const visits = counts.filter((count) => count.used).sort((a, b) => (momentOf(a) < momentOf(b) ? -1 : 1));
+  const places = row.placesThousandths.map((thousandths, index): ObservedPlace => {
+    const marker = row.markers[index] || null;
+    const leafTenths = row.leafStageTenths[index] ?? -1;
+    return {
+      typed: row.placesTyped[index] ?? '',
+      positionInches: placeInches(thousandths, row.tapeUnit),
+      kind: (row.kinds[index] ?? 'plant') as TapeEntryKind,
+      marker,
+      leafStage: leafTenths < 0 ? null : leafTenths / 10,
+      firstSeen: firstSeenBy(marker, visits),
+    };
+  });
+  const { id, rowSampleId, visitId, visitedOn, personName, tapeUnit } = row;
+  return { id, rowSampleId, visitId, visitedOn, personName, tapeUnit, used, places };
+}
+
+function firstSeenBy(marker: string | null, visits: readonly ObservedCount[]): ObservedPlace['firstSeen'] {
+  if (marker === null) return null;
+  const index = visits.findIndex((visit) => visit.marker?.toLowerCase() === marker.toLowerCase());
+  const by = visits[index];
+  if (!by) return null;
+  const after = visits[index - 1];
+  return { after: after ? { on: after.visitedOn, at: after.visitedAt } : null, by: { on: by.visitedOn, at: by.visitedAt } };
+}
