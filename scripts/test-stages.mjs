@@ -1,10 +1,9 @@
 // The parts of `npm test`, in the order they run. Each answers with its counts.
-import { mkdtempSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
+import { rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { build, buildIsCurrent } from './build.mjs';
 import { lockHolder } from './lock.mjs';
-import { checkout, lockPath } from './places.mjs';
+import { checkout, localFolder, lockPath } from './places.mjs';
 import { run } from './run.mjs';
 import { say } from './say.mjs';
 import { testEnvironment } from './test-cluster.mjs';
@@ -21,23 +20,21 @@ const tool = (path, args, options = {}) =>
     env: { ...plainEnvironment(), ...options.env },
   });
 
-async function withReport(work) {
-  const folder = mkdtempSync(join(tmpdir(), 'rowrise-report-'));
-  try {
-    return await work(join(folder, 'report.json'));
-  } finally {
-    rmSync(folder, { recursive: true, force: true });
-  }
+/** Where a tool writes its report; the last run's must not pass for this one's. */
+function freshReport(name) {
+  const path = join(localFolder, `test-report-${name}.json`);
+  rmSync(path, { force: true });
+  return path;
 }
 
-const vitest = (folders, more, env) =>
-  withReport(async (report) => {
-    // A file named by hand stands in for the folders.
-    const chosen = more.some((argument) => argument.startsWith('tests/')) ? more : [...folders, ...more];
-    const reporters = ['--reporter=default', '--reporter=json', `--outputFile.json=${report}`];
-    const { code } = await tool('vitest/vitest.mjs', ['run', ...chosen, ...reporters], { env });
-    return vitestCounts(report, code);
-  });
+async function vitest(name, folders, more, env) {
+  const report = freshReport(name);
+  // A file named by hand stands in for the folders.
+  const chosen = more.some((argument) => argument.startsWith('tests/')) ? more : [...folders, ...more];
+  const reporters = ['--reporter=default', '--reporter=json', `--outputFile.json=${report}`];
+  const { code } = await tool('vitest/vitest.mjs', ['run', ...chosen, ...reporters], { env });
+  return vitestCounts(report, code);
+}
 
 async function lint(_, more) {
   const { code } = await tool('eslint/bin/eslint.js', ['.', '--max-warnings', '0', ...more]);
@@ -51,10 +48,10 @@ async function types() {
   return wholeCounts(generated.code || code);
 }
 
-const unit = (_, more) => vitest(['tests/unit/', 'tests/reference/', 'tests/architecture/'], more);
+const unit = (_, more) => vitest('unit', ['tests/unit/', 'tests/reference/', 'tests/architecture/'], more);
 
 const database = async (cluster, more) =>
-  vitest(['tests/integration/', 'tests/access/', 'tests/reliability/'], more, testEnvironment(await cluster()));
+  vitest('database', ['tests/integration/', 'tests/access/', 'tests/reliability/'], more, testEnvironment(await cluster()));
 
 async function buildOnce() {
   if (buildIsCurrent()) return { ...wholeCounts(0), note: 'unchanged since the last build' };
@@ -69,16 +66,16 @@ async function buildOnce() {
 }
 
 async function browser(cluster, more) {
-  return withBrowserServers(await cluster(), (env) =>
-    withReport(async (report) => {
-      const { code } = await tool('@playwright/test/cli.js', ['test', '--reporter=list,json', ...more], {
-        env: { ...env, PLAYWRIGHT_JSON_OUTPUT_FILE: report },
-        // Playwright closes its browsers when it is interrupted, and leaves them when it is terminated.
-        interruptWith: 'SIGINT',
-      });
-      return playwrightCounts(report, code);
-    }),
-  );
+  return withBrowserServers(await cluster(), async (env) => {
+    const report = freshReport('browser');
+    const { code } = await tool('@playwright/test/cli.js', ['test', '--reporter=list,json', ...more], {
+      env: { ...env, PLAYWRIGHT_JSON_OUTPUT_FILE: report },
+      // Playwright closes its browsers when it is interrupted, and leaves them when it is terminated.
+      deathSignal: 'INT',
+      interruptWith: 'SIGINT',
+    });
+    return playwrightCounts(report, code);
+  });
 }
 
 /** What each part is called on the command line and what has to run for it. */
