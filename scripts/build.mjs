@@ -8,14 +8,27 @@ import { plainEnvironment } from './typescript.mjs';
 
 // Nothing in these folders can change what the browser or the server gets.
 const apart = new Set([
-  ...['.git', '.ci', '.next', '.rowrise', 'node_modules', 'coverage', 'docs', 'migrations', 'scripts', 'tests'],
+  ...[
+    '.git',
+    '.ci',
+    '.next',
+    '.rowrise',
+    'node_modules',
+    'coverage',
+    'docs',
+    'migrations',
+    'scripts',
+    'tests',
+  ],
   ...['test-results', 'playwright-report', 'next-env.d.ts'],
 ]);
 const mark = join(checkout, '.next', 'rowrise-sources');
 
 function filesIn(folder) {
   return readdirSync(folder, { withFileTypes: true })
-    .filter((entry) => folder !== checkout || !(apart.has(entry.name) || /\.(md|tsbuildinfo)$/.test(entry.name)))
+    .filter(
+      (entry) => folder !== checkout || !(apart.has(entry.name) || /\.(md|tsbuildinfo)$/.test(entry.name)),
+    )
     .flatMap((entry) => {
       const path = join(folder, entry.name);
       if (entry.isDirectory()) return filesIn(path);

@@ -104,13 +104,16 @@ const fillScript = 'db/demo/fill.ts';
 async function fillDemo({ urls, adminUrl, database, secrets, home }) {
   const people = join(localFolder, 'demo-people.json');
   const kept = join(home, 'demo-people.json');
-  if (!existsSync(join(checkout, fillScript))) return say(`There are no demo data: ${fillScript} does not exist.`);
+  if (!existsSync(join(checkout, fillScript)))
+    return say(`There are no demo data: ${fillScript} does not exist.`);
   if (!(await withClient(urls.admin, isEmpty))) {
     if (!existsSync(people) && existsSync(kept)) copyFileSync(kept, people);
     return undefined;
   }
   const note = (text) =>
-    withClient(adminUrl, (client) => client.query(`COMMENT ON DATABASE ${client.escapeIdentifier(database)} IS ${text}`));
+    withClient(adminUrl, (client) =>
+      client.query(`COMMENT ON DATABASE ${client.escapeIdentifier(database)} IS ${text}`),
+    );
   await note(`'${beingFilled}'`);
   await step('Filling in the demo data', () =>
     runScript(fillScript, [], {

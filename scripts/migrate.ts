@@ -13,7 +13,8 @@ const advisoryLockKey = 7_203_114_901;
 
 async function main() {
   const url = process.env.MIGRATION_DATABASE_URL;
-  if (!url) throw new Error('MIGRATION_DATABASE_URL is needed: the address for the role that owns the tables.');
+  if (!url)
+    throw new Error('MIGRATION_DATABASE_URL is needed: the address for the role that owns the tables.');
   if (!existsSync(`${folder}/meta/_journal.json`)) return;
   const client = new pg.Client({ connectionString: url });
   client.on('error', () => {});

@@ -14,17 +14,25 @@ interface Applied {
 }
 
 function readJournal(folder: string): (JournalEntry & { hash: string })[] {
-  const journal = JSON.parse(readFileSync(`${folder}/meta/_journal.json`, 'utf8')) as { entries: JournalEntry[] };
+  const journal = JSON.parse(readFileSync(`${folder}/meta/_journal.json`, 'utf8')) as {
+    entries: JournalEntry[];
+  };
   return journal.entries.map(({ tag, when }) => {
-    const hash = createHash('sha256').update(readFileSync(`${folder}/${tag}.sql`, 'utf8')).digest('hex');
+    const hash = createHash('sha256')
+      .update(readFileSync(`${folder}/${tag}.sql`, 'utf8'))
+      .digest('hex');
     return { tag, when, hash };
   });
 }
 
 async function readApplied(client: Client): Promise<Applied[]> {
-  const known = await client.query<{ found: string | null }>(`select to_regclass('drizzle.__drizzle_migrations') as found`);
+  const known = await client.query<{ found: string | null }>(
+    `select to_regclass('drizzle.__drizzle_migrations') as found`,
+  );
   if (known.rows[0]?.found === undefined || known.rows[0].found === null) return [];
-  const applied = await client.query<Applied>('select hash, created_at from drizzle.__drizzle_migrations order by created_at');
+  const applied = await client.query<Applied>(
+    'select hash, created_at from drizzle.__drizzle_migrations order by created_at',
+  );
   return applied.rows;
 }
 
@@ -37,7 +45,9 @@ export async function assertMigrationsAgree(client: Client, folder: string): Pro
   journal.forEach((entry, index) => {
     const before = journal[index - 1];
     if (before && before.when >= entry.when) {
-      throw new Error(`Migration ${entry.tag} carries an older time than ${before.tag} before it. Generate it again.`);
+      throw new Error(
+        `Migration ${entry.tag} carries an older time than ${before.tag} before it. Generate it again.`,
+      );
     }
   });
   const applied = await readApplied(client);
@@ -46,14 +56,20 @@ export async function assertMigrationsAgree(client: Client, folder: string): Pro
   for (const entry of journal) {
     const hash = appliedAt.get(entry.when);
     if (hash !== undefined && hash !== entry.hash) {
-      throw new Error(`Migration ${entry.tag} was edited after this database had applied it. Put it back, and add a new one.`);
+      throw new Error(
+        `Migration ${entry.tag} was edited after this database had applied it. Put it back, and add a new one.`,
+      );
     }
     if (hash === undefined && entry.when < lastAppliedAt) {
-      throw new Error(`Migration ${entry.tag} is older than what this database has applied already. Generate it again.`);
+      throw new Error(
+        `Migration ${entry.tag} is older than what this database has applied already. Generate it again.`,
+      );
     }
     appliedAt.delete(entry.when);
   }
   if (appliedAt.size > 0) {
-    throw new Error('This database has migrations that this version of Rowrise does not know. Use the newer version.');
+    throw new Error(
+      'This database has migrations that this version of Rowrise does not know. Use the newer version.',
+    );
   }
 }

@@ -17,7 +17,9 @@ export function makeLocalFolder() {
     // The database's own user has to pass through this folder; what is secret in it has modes of its own.
     if (statSync(localFolder).uid === process.getuid()) chmodSync(localFolder, 0o755);
   } catch {
-    throw new Stop(`The folder ${localFolder} cannot be written. Start as the user it belongs to, or use a clone of your own.`);
+    throw new Stop(
+      `The folder ${localFolder} cannot be written. Start as the user it belongs to, or use a clone of your own.`,
+    );
   }
 }
 

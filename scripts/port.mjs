@@ -4,7 +4,9 @@ import { Stop } from './say.mjs';
 function canListen(port, host) {
   return new Promise((resolve) => {
     const server = createServer();
-    server.once('error', (error) => resolve(error.code === 'EADDRINUSE' || error.code === 'EACCES' ? false : error));
+    server.once('error', (error) =>
+      resolve(error.code === 'EADDRINUSE' || error.code === 'EACCES' ? false : error),
+    );
     server.listen({ port, host, exclusive: true }, () => server.close(() => resolve(true)));
   });
 }
@@ -13,7 +15,8 @@ function canListen(port, host) {
 export async function freePort(wanted, host) {
   for (let port = wanted; port < wanted + 200 && port < 65_536; port += 1) {
     const answer = await canListen(port, host);
-    if (answer instanceof Error) throw new Stop(`The address ${host} cannot be used on this machine (${answer.code}).`);
+    if (answer instanceof Error)
+      throw new Stop(`The address ${host} cannot be used on this machine (${answer.code}).`);
     if (answer) return port;
   }
   throw new Stop(`No free port was found from ${wanted} upwards.`);

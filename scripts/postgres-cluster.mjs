@@ -55,7 +55,9 @@ export async function makeCluster({ programs, dataFolder, password, lasting = tr
 export function refuseOtherMajor(programs, dataFolder) {
   const onDisk = majorOnDisk(dataFolder);
   if (onDisk === undefined) {
-    throw new Stop(`The folder ${dataFolder} holds no PostgreSQL cluster. Move it away, and start again to make a new one.`);
+    throw new Stop(
+      `The folder ${dataFolder} holds no PostgreSQL cluster. Move it away, and start again to make a new one.`,
+    );
   }
   if (onDisk !== programs.major) {
     throw new Stop(

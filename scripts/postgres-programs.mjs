@@ -11,10 +11,14 @@ const oldestMajor = 14;
 
 function foldersWithPrograms() {
   const debian = '/usr/lib/postgresql';
-  const folders = existsSync(debian) ? readdirSync(debian).map((version) => join(debian, version, 'bin')) : [];
+  const folders = existsSync(debian)
+    ? readdirSync(debian).map((version) => join(debian, version, 'bin'))
+    : [];
   const onPath = findOnPath('postgres');
   if (onPath) folders.push(dirname(onPath));
-  return folders.filter((folder) => existsSync(join(folder, 'initdb')) && existsSync(join(folder, 'postgres')));
+  return folders.filter(
+    (folder) => existsSync(join(folder, 'initdb')) && existsSync(join(folder, 'postgres')),
+  );
 }
 
 function majorOf(folder) {
@@ -36,8 +40,10 @@ export async function postgresPrograms(wantedMajor) {
     await withoutDefaultCluster(() => installSystemPackages('PostgreSQL', ['postgresql']));
     programs = found();
   }
-  if (programs.length === 0) throw new Stop(`PostgreSQL ${oldestMajor} or newer is needed and was not found.`);
-  const fitting = wantedMajor === undefined ? programs[0] : programs.find(({ major }) => major === wantedMajor);
+  if (programs.length === 0)
+    throw new Stop(`PostgreSQL ${oldestMajor} or newer is needed and was not found.`);
+  const fitting =
+    wantedMajor === undefined ? programs[0] : programs.find(({ major }) => major === wantedMajor);
   return { ...(fitting ?? programs[0]), fits: fitting !== undefined };
 }
 
@@ -55,6 +61,8 @@ export function postgresUser(dataFolder) {
   try {
     return { uid: idOf('-u'), gid: idOf('-g') };
   } catch {
-    throw new Stop('PostgreSQL refuses to run as root, and there is no user named postgres. Start as another user.');
+    throw new Stop(
+      'PostgreSQL refuses to run as root, and there is no user named postgres. Start as another user.',
+    );
   }
 }

@@ -45,7 +45,9 @@ async function answers(child, url) {
       return true;
     } catch (error) {
       if (error.code === '28P01') {
-        throw new Stop('The database does not accept the kept password. The secrets file and the cluster do not belong together.');
+        throw new Stop(
+          'The database does not accept the kept password. The secrets file and the cluster do not belong together.',
+        );
       }
       await pause(100);
     } finally {
@@ -108,7 +110,8 @@ export async function startPostgres(cluster) {
       if (leaving) return;
       restarts.push(Date.now());
       const recent = restarts.filter((at) => at > Date.now() - restartWindowMs).length;
-      if (recent > restartsMost) return say('PostgreSQL keeps ending and is not started again. Stop, and read its log.');
+      if (recent > restartsMost)
+        return say('PostgreSQL keeps ending and is not started again. Stop, and read its log.');
       say('PostgreSQL has ended unexpectedly and is started again.');
       try {
         current = await startOnce(cluster, port);

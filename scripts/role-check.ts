@@ -5,7 +5,10 @@ import type { Client } from 'pg';
 /** The tables' rights are given to two roles by name; a server that is not ours has to have them. */
 export async function assertRolesExist(client: Client): Promise<void> {
   const needed = ['rowrise_app', 'rowrise_eraser'];
-  const found = await client.query<{ rolname: string }>('select rolname from pg_roles where rolname = any($1)', [needed]);
+  const found = await client.query<{ rolname: string }>(
+    'select rolname from pg_roles where rolname = any($1)',
+    [needed],
+  );
   const known = found.rows.map((row) => row.rolname);
   const missing = needed.filter((name) => !known.includes(name));
   if (missing.length > 0) {
@@ -25,7 +28,9 @@ export async function assertMayBypassRowSecurity(client: Client): Promise<void> 
   );
   const row = answer.rows[0];
   if (row?.guarded && !row.may) {
-    throw new Error(`The role ${row.role} migrates the tables but may not pass row security. Give it BYPASSRLS.`);
+    throw new Error(
+      `The role ${row.role} migrates the tables but may not pass row security. Give it BYPASSRLS.`,
+    );
   }
 }
 

@@ -54,10 +54,17 @@ export async function end(child, { signal = 'SIGTERM', graceSeconds = 8 } = {}) 
  * Runs a program to its end. Its output is kept and shown only when it fails, unless `show` is set.
  * With `mayFail` the exit code is handed back, otherwise a failure stops everything with `failure` as the sentence.
  */
-export async function run(command, args, { show = false, mayFail = false, failure, input, interruptWith, ...options } = {}) {
+export async function run(
+  command,
+  args,
+  { show = false, mayFail = false, failure, input, interruptWith, ...options } = {},
+) {
   throwIfInterrupted();
   const outputs = show ? ['inherit', 'inherit'] : ['pipe', 'pipe'];
-  const child = start(command, args, { ...options, stdio: [input === undefined ? 'ignore' : 'pipe', ...outputs] });
+  const child = start(command, args, {
+    ...options,
+    stdio: [input === undefined ? 'ignore' : 'pipe', ...outputs],
+  });
   let output = '';
   let printed = '';
   child.stdout?.on('data', (text) => {
@@ -70,8 +77,13 @@ export async function run(command, args, { show = false, mayFail = false, failur
     child.stdin.end(input);
   }
   const forget = onInterruption(() => void end(child, { signal: interruptWith }));
-  const closed = show ? ended(child) : new Promise((resolve) => child.once('close', () => resolve(ended(child))));
-  const code = await Promise.race([closed, new Promise((resolve) => child.once('error', () => resolve(127)))]);
+  const closed = show
+    ? ended(child)
+    : new Promise((resolve) => child.once('close', () => resolve(ended(child))));
+  const code = await Promise.race([
+    closed,
+    new Promise((resolve) => child.once('error', () => resolve(127))),
+  ]);
   await end(child);
   forget();
   throwIfInterrupted();

@@ -2,7 +2,14 @@
 import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { build, buildIsCurrent } from './build.mjs';
-import { Interrupted, beforeLeaving, leave, listenForSignals, onInterruption, together } from './interruption.mjs';
+import {
+  Interrupted,
+  beforeLeaving,
+  leave,
+  listenForSignals,
+  onInterruption,
+  together,
+} from './interruption.mjs';
 import { takeLock } from './lock.mjs';
 import { migrate, prepareDatabase, prepareLocalCluster, startLocalCluster } from './local-database.mjs';
 import { installModules } from './modules.mjs';
@@ -24,22 +31,36 @@ function readOptions() {
 function readEnvironment() {
   const { DATABASE_URL, MIGRATION_DATABASE_URL, SESSION_SECRET, HOST, PORT } = process.env;
   const port = Number(PORT || 3000);
-  if (!Number.isInteger(port) || port < 1 || port > 65_535) throw new Stop(`PORT is ${PORT}, which is not a port number.`);
+  if (!Number.isInteger(port) || port < 1 || port > 65_535)
+    throw new Stop(`PORT is ${PORT}, which is not a port number.`);
   if (DATABASE_URL && !SESSION_SECRET) {
-    throw new Stop('DATABASE_URL is given, so SESSION_SECRET is needed too: at least 32 characters, the same on every server.');
+    throw new Stop(
+      'DATABASE_URL is given, so SESSION_SECRET is needed too: at least 32 characters, the same on every server.',
+    );
   }
-  if (SESSION_SECRET && SESSION_SECRET.length < 32) throw new Stop('SESSION_SECRET is too short: it needs at least 32 characters.');
+  if (SESSION_SECRET && SESSION_SECRET.length < 32)
+    throw new Stop('SESSION_SECRET is too short: it needs at least 32 characters.');
   if (DATABASE_URL && !MIGRATION_DATABASE_URL) {
-    throw new Stop('DATABASE_URL is given, so MIGRATION_DATABASE_URL is needed too: the address for the role that owns the tables.');
+    throw new Stop(
+      'DATABASE_URL is given, so MIGRATION_DATABASE_URL is needed too: the address for the role that owns the tables.',
+    );
   }
-  return { port, host: HOST || '127.0.0.1', given: DATABASE_URL, givenMigrator: MIGRATION_DATABASE_URL, session: SESSION_SECRET };
+  return {
+    port,
+    host: HOST || '127.0.0.1',
+    given: DATABASE_URL,
+    givenMigrator: MIGRATION_DATABASE_URL,
+    session: SESSION_SECRET,
+  };
 }
 
 function holdLock(about) {
   const lock = takeLock(lockPath, about);
   if (lock.holder) {
     const where = lock.holder.address ? ` at ${lock.holder.address}` : '';
-    throw new Stop(`Rowrise is already running${where} (process ${lock.holder.pid}). Stop it before starting it again.`);
+    throw new Stop(
+      `Rowrise is already running${where} (process ${lock.holder.pid}). Stop it before starting it again.`,
+    );
   }
   beforeLeaving(() => lock.release());
   return lock;
@@ -67,7 +88,11 @@ function sayWhoCanSignIn() {
 
 async function sayFirstOwnerLink(database, address) {
   const { printed } = await runScript('scripts/first-owner-link.ts', ['--address', address], {
-    env: { DATABASE_URL: database.app, MIGRATION_DATABASE_URL: database.migrator, SESSION_SECRET: database.session },
+    env: {
+      DATABASE_URL: database.app,
+      MIGRATION_DATABASE_URL: database.migrator,
+      SESSION_SECRET: database.session,
+    },
     failure: 'The link for the first owner could not be made.',
   });
   say(`\n${printed.trim()}`);
@@ -82,13 +107,21 @@ async function main() {
   const port = await freePort(environment.port, host);
   if (port !== environment.port) say(`Port ${environment.port} is taken, so ${port} is used.`);
   // Modules and packages come from elsewhere, so that fetching both at once saves a third of the first start.
-  const [, parts] = await together(installModules(), environment.given ? Promise.resolve() : prepareLocalCluster());
+  const [, parts] = await together(
+    installModules(),
+    environment.given ? Promise.resolve() : prepareLocalCluster(),
+  );
   const [database] = await together(
     parts ? prepareLocal(parts, options) : prepareGiven(environment),
     options.dev || buildIsCurrent() ? Promise.resolve() : step('Building', () => build()),
   );
   const server = await step('Starting the web server', () =>
-    startWebServer({ dev: options.dev, host, port, env: { DATABASE_URL: database.app, SESSION_SECRET: database.session } }),
+    startWebServer({
+      dev: options.dev,
+      host,
+      port,
+      env: { DATABASE_URL: database.app, SESSION_SECRET: database.session },
+    }),
   );
   lock.note({ dev: options.dev, address: server.address });
   if (options.empty) await sayFirstOwnerLink(database, process.env.ORIGIN || server.address);
@@ -96,7 +129,9 @@ async function main() {
   say(`\nRowrise is at ${server.address} (ready after ${secondsSince(startedAt)} s). Ctrl-C stops it.`);
   await new Promise((resolve, reject) => {
     onInterruption(reject);
-    void server.over.then(() => reject(new Stop('The web server has ended unexpectedly, so everything is stopped.')));
+    void server.over.then(() =>
+      reject(new Stop('The web server has ended unexpectedly, so everything is stopped.')),
+    );
   });
 }
 

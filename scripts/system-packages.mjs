@@ -14,7 +14,9 @@ async function apt(args, options) {
 export async function installSystemPackages(title, packages) {
   const byHand = `sudo apt-get install --no-install-recommends ${packages.join(' ')}`;
   if (process.getuid?.() !== 0 || !findOnPath('apt-get')) {
-    throw new Stop(`${title} is missing and can only be installed by an administrator, on Debian with: ${byHand}`);
+    throw new Stop(
+      `${title} is missing and can only be installed by an administrator, on Debian with: ${byHand}`,
+    );
   }
   await step(`Installing ${title} from Debian's packages`, async () => {
     // An installation cut short earlier leaves packages half set up; this finishes them and is quick otherwise.

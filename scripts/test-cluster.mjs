@@ -1,5 +1,15 @@
 // A cluster for one test run: nothing in it lasts, so it need not wait for the disk.
-import { accessSync, chmodSync, constants, existsSync, mkdtempSync, readFileSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
+import {
+  accessSync,
+  chmodSync,
+  constants,
+  existsSync,
+  mkdtempSync,
+  readFileSync,
+  readdirSync,
+  rmSync,
+  writeFileSync,
+} from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { databaseUrls, makeDatabase, makeRoles, withClient } from './databases.mjs';
@@ -19,7 +29,8 @@ const prefix = 'rowrise-test-';
 const settings = { fsync: 'off', full_page_writes: 'off', synchronous_commit: 'off', max_connections: 200 };
 
 function temporaryFolder() {
-  const folder = [tmpdir(), '/tmp', '/var/tmp'].find((it) => existsSync(it) && everyoneMayPass(it)) ?? tmpdir();
+  const folder =
+    [tmpdir(), '/tmp', '/var/tmp'].find((it) => existsSync(it) && everyoneMayPass(it)) ?? tmpdir();
   accessSync(folder, constants.W_OK);
   return folder;
 }

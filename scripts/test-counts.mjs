@@ -7,7 +7,8 @@ function read(path) {
 
 /** A run that ended badly without a failed test (an error outside any test) counts as one failure. */
 function settled({ passed, failed, skipped }, code, what) {
-  if (failed === 0 && code !== 0) return { passed, failed: 1, skipped, note: `${what} ended with code ${code}` };
+  if (failed === 0 && code !== 0)
+    return { passed, failed: 1, skipped, note: `${what} ended with code ${code}` };
   if (passed + failed === 0) return { passed, failed: 1, skipped, note: 'not one test was run' };
   return { passed, failed, skipped };
 }
@@ -16,7 +17,9 @@ export function vitestCounts(path, code) {
   const report = read(path);
   if (!report) return settled({ passed: 0, failed: 0, skipped: 0 }, code, 'vitest');
   // A file that could not even be loaded has no tests to fail, and must not be lost for that.
-  const unloaded = report.testResults.filter((file) => file.status === 'failed' && file.assertionResults.length === 0);
+  const unloaded = report.testResults.filter(
+    (file) => file.status === 'failed' && file.assertionResults.length === 0,
+  );
   const counts = {
     passed: report.numPassedTests,
     failed: report.numFailedTests + unloaded.length,

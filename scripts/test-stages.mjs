@@ -51,13 +51,20 @@ async function types() {
 const unit = (_, more) => vitest('unit', ['tests/unit/', 'tests/reference/', 'tests/architecture/'], more);
 
 const database = async (cluster, more) =>
-  vitest('database', ['tests/integration/', 'tests/access/', 'tests/reliability/'], more, testEnvironment(await cluster()));
+  vitest(
+    'database',
+    ['tests/integration/', 'tests/access/', 'tests/reliability/'],
+    more,
+    testEnvironment(await cluster()),
+  );
 
 async function buildOnce() {
   if (buildIsCurrent()) return { ...wholeCounts(0), note: 'unchanged since the last build' };
   const holder = lockHolder(lockPath);
   if (holder && !holder.dev) {
-    say('npm start serves from this folder, and a new build would take its files away. Stop it, then test again.');
+    say(
+      'npm start serves from this folder, and a new build would take its files away. Stop it, then test again.',
+    );
     return wholeCounts(1);
   }
   const { code, output } = await build({ mayFail: true });

@@ -1,7 +1,14 @@
 // Runs every check there is, or the parts that are named: npm test -- unit, npm test -- database tests/access.
 import { setTimeout as pause } from 'node:timers/promises';
 import { join } from 'node:path';
-import { Interrupted, beforeLeaving, leave, listenForSignals, throwIfInterrupted, together } from './interruption.mjs';
+import {
+  Interrupted,
+  beforeLeaving,
+  leave,
+  listenForSignals,
+  throwIfInterrupted,
+  together,
+} from './interruption.mjs';
 import { takeLock } from './lock.mjs';
 import { installModules } from './modules.mjs';
 import { localFolder, makeLocalFolder } from './places.mjs';
@@ -42,7 +49,8 @@ async function prepare(parts) {
 
 async function installPrograms(parts) {
   if (parts.includes('database') || parts.includes('browser')) await postgresPrograms();
-  if (parts.includes('browser') && !findOnPath('chromium')) await installSystemPackages('Chromium', ['chromium']);
+  if (parts.includes('browser') && !findOnPath('chromium'))
+    await installSystemPackages('Chromium', ['chromium']);
 }
 
 /** The cluster is made when the first part asks for it, and once. */
@@ -103,7 +111,9 @@ try {
   exitCode = totals.failed === 0 ? 0 : 1;
 } catch (error) {
   if (error instanceof Interrupted) exitCode = error.exitCode;
-  process.stderr.write(`${error instanceof Stop || error instanceof Interrupted ? error.message : error.stack}\n`);
+  process.stderr.write(
+    `${error instanceof Stop || error instanceof Interrupted ? error.message : error.stack}\n`,
+  );
 }
 await leave();
 if (totals) say(`${totals.passed} passed, ${totals.failed} failed`);

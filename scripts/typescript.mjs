@@ -4,7 +4,8 @@ import { run } from './run.mjs';
 
 /** The environment of whoever started this, without what only npm or another database needs. */
 export function plainEnvironment() {
-  const unwanted = /^(npm_|PG|TEST_|ROWRISE_)|^(DATABASE_URL|MIGRATION_DATABASE_URL|ERASER_DATABASE_URL|NODE_ENV|INIT_CWD)$/;
+  const unwanted =
+    /^(npm_|PG|TEST_|ROWRISE_)|^(DATABASE_URL|MIGRATION_DATABASE_URL|ERASER_DATABASE_URL|NODE_ENV|INIT_CWD)$/;
   const entries = Object.entries(process.env).filter(([name]) => !unwanted.test(name));
   return { ...Object.fromEntries(entries), NEXT_TELEMETRY_DISABLED: '1' };
 }

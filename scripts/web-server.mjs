@@ -10,7 +10,10 @@ const healthSecondsMost = 90;
 
 async function isHealthy(address) {
   try {
-    const answer = await fetch(`${address}/api/health`, { signal: AbortSignal.timeout(5000), redirect: 'manual' });
+    const answer = await fetch(`${address}/api/health`, {
+      signal: AbortSignal.timeout(5000),
+      redirect: 'manual',
+    });
     return answer.ok;
   } catch {
     return false;
@@ -18,7 +21,13 @@ async function isHealthy(address) {
 }
 
 /** Starts `next start`, or `next dev`, and answers once it is healthy: its address, a promise of its end, and a way to stop it. */
-export async function startWebServer({ dev = false, host, port, env, stdio = ['ignore', 'inherit', 'inherit'] }) {
+export async function startWebServer({
+  dev = false,
+  host,
+  port,
+  env,
+  stdio = ['ignore', 'inherit', 'inherit'],
+}) {
   const child = start(
     process.execPath,
     ['node_modules/next/dist/bin/next', dev ? 'dev' : 'start', '-H', host, '-p', String(port)],
@@ -42,8 +51,10 @@ export async function startWebServer({ dev = false, host, port, env, stdio = ['i
   const deadline = Date.now() + healthSecondsMost * 1000;
   while (!(await isHealthy(address))) {
     throwIfInterrupted();
-    if (child.exitCode !== null || child.signalCode !== null) throw new Stop('The web server ended while starting.');
-    if (Date.now() > deadline) throw new Stop(`The web server did not answer at ${address}/api/health in ${healthSecondsMost} s.`);
+    if (child.exitCode !== null || child.signalCode !== null)
+      throw new Stop('The web server ended while starting.');
+    if (Date.now() > deadline)
+      throw new Stop(`The web server did not answer at ${address}/api/health in ${healthSecondsMost} s.`);
     await pause(150);
   }
   return { address, over: ended(child), stop };

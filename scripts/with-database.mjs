@@ -15,7 +15,9 @@ const postmaster = existsSync(join(home, 'postgres')) ? runningPostmaster(join(h
 const [command, ...args] = process.argv.slice(2);
 
 if (!command || !secrets || !postmaster) {
-  process.stderr.write('The local database is not running (start it with npm run dev), or no command was given.\n');
+  process.stderr.write(
+    'The local database is not running (start it with npm run dev), or no command was given.\n',
+  );
   process.exit(1);
 }
 const urls = databaseUrls(postmaster.port, secrets, 'rowrise');

@@ -41,10 +41,14 @@ function changedMigrations(change: (journal: Journal, folder: string) => void): 
 }
 
 function migrate(url: string): Promise<{ code: number | null; told: string }> {
-  const child = spawn(process.execPath, ['--conditions=react-server', '--import', 'tsx', 'scripts/migrate.ts'], {
-    env: { PATH: process.env.PATH, MIGRATION_DATABASE_URL: url, NODE_ENV: 'test' },
-    stdio: ['ignore', 'ignore', 'pipe'],
-  });
+  const child = spawn(
+    process.execPath,
+    ['--conditions=react-server', '--import', 'tsx', 'scripts/migrate.ts'],
+    {
+      env: { PATH: process.env.PATH, MIGRATION_DATABASE_URL: url, NODE_ENV: 'test' },
+      stdio: ['ignore', 'ignore', 'pipe'],
+    },
+  );
   let told = '';
   child.stderr.on('data', (text: Buffer) => (told += text.toString()));
   return new Promise((resolve) => child.on('close', (code) => resolve({ code, told })));
@@ -88,7 +92,8 @@ describe('the history of the tables', () => {
   });
 
   it('is the same when two migrators begin at once on an empty database', async () => {
-    const tables = () => client.query(`select relname from pg_class where relkind = 'r' and relnamespace >= 2200 order by 1`);
+    const tables = () =>
+      client.query(`select relname from pg_class where relkind = 'r' and relnamespace >= 2200 order by 1`);
     const before = await tables();
     await client.query('drop schema public cascade; drop schema drizzle cascade; create schema public');
     const runs = await Promise.all([migrate(database.migratorUrl), migrate(database.migratorUrl)]);
