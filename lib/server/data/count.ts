@@ -38,8 +38,11 @@ export async function listCounts(tx: Transaction, params: { organisationId: stri
     .orderBy(asc(count.createdAt), asc(count.id));
 }
 
-export async function insertCounts(tx: Transaction, values: (typeof count.$inferInsert)[]) {
-  await tx.insert(count).values(values);
+/** Adds counts; says how many were new. Even the longest file's fit into one statement. */
+export async function insertCounts(tx: Transaction, values: (typeof count.$inferInsert)[]): Promise<number> {
+  if (values.length === 0) return 0;
+  const inserted = await tx.insert(count).values(values).onConflictDoNothing().returning({ id: count.id });
+  return inserted.length;
 }
 
 export async function findCount(tx: Transaction, params: { organisationId: string; countId: string }) {

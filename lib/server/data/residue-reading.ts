@@ -23,13 +23,21 @@ export async function listResidueReadings(tx: Transaction, params: { organisatio
     .orderBy(asc(residueReading.createdAt), asc(residueReading.id));
 }
 
-export async function insertResidueReading(tx: Transaction, values: typeof residueReading.$inferInsert) {
-  await tx.insert(residueReading).values(values);
+/** Adds a reading; says whether it was new. */
+export async function insertResidueReading(tx: Transaction, values: typeof residueReading.$inferInsert): Promise<boolean> {
+  const inserted = await tx.insert(residueReading).values(values).onConflictDoNothing().returning({ id: residueReading.id });
+  return inserted.length === 1;
 }
 
 export async function findResidueReading(tx: Transaction, params: { organisationId: string; residueReadingId: string }) {
   const rows = await tx
-    .select({ id: residueReading.id, rowSampleId: residueReading.rowSampleId })
+    .select({
+      id: residueReading.id,
+      rowSampleId: residueReading.rowSampleId,
+      readOn: residueReading.readOn,
+      marksRead: residueReading.marksRead,
+      marksCovered: residueReading.marksCovered,
+    })
     .from(residueReading)
     .where(and(eq(residueReading.organisationId, params.organisationId), eq(residueReading.id, params.residueReadingId)));
   return rows[0];

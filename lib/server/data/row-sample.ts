@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, asc, eq, isNull, sql } from 'drizzle-orm';
+import { and, asc, eq, inArray, isNull, sql } from 'drizzle-orm';
 import type { Transaction } from '@/db/connection';
 import { rowSample } from '@/db/schema/row-sample';
 
@@ -27,6 +27,17 @@ export async function findRowSample(tx: Transaction, params: { organisationId: s
       and(eq(rowSample.organisationId, params.organisationId), eq(rowSample.id, params.rowSampleId), isNull(rowSample.removedAt)),
     );
   return rows[0];
+}
+
+/** Lets one transaction at a time add observations to these row samples, so that each is checked against all that stand. */
+export async function lockRowSamples(tx: Transaction, params: { organisationId: string; rowSampleIds: readonly string[] }) {
+  if (params.rowSampleIds.length === 0) return;
+  await tx
+    .select({ id: rowSample.id })
+    .from(rowSample)
+    .where(and(eq(rowSample.organisationId, params.organisationId), inArray(rowSample.id, [...params.rowSampleIds])))
+    .orderBy(asc(rowSample.id))
+    .for('update');
 }
 
 export async function insertRowSamples(tx: Transaction, values: (typeof rowSample.$inferInsert)[]) {

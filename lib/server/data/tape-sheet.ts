@@ -17,6 +17,8 @@ export async function listTapeSheets(tx: Transaction, params: { organisationId: 
       visitId: tapeSheet.visitId,
       visitedOn: visit.visitedOn,
       visitedAt: visit.visitedAt,
+      visitMarker: visit.marker,
+      personId: visit.personId,
       personName: person.name,
       tapeUnit: tapeSheet.tapeUnit,
       placesTyped: tapeSheet.placesTyped,
@@ -39,8 +41,11 @@ export async function listTapeSheets(tx: Transaction, params: { organisationId: 
     .orderBy(asc(tapeSheet.createdAt), asc(tapeSheet.id));
 }
 
-export async function insertTapeSheets(tx: Transaction, values: (typeof tapeSheet.$inferInsert)[]) {
-  await tx.insert(tapeSheet).values(values);
+/** Adds tape sheets; says how many were new. */
+export async function insertTapeSheets(tx: Transaction, values: (typeof tapeSheet.$inferInsert)[]): Promise<number> {
+  if (values.length === 0) return 0;
+  const inserted = await tx.insert(tapeSheet).values(values).onConflictDoNothing().returning({ id: tapeSheet.id });
+  return inserted.length;
 }
 
 export async function findTapeSheet(tx: Transaction, params: { organisationId: string; tapeSheetId: string }) {

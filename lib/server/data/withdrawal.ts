@@ -9,6 +9,8 @@ export async function listWithdrawnIds(tx: Transaction, params: { organisationId
   return new Set(rows.map((row) => row.id));
 }
 
-export async function insertWithdrawal(tx: Transaction, values: typeof withdrawal.$inferInsert) {
-  await tx.insert(withdrawal).values(values);
+/** Adds a withdrawal; says whether it was new. */
+export async function insertWithdrawal(tx: Transaction, values: typeof withdrawal.$inferInsert): Promise<boolean> {
+  const inserted = await tx.insert(withdrawal).values(values).onConflictDoNothing().returning({ id: withdrawal.id });
+  return inserted.length === 1;
 }

@@ -8,6 +8,8 @@ import { listTapeSheets, type TapeSheetRow } from '../../data/tape-sheet';
 import { listWithdrawnIds } from '../../data/withdrawal';
 import { momentOf, resolveCounts, type ObservedCount } from './resolve-counts';
 
+export type { ObservedCount } from './resolve-counts';
+
 export type ObservedPlace = {
   typed: string;
   positionInches: number;
@@ -23,9 +25,13 @@ export type ObservedTapeSheet = {
   rowSampleId: string;
   visitId: string;
   visitedOn: string;
+  visitedAt: string | null;
+  visitMarker: string | null;
+  personId: string;
   personName: string;
+  recordedAt: string;
   tapeUnit: TapeUnit;
-  /** The newest standing sheet of its row sample. */
+  /** The sheet of the newest visit to its row sample, and of two of one visit the one recorded last. */
   used: boolean;
   places: ObservedPlace[];
 };
@@ -41,23 +47,35 @@ export async function readObservations(tx: Transaction, params: { organisationId
     const present = rows.filter((row) => !withdrawn.has(row.id) && !(row.importId && withdrawn.has(row.importId)));
     // A correction that was itself taken back no longer replaces anything.
     const replaced = new Set(present.map((row) => row.replacesId));
-    return present.filter((row) => !replaced.has(row.id));
+    return inFirstPlace(rows, present.filter((row) => !replaced.has(row.id)));
   };
   const countRows = standing(await listCounts(tx, params));
   const counts = [...groupByRowSample(countRows).values()].flatMap((rows) =>
     resolveCounts(rows).map(({ replacesId: _replaces, importId: _import, ...count }) => count),
   );
   const countsByRow = groupByRowSample(counts);
-  const tapeSheets = [...groupByRowSample(standing(await listTapeSheets(tx, params))).values()].flatMap((rows) =>
+  const sheetRows = standing(await listTapeSheets(tx, params)).sort((a, b) => (momentOf(a) < momentOf(b) ? -1 : momentOf(a) > momentOf(b) ? 1 : 0));
+  const tapeSheets = [...groupByRowSample(sheetRows).values()].flatMap((rows) =>
     rows.map((row, index) => observedTapeSheet(row, index === rows.length - 1, countsByRow.get(row.rowSampleId) ?? [])),
   );
   const residueReadings = standing(await listResidueReadings(tx, params)).map(({ importId: _import, ...reading }) => reading);
   return { counts, tapeSheets, residueReadings };
 }
 
+/** A correction takes the place of what it corrects in the order recorded, so that the same one of two people's counts stays in use. */
+function inFirstPlace<Row extends { id: string; replacesId?: string | null }>(asRecorded: readonly Row[], standing: readonly Row[]): Row[] {
+  const place = new Map<string, number>();
+  asRecorded.forEach((row, index) => place.set(row.id, (row.replacesId ? place.get(row.replacesId) : undefined) ?? index));
+  return [...standing].sort((a, b) => (place.get(a.id) ?? 0) - (place.get(b.id) ?? 0));
+}
+
 export function groupByRowSample<Row extends { rowSampleId: string }>(rows: readonly Row[]): Map<string, Row[]> {
   const groups = new Map<string, Row[]>();
-  for (const row of rows) groups.set(row.rowSampleId, [...(groups.get(row.rowSampleId) ?? []), row]);
+  for (const row of rows) {
+    const group = groups.get(row.rowSampleId);
+    if (group) group.push(row);
+    else groups.set(row.rowSampleId, [row]);
+  }
   return groups;
 }
 
@@ -75,15 +93,17 @@ function observedTapeSheet(row: TapeSheetRow, used: boolean, counts: readonly Ob
       firstSeen: firstSeenBy(marker, visits),
     };
   });
-  const { id, rowSampleId, visitId, visitedOn, personName, tapeUnit } = row;
-  return { id, rowSampleId, visitId, visitedOn, personName, tapeUnit, used, places };
+  const { id, rowSampleId, visitId, visitedOn, visitedAt, visitMarker, personId, personName, recordedAt, tapeUnit } = row;
+  return { id, rowSampleId, visitId, visitedOn, visitedAt, visitMarker, personId, personName, recordedAt, tapeUnit, used, places };
 }
 
+/** A marker set at several visits says only that the plant came up by the last of them, after the visit before the first. */
 function firstSeenBy(marker: string | null, visits: readonly ObservedCount[]): ObservedPlace['firstSeen'] {
   if (marker === null) return null;
-  const index = visits.findIndex((visit) => visit.marker?.toLowerCase() === marker.toLowerCase());
-  const by = visits[index];
+  const carries = (visit: ObservedCount) => visit.marker?.toLowerCase() === marker.toLowerCase();
+  const first = visits.findIndex(carries);
+  const by = visits.findLast(carries);
   if (!by) return null;
-  const after = visits[index - 1];
+  const after = visits[first - 1];
   return { after: after ? { on: after.visitedOn, at: after.visitedAt } : null, by: { on: by.visitedOn, at: by.visitedAt } };
 }

@@ -1,0 +1,6 @@
+import type { ObservedCount } from '../counts/resolve-counts';
+
+/** The markers that the standing visits of a row sample set, each once. */
+export function markersOfRow(counts: readonly ObservedCount[], rowSampleId: string): string[] {
+  return [...new Set(counts.flatMap((count) => (count.rowSampleId === rowSampleId && count.marker !== null ? [count.marker] : [])))];
+}

@@ -1,0 +1,57 @@
+import 'server-only';
+import { AppError, badField } from '@/lib/errors/app-error';
+import { recordTapeSheetSchema, type RecordTapeSheetInput } from '@/lib/schemas/observation';
+import { insertTapeSheets, listTapeSheets } from '../../data/tape-sheet';
+import { lockRowSamples } from '../../data/row-sample';
+import { askAbout } from '../../operations/ask-about';
+import type { WriteContext, Written } from '../../operations/context';
+import { defineOperation } from '../../operations/define-operation';
+import { originColumns } from '../../operations/origin-columns';
+import { checkVisit } from '../counts/check-visit';
+import { rowSampleFacts } from '../counts/count-facts';
+import { keepVisit } from '../counts/keep-visit';
+import { readObservations } from '../counts/read-observations';
+import { visitFacts } from '../counts/visit-facts';
+import { findSeenRowSample } from '../row-samples/find-seen-row-sample';
+import { checkTapeSheet } from './check-tape-sheet';
+import { markersOfRow } from './markers-of-row';
+import { tapeSheetColumns } from './tape-sheet-columns';
+
+async function service(context: WriteContext, body: RecordTapeSheetInput): Promise<Written> {
+  const { tx, actor, operation } = context;
+  const { organisationId } = actor;
+  const { rowSample, planting, farm } = await findSeenRowSample(context, body.rowSampleId);
+  await lockRowSamples(tx, { organisationId, rowSampleIds: [rowSample.id] });
+  const recorded = await listTapeSheets(tx, { organisationId, plantingId: planting.id });
+  const twin = recorded.find((sheet) => sheet.id === operation.thingId);
+  if (twin) return assertSame(twin, body);
+  const { counts, tapeSheets } = await readObservations(tx, { organisationId, plantingId: planting.id });
+  const markers = [...markersOfRow(counts, rowSample.id), ...(body.visit.marker === null ? [] : [body.visit.marker])];
+  const checked = checkTapeSheet(body.places, body.tapeUnit, { label: rowSample.label, markers, ...rowSampleFacts(planting, rowSample) });
+  const fields = [...checkVisit(body.visit, visitFacts(context, planting, farm.timeZone), 'visit.visitedOn'), ...checked.fields];
+  if (fields.length > 0) throw new AppError('bad-input', { fields });
+  const { replacesId } = body;
+  if (replacesId !== null && !tapeSheets.some((sheet) => sheet.id === replacesId && sheet.rowSampleId === rowSample.id)) {
+    // Somebody else corrected it or took it back meanwhile.
+    if (recorded.some((sheet) => sheet.id === replacesId && sheet.rowSampleId === rowSample.id)) throw new AppError('conflict');
+    throw badField('replacesId', 'There is no such sheet of this row to correct. Open the page again.');
+  }
+  askAbout(checked.questions, operation.confirmations);
+  await keepVisit(context, rowSample.id, body.visit, farm.timeZone);
+  const columns = tapeSheetColumns(body.places, body.tapeUnit, checked.thousandths);
+  const values = { id: operation.thingId, rowSampleId: rowSample.id, visitId: body.visit.id, replacesId, ...columns, ...originColumns(context) };
+  if ((await insertTapeSheets(tx, [values])) === 0) throw new AppError('operation-reused');
+  return { version: 1 };
+}
+
+/** The same sheet sent again, as when the answer got lost, is answered as it was; another content under its id is refused. */
+function assertSame(twin: Awaited<ReturnType<typeof listTapeSheets>>[number], body: RecordTapeSheetInput): Written {
+  const same =
+    twin.rowSampleId === body.rowSampleId && twin.visitId === body.visit.id && twin.tapeUnit === body.tapeUnit &&
+    twin.replacesId === body.replacesId && twin.placesTyped.length === body.places.length &&
+    body.places.every((place, index) => twin.placesTyped[index] === place.typed && twin.kinds[index] === place.kind && twin.markers[index] === (place.marker ?? ''));
+  if (!same) throw new AppError('operation-reused');
+  return { version: 1 };
+}
+
+export const recordTapeSheet = defineOperation({ kind: 'tape-sheet.record', version: 1, action: 'observations.write', body: recordTapeSheetSchema, service });
