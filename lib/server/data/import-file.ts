@@ -23,7 +23,14 @@ export async function listImportFiles(tx: Transaction, params: { organisationId:
 
 export async function findImportFile(tx: Transaction, params: { organisationId: string; importId: string }) {
   const rows = await tx
-    .select({ id: importFile.id, plantingId: importFile.plantingId })
+    .select({
+      id: importFile.id,
+      plantingId: importFile.plantingId,
+      kind: importFile.kind,
+      fileName: importFile.fileName,
+      lines: importFile.lines,
+      records: importFile.records,
+    })
     .from(importFile)
     .where(and(eq(importFile.organisationId, params.organisationId), eq(importFile.id, params.importId)));
   return rows[0];

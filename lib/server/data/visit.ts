@@ -9,6 +9,10 @@ export async function insertVisitOnce(tx: Transaction, values: typeof visit.$inf
   await tx.insert(visit).values(values).onConflictDoNothing();
 }
 
+export async function insertVisits(tx: Transaction, values: (typeof visit.$inferInsert)[]) {
+  if (values.length > 0) await tx.insert(visit).values(values);
+}
+
 export async function findVisit(tx: Transaction, params: { organisationId: string; visitId: string }) {
   const rows = await tx
     .select()

@@ -6,8 +6,10 @@ import { listCounts } from '../../data/count';
 import { listResidueReadings } from '../../data/residue-reading';
 import { listTapeSheets, type TapeSheetRow } from '../../data/tape-sheet';
 import { listWithdrawnIds } from '../../data/withdrawal';
+import { groupByRowSample } from './group-by-row-sample';
 import { momentOf, resolveCounts, type ObservedCount } from './resolve-counts';
 
+export { groupByRowSample } from './group-by-row-sample';
 export type { ObservedCount } from './resolve-counts';
 
 export type ObservedPlace = {
@@ -67,16 +69,6 @@ function inFirstPlace<Row extends { id: string; replacesId?: string | null }>(as
   const place = new Map<string, number>();
   asRecorded.forEach((row, index) => place.set(row.id, (row.replacesId ? place.get(row.replacesId) : undefined) ?? index));
   return [...standing].sort((a, b) => (place.get(a.id) ?? 0) - (place.get(b.id) ?? 0));
-}
-
-export function groupByRowSample<Row extends { rowSampleId: string }>(rows: readonly Row[]): Map<string, Row[]> {
-  const groups = new Map<string, Row[]>();
-  for (const row of rows) {
-    const group = groups.get(row.rowSampleId);
-    if (group) group.push(row);
-    else groups.set(row.rowSampleId, [row]);
-  }
-  return groups;
 }
 
 function observedTapeSheet(row: TapeSheetRow, used: boolean, counts: readonly ObservedCount[]): ObservedTapeSheet {

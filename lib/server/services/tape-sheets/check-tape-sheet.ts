@@ -4,8 +4,8 @@ import { parseTapePlace, placeInches } from '@/lib/schemas/tape-place';
 import type { TapeEntryKind, TapeUnit } from '@/lib/schemas/vocabulary';
 
 export type PlaceToCheck = { typed: string; kind: TapeEntryKind; marker: string | null; leafStage: number | null };
-/** The row sample, what it can hold, and the markers its visits set. */
-export type TapedRow = { label: string; lengthInches: number; seeds: number; markers: readonly string[] };
+/** The row sample, what it can hold, the markers its visits set, and who read a sheet on that day already. */
+export type TapedRow = { label: string; lengthInches: number; seeds: number; markers: readonly string[]; tapedBy: string | null };
 export type CheckedTapeSheet = { fields: FieldProblem[]; questions: Question[]; thousandths: number[] };
 
 /** A hundredth of an inch is the rounding of a length in other units, no place outside. */
@@ -39,6 +39,9 @@ function questionsAbout(places: readonly PlaceToCheck[], thousandths: readonly n
   const known = new Set(row.markers.map((marker) => marker.toLowerCase()));
   const strange = new Set(places.flatMap(({ marker }) => (marker !== null && !known.has(marker.toLowerCase()) ? [marker] : [])));
   return [
+    ...(row.tapedBy === null
+      ? []
+      : [{ rule: 'taped-twice', about: `${row.label}: ${places.length}`, sentence: `${row.label}: ${row.tapedBy} has a tape sheet of this row and day already. Keep both? The newer is used.` }]),
     ...places.flatMap((place, index) => placeQuestions(place, places[index - 1], [thousandths[index] ?? 0, thousandths[index - 1]], tapeUnit, row)),
     ...(places.length > Math.ceil(row.seeds)
       ? [{

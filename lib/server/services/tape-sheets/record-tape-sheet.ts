@@ -15,6 +15,7 @@ import { visitFacts } from '../counts/visit-facts';
 import { findSeenRowSample } from '../row-samples/find-seen-row-sample';
 import { checkTapeSheet } from './check-tape-sheet';
 import { markersOfRow } from './markers-of-row';
+import { tapedByOn } from './taped-by-on';
 import { tapeSheetColumns } from './tape-sheet-columns';
 
 async function service(context: WriteContext, body: RecordTapeSheetInput): Promise<Written> {
@@ -27,7 +28,9 @@ async function service(context: WriteContext, body: RecordTapeSheetInput): Promi
   if (twin) return assertSame(twin, body);
   const { counts, tapeSheets } = await readObservations(tx, { organisationId, plantingId: planting.id });
   const markers = [...markersOfRow(counts, rowSample.id), ...(body.visit.marker === null ? [] : [body.visit.marker])];
-  const checked = checkTapeSheet(body.places, body.tapeUnit, { label: rowSample.label, markers, ...rowSampleFacts(planting, rowSample) });
+  const personId = body.visit.personId ?? actor.personId;
+  const tapedBy = tapedByOn(tapeSheets.filter((sheet) => sheet.id !== body.replacesId), { rowSampleId: rowSample.id, personId, visitedOn: body.visit.visitedOn });
+  const checked = checkTapeSheet(body.places, body.tapeUnit, { label: rowSample.label, markers, tapedBy, ...rowSampleFacts(planting, rowSample) });
   const fields = [...checkVisit(body.visit, visitFacts(context, planting, farm.timeZone), 'visit.visitedOn'), ...checked.fields];
   if (fields.length > 0) throw new AppError('bad-input', { fields });
   const { replacesId } = body;
