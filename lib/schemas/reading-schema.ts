@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { parseReading, readingIn, type Reading, type ReadingRule } from './reading';
+import { parseReading, readingIn, sameQuantity, type Reading, type ReadingRule } from './reading';
 import { readingUnits } from './vocabulary';
 
 /**
@@ -22,11 +22,13 @@ export function readingSchema(rule: ReadingRule) {
 /** The same rule standing in another unit, with its limits converted and rounded outward to what reads well. */
 export function unitRule(rule: ReadingRule, unit: ReadingRule['unit']): ReadingRule {
   if (unit === rule.unit) return rule;
+  const otherUnits = [rule.unit, ...(rule.otherUnits ?? [])].filter((each) => each !== unit);
+  if (!sameQuantity(rule.unit, unit)) return { ...rule, unit, otherUnits };
   const factor = readingIn({ unit: rule.unit, thousandths: 1000 }, unit);
   return {
     ...rule,
     unit,
-    otherUnits: [rule.unit, ...(rule.otherUnits ?? [])].filter((each) => each !== unit),
+    otherUnits,
     least: Number((rule.least * factor).toPrecision(3)),
     most: Number((rule.most * factor).toPrecision(3)),
   };

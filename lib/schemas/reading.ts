@@ -1,3 +1,4 @@
+import { readingUnitText } from '@/lib/format/reading-unit-text';
 import type { ReadingUnit } from './vocabulary';
 
 /** A reading as it is kept: what was typed, its unit, and the number as whole thousandths of that unit. */
@@ -40,6 +41,9 @@ const perCanonical: Record<ReadingUnit, { of: string; factor: number }> = {
   psi: { of: 'pressure', factor: 1 }, kPa: { of: 'pressure', factor: 0.145037738 },
 };
 
+/** Whether two units measure the same thing. A force and a pressure do not, though a planter's cab shows either. */
+export const sameQuantity = (one: ReadingUnit, other: ReadingUnit) => perCanonical[one].of === perCanonical[other].of;
+
 /** A reading in another unit of the same quantity. Throws where the two measure different things. */
 export function readingIn(reading: { unit: ReadingUnit; thousandths: number }, unit: ReadingUnit): number {
   const from = perCanonical[reading.unit];
@@ -49,49 +53,74 @@ export function readingIn(reading: { unit: ReadingUnit; thousandths: number }, u
 }
 
 const feetInches = /^(\d+)\s*(?:ft|feet|foot|'|′)\s*(?:(\S.*?)\s*(?:in|inch|inches|"|″)?)?$/i;
-const numberAndUnit = /^([-+−]?[\d.,/½¼¾\s]+)\s*([^\d\s.,/½¼¾].*)?$/;
+// A slash belongs to the number only before a digit, as in 5 1/4; in 84,000/ha it begins the unit.
+const numberAndUnit = /^([-+−]?(?:[\d.,½¼¾\s]|\/(?=\d))+)\s*([^\d\s.,½¼¾].*)?$/;
 
-/** One number as people write it: 17.5, 17,5, 5 1/4, 5¼, 34,000. Undefined where it is none, or could be read two ways. */
-function numberOf(text: string, thousandsComma: boolean): number | undefined {
+type TypedNumber = number | 'two-ways' | undefined;
+
+/** One number as people write it: 17.5, 17,5, 5 1/4, 5¼, 34,000. Undefined where it is none; 'two-ways' where it could be two. */
+function numberOf(text: string, thousandsComma: boolean): TypedNumber {
   let rest = text.trim().replace('−', '-');
   const glyph = { '½': ' 1/2', '¼': ' 1/4', '¾': ' 3/4' };
   rest = rest.replace(/[½¼¾]/g, (each) => glyph[each as keyof typeof glyph]).trim();
-  const fraction = /^(?:(\d+)\s+)?(\d+)\/(\d+)$/.exec(rest);
+  const fraction = /^(-)?(?:(\d+)\s+)?(\d+)\/(\d+)$/.exec(rest);
   if (fraction) {
-    const [, whole, top, bottom] = fraction;
-    return Number(bottom) === 0 ? undefined : Number(whole ?? 0) + Number(top) / Number(bottom);
+    const [, minus, whole, top, bottom] = fraction;
+    if (Number(bottom) === 0) return undefined;
+    return (minus ? -1 : 1) * (Number(whole ?? 0) + Number(top) / Number(bottom));
   }
   if (thousandsComma && /^[-+]?\d{1,3}([, ]\d{3})+(\.\d+)?$/.test(rest)) return Number(rest.replace(/[, ]/g, ''));
   // A comma before three digits could be read two ways where lengths are typed, so it is asked about instead of guessed.
-  if (/^[-+]?\d{1,3},\d{3}$/.test(rest)) return undefined;
+  if (/^[-+]?\d{1,3},\d{3}$/.test(rest)) return 'two-ways';
   return /^[-+]?(\d+([.,]\d+)?|[.,]\d+)$/.test(rest) ? Number(rest.replace(',', '.')) : undefined;
 }
+
+const typedMost = 40;
 
 /** The one parser of everything that is measured. Keeps the text as typed and says in a sentence what is wrong. */
 export function parseReading(text: string, rule: ReadingRule): ParsedReading {
   const typed = text.trim();
-  const example = rule.unit === 'in' ? '30 or 5 1/4' : rule.unit === 'ft' ? '17 ft 5 in' : rule.unit === 'per-acre' ? '34,000' : '12.5';
+  const example = exampleOf(rule);
   const wrong = (message: string): ParsedReading => ({ ok: false, message });
   if (typed === '') return wrong(`Type the ${rule.name}.`);
-  if (typed.length > 40) return wrong(`That is too long for a ${rule.name}. Write it such as ${example}.`);
+  if (typed.length > typedMost) return wrong(`That is too long for a ${rule.name}. Write it such as ${example}.`);
   const allowed = [rule.unit, ...(rule.otherUnits ?? [])];
   const parts = splitReading(typed, rule, allowed);
   if (!parts) return wrong(`Write the ${rule.name} as a number such as ${example}.`);
-  if (!allowed.includes(parts.unit)) return wrong(`The ${rule.name} is given in ${allowed.join(' or ')}.`);
+  if (!allowed.includes(parts.unit)) return wrong(`The ${rule.name} is given in ${allowed.map(readingUnitText).join(' or ')}.`);
+  if (parts.value === 'two-ways') {
+    return wrong(`"${typed}" can be read two ways. Write it without the comma, or with a point for the decimals.`);
+  }
   if (parts.value < 0) return wrong(`The ${rule.name} cannot be below zero.`);
   const thousandths = Math.round(parts.value * 1000);
-  const inRuleUnit = readingIn({ unit: parts.unit, thousandths }, rule.unit);
-  if (inRuleUnit < rule.least || inRuleUnit > rule.most) {
-    return wrong(`The ${rule.name} is expected between ${rule.least.toLocaleString('en-US')} and ${rule.most.toLocaleString('en-US')} ${rule.unit}; this says ${typed}.`);
+  // Where the unit measures something else than the rule's own, the limits hold as plain numbers.
+  const shown = sameQuantity(parts.unit, rule.unit) ? rule.unit : parts.unit;
+  const value = readingIn({ unit: parts.unit, thousandths }, shown);
+  if (value < rule.least || value > rule.most) {
+    return wrong(`The ${rule.name} is expected between ${limitText(rule.least)} and ${limitText(rule.most)} ${readingUnitText(shown)}; this says ${typed}.`);
   }
   return { ok: true, reading: { typed, unit: parts.unit, thousandths } };
 }
 
-function splitReading(typed: string, rule: ReadingRule, allowed: readonly ReadingUnit[]): { value: number; unit: ReadingUnit } | undefined {
+const limitText = (limit: number) => limit.toLocaleString('en-US', { maximumFractionDigits: 3 });
+
+function exampleOf(rule: ReadingRule): string {
+  const examples: Partial<Record<ReadingUnit, string>> = {
+    in: '30 or 5 1/4', ft: '17 ft 5 in', cm: '76', m: '5.31', 'per-acre': '34,000', 'per-ha': '84,000', percent: '95',
+    acres: '62.5', ha: '25', 'bu/ac': '200', 't/ha': '12.5',
+  };
+  return examples[rule.unit] ?? '12.5';
+}
+
+function splitReading(
+  typed: string,
+  rule: ReadingRule,
+  allowed: readonly ReadingUnit[],
+): { value: number | 'two-ways'; unit: ReadingUnit } | undefined {
   const mixed = allowed.includes('ft') || allowed.includes('in') ? feetInches.exec(typed) : null;
   if (mixed) {
     const inches = mixed[2] === undefined ? 0 : numberOf(mixed[2], false);
-    if (inches === undefined || inches < 0 || inches >= 12) return undefined;
+    if (inches === undefined || inches === 'two-ways' || inches < 0 || inches >= 12) return undefined;
     return { value: Number(mixed[1]) * 12 + inches, unit: 'in' };
   }
   const simple = numberAndUnit.exec(typed);
