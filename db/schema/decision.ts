@@ -28,7 +28,7 @@ export const decision = pgTable(
     foreignKey({ name: 'decision_zone_fk', columns: [t.organisationId, t.zoneId], foreignColumns: [plantingZone.organisationId, plantingZone.id] }),
     index('decision_planting_index').on(t.organisationId, t.plantingId),
     oneOf('decision_decided_known', t.decided, decisionChoices),
-    oneOf('decision_recommended_known', t.recommended, ['keep', 'replant', 'too-close']),
+    oneOf('decision_recommended_known', t.recommended, ['keep', 'replant', 'too-close', 'cannot-tell']),
     ...originChecks('decision', t),
   ],
 );

@@ -1,0 +1,2 @@
+ALTER TABLE "decision" DROP CONSTRAINT "decision_recommended_known";--> statement-breakpoint
+ALTER TABLE "decision" ADD CONSTRAINT "decision_recommended_known" CHECK ("decision"."recommended" in ('keep', 'replant', 'too-close', 'cannot-tell'));
