@@ -11,6 +11,8 @@ export const layOutTrialSchema = z.object({
   plantingId: z.uuid(),
   studyId: z.uuid(),
   studyName: nameSchema('study'),
+  /** The layout that this one replaces, so that two people who draw at once do not wipe each other out unseen. */
+  replacesTrialId: z.uuid().nullable().default(null),
   layout: z.enum(layoutKinds),
   mainFigure: z.enum(mainFigures, 'Choose the main figure.'),
   comparisonRule: z.enum(comparisonRules, 'Choose how settings are compared.'),

@@ -66,6 +66,18 @@ export async function listPlantingProgress(
   return params.plantingIds.map((plantingId) => rows.find((row) => row.plantingId === plantingId) ?? noProgress(plantingId));
 }
 
+/** The first visit to any row of a planting, as its day and time stand against planting; a time not noted is taken as noon. */
+export async function findFirstVisit(tx: Transaction, params: { organisationId: string; plantingId: string }) {
+  const rows = await tx
+    .select({ on: visit.visitedOn, at: visit.visitedAt })
+    .from(visit)
+    .innerJoin(rowSample, and(eq(rowSample.organisationId, visit.organisationId), eq(rowSample.id, visit.rowSampleId)))
+    .where(and(eq(visit.organisationId, params.organisationId), eq(rowSample.plantingId, params.plantingId)))
+    .orderBy(visit.visitedOn, sql`coalesce(${visit.visitedAt}, '12:00')`)
+    .limit(1);
+  return rows[0];
+}
+
 /** Which rows of a planting's samples have been seen at all, for whoever has to type in the rest. */
 export async function listVisitedRowSampleIds(tx: Transaction, params: { organisationId: string; plantingIds: readonly string[] }) {
   if (params.plantingIds.length === 0) return [];

@@ -23,6 +23,16 @@ export async function findPlanting(tx: Transaction, params: { organisationId: st
   return rows[0];
 }
 
+/** Holds a planting against other changes of its plan until the transaction ends; false where it is gone. */
+export async function lockPlanting(tx: Transaction, params: { organisationId: string; plantingId: string }) {
+  const rows = await tx
+    .select({ id: planting.id })
+    .from(planting)
+    .where(and(eq(planting.organisationId, params.organisationId), eq(planting.id, params.plantingId), isNull(planting.removedAt)))
+    .for('no key update');
+  return rows.length === 1;
+}
+
 export async function insertPlanting(tx: Transaction, values: typeof planting.$inferInsert) {
   const inserted = await tx.insert(planting).values(values).onConflictDoNothing().returning({ id: planting.id });
   return inserted.length === 1;

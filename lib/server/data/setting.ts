@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, asc, eq, isNull, sql } from 'drizzle-orm';
+import { and, asc, eq, inArray, isNull, sql } from 'drizzle-orm';
 import type { Transaction } from '@/db/connection';
 import { setting } from '@/db/schema/setting';
 
@@ -18,6 +18,27 @@ export async function findSetting(tx: Transaction, params: { organisationId: str
     .select()
     .from(setting)
     .where(and(eq(setting.organisationId, params.organisationId), eq(setting.id, params.settingId), isNull(setting.removedAt)));
+  return rows[0];
+}
+
+/** The settings that still stand, held against removal until the transaction ends. */
+export async function lockSettings(tx: Transaction, params: { organisationId: string; settingIds: readonly string[] }) {
+  const rows = await tx
+    .select({ id: setting.id })
+    .from(setting)
+    .where(and(eq(setting.organisationId, params.organisationId), inArray(setting.id, [...params.settingIds]), isNull(setting.removedAt)))
+    .orderBy(asc(setting.id))
+    .for('share');
+  return new Set(rows.map((row) => row.id));
+}
+
+/** A setting held for a change, so that no layout is drawn with it in between. */
+export async function lockSetting(tx: Transaction, params: { organisationId: string; settingId: string }) {
+  const rows = await tx
+    .select()
+    .from(setting)
+    .where(and(eq(setting.organisationId, params.organisationId), eq(setting.id, params.settingId), isNull(setting.removedAt)))
+    .for('update');
   return rows[0];
 }
 

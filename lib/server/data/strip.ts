@@ -55,14 +55,23 @@ export async function insertStripsAsPlanted(tx: Transaction, values: (typeof str
   await tx.insert(stripAsPlanted).values(values);
 }
 
-/** Whether any standing trial drew this setting for a strip. */
-export async function isSettingLaidOut(tx: Transaction, params: { organisationId: string; settingId: string }) {
+/** The settings that standing trials drew or planted, each with whether one of those trials is locked. */
+export async function listSettingsInUse(tx: Transaction, params: { organisationId: string }) {
   const rows = await tx
-    .select({ id: strip.id })
+    .select({ planned: strip.plannedSettingId, planted: stripAsPlanted.settingId, lockedAt: trial.lockedAt, plantingId: trial.plantingId })
     .from(strip)
     .innerJoin(block, and(eq(block.organisationId, strip.organisationId), eq(block.id, strip.blockId)))
     .innerJoin(trial, and(eq(trial.organisationId, block.organisationId), eq(trial.id, block.trialId), isNull(trial.removedAt)))
-    .where(and(eq(strip.organisationId, params.organisationId), eq(strip.plannedSettingId, params.settingId)))
-    .limit(1);
-  return rows.length > 0;
+    .leftJoin(stripAsPlanted, and(eq(stripAsPlanted.organisationId, strip.organisationId), eq(stripAsPlanted.stripId, strip.id)))
+    .where(eq(strip.organisationId, params.organisationId));
+  const used = new Map<string, { locked: boolean; plantingIds: Set<string> }>();
+  for (const row of rows) {
+    for (const settingId of [row.planned, row.planted]) {
+      if (settingId === null) continue;
+      const known = used.get(settingId) ?? { locked: false, plantingIds: new Set<string>() };
+      known.plantingIds.add(row.plantingId);
+      used.set(settingId, { ...known, locked: known.locked || row.lockedAt !== null });
+    }
+  }
+  return used;
 }

@@ -4,14 +4,15 @@ import { plantingSchema, type PlantingInput } from '@/lib/schemas/planting';
 import { updatePlanting } from '../../data/planting';
 import { insertZones, listZones, removeZones, updateZone } from '../../data/planting-zone';
 import { listRowSamples } from '../../data/row-sample';
-import { findFirstVisitDay } from '../../data/visit';
+import { findFirstVisit } from '../../data/planting-progress';
 import { askAbout } from '../../operations/ask-about';
 import { assertVersion } from '../../operations/assert-version';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
 import { originColumns } from '../../operations/origin-columns';
 import { readingColumns, readingOf } from '../../operations/reading-columns';
-import { findSeenPlanting } from './find-seen-planting';
+import { dateQuestions } from './date-questions';
+import { holdPlanting } from './hold-planting';
 import { latestPlantingDay } from './latest-planting-day';
 import { plantingColumns } from './planting-columns';
 import { zoneQuestions } from './zone-questions';
@@ -19,16 +20,19 @@ import { zoneQuestions } from './zone-questions';
 async function service(context: WriteContext, body: PlantingInput): Promise<Written> {
   const { tx, actor, operation, clock } = context;
   const { organisationId } = actor;
-  const { planting, field, farm } = await findSeenPlanting(context, operation.thingId);
+  const { planting, field, farm } = await holdPlanting(context, operation.thingId);
   assertVersion(planting.version, operation.baseVersion);
   if (body.plantedOn > latestPlantingDay(clock.today(farm.timeZone))) {
     throw badField('plantedOn', 'This planting date is more than a year ahead. Check the year.');
   }
-  const firstVisit = await findFirstVisitDay(tx, { organisationId, plantingId: planting.id });
-  if (firstVisit !== undefined && body.plantedOn > firstVisit) {
-    throw badField('plantedOn', `Rows of this planting were first visited on ${firstVisit}; it cannot have been planted after that.`);
-  }
-  askAbout(zoneQuestions(body.zones, readingOf(field.areaTyped, field.areaUnit, field.areaThousandths)), operation.confirmations);
+  const firstVisit = await findFirstVisit(tx, { organisationId, plantingId: planting.id });
+  askAbout(
+    [
+      ...dateQuestions(planting, body, firstVisit),
+      ...zoneQuestions(body.zones, readingOf(field.areaTyped, field.areaUnit, field.areaThousandths)),
+    ],
+    operation.confirmations,
+  );
   const changed = await updatePlanting(tx, { organisationId, plantingId: planting.id, version: planting.version, values: plantingColumns(body) });
   // Somebody was quicker between the look and the change.
   if (!changed) throw new AppError('conflict', { standingVersion: planting.version + 1 });

@@ -4,13 +4,13 @@ import { insertRowSamples, listRowSamples } from '../../data/row-sample';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
 import { originColumns } from '../../operations/origin-columns';
-import { findSeenPlanting } from '../plantings/find-seen-planting';
+import { holdPlanting } from '../plantings/hold-planting';
 import { placeGuard } from './assert-place';
 import { rowSampleColumns } from './row-sample-columns';
 
 async function service(context: WriteContext, body: AddRowSamplesInput): Promise<Written> {
   const { tx, actor } = context;
-  const { planting } = await findSeenPlanting(context, body.plantingId);
+  const { planting } = await holdPlanting(context, body.plantingId);
   const standing = await listRowSamples(tx, { organisationId: actor.organisationId, plantingId: planting.id });
   const assertPlace = await placeGuard(context, planting.id, standing);
   body.samples.forEach((sample, index) => assertPlace(sample, `samples.${index}.`));

@@ -6,12 +6,12 @@ import { hasVisits } from '../../data/visit';
 import { assertVersion } from '../../operations/assert-version';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
-import { findSeenRowSample } from './find-seen-row-sample';
+import { holdRowSample } from './hold-row-sample';
 
 async function service(context: WriteContext): Promise<Written> {
   const { tx, actor, operation } = context;
   const { organisationId } = actor;
-  const { rowSample } = await findSeenRowSample(context, operation.thingId);
+  const { rowSample } = await holdRowSample(context, operation.thingId);
   assertVersion(rowSample.version, operation.baseVersion);
   if (await hasVisits(tx, { organisationId, rowSampleId: rowSample.id })) {
     throw new AppError('in-use', { sentence: 'This row sample has been counted, so it stays. Take its counts back instead.' });

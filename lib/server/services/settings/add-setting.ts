@@ -1,13 +1,15 @@
 import 'server-only';
 import { AppError } from '@/lib/errors/app-error';
 import { settingSchema, type SettingInput } from '@/lib/schemas/setting';
-import { insertSetting } from '../../data/setting';
+import { insertSetting, listSettings } from '../../data/setting';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
 import { originColumns } from '../../operations/origin-columns';
+import { assertNameFree } from './assert-name-free';
 import { settingColumns } from './setting-columns';
 
 async function service(context: WriteContext, body: SettingInput): Promise<Written> {
+  assertNameFree(body.name, await listSettings(context.tx, { organisationId: context.actor.organisationId }));
   const added = await insertSetting(context.tx, { id: context.operation.thingId, ...settingColumns(body), ...originColumns(context) });
   if (!added) throw new AppError('operation-reused');
   return { version: 1 };

@@ -1,18 +1,18 @@
 import 'server-only';
 import { AppError } from '@/lib/errors/app-error';
 import { removeSchema } from '@/lib/schemas/row-sample';
-import { findSetting, removeSetting as removeSettingRow } from '../../data/setting';
-import { isSettingLaidOut } from '../../data/strip';
+import { lockSetting, removeSetting as removeSettingRow } from '../../data/setting';
+import { listSettingsInUse } from '../../data/strip';
 import { assertVersion } from '../../operations/assert-version';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
 
 async function service({ tx, actor, operation }: WriteContext): Promise<Written> {
   const { organisationId } = actor;
-  const standing = await findSetting(tx, { organisationId, settingId: operation.thingId });
+  const standing = await lockSetting(tx, { organisationId, settingId: operation.thingId });
   if (!standing) throw new AppError('not-found');
   assertVersion(standing.version, operation.baseVersion);
-  if (await isSettingLaidOut(tx, { organisationId, settingId: standing.id })) {
+  if ((await listSettingsInUse(tx, { organisationId })).has(standing.id)) {
     throw new AppError('in-use', { sentence: 'A trial compares this setting, so it stays.' });
   }
   const removed = await removeSettingRow(tx, { organisationId, settingId: standing.id, version: standing.version });

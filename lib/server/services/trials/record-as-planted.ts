@@ -6,15 +6,16 @@ import { insertStripsAsPlanted, listStrips } from '../../data/strip';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
 import { originColumns } from '../../operations/origin-columns';
-import { findSeenTrial } from './find-seen-trial';
+import { holdSeenTrial } from './hold-seen-trial';
 
 async function service(context: WriteContext, body: AsPlantedInput): Promise<Written> {
   const { tx, actor, operation } = context;
   const { organisationId } = actor;
-  const { trial } = await findSeenTrial(context, operation.thingId);
+  const { trial } = await holdSeenTrial(context, operation.thingId);
   if (!trial.lockedAt) throw new AppError('bad-input', { sentence: 'Lock the plan first; what was planted is held against it.' });
   const strips = await listStrips(tx, { organisationId, trialId: trial.id });
   const known = new Set((await listSettings(tx, { organisationId })).map((each) => each.id));
+  if (new Set(body.strips.map((planted) => planted.stripId)).size !== body.strips.length) throw badField('strips', 'Name each strip once.');
   body.strips.forEach((planted, index) => {
     const strip = strips.find((each) => each.id === planted.stripId);
     if (!strip) throw badField(`strips.${index}.stripId`, 'This strip is not in the trial.');
