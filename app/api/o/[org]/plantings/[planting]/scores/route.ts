@@ -1,0 +1,10 @@
+import { z } from 'zod';
+import { readRoute } from '@/lib/server/http/organisation-route';
+import { readScores } from '@/lib/server/services/scores/read-scores';
+
+export const GET = readRoute({
+  action: 'scores.read',
+  ids: z.object({ planting: z.uuid() }),
+  query: z.object({}),
+  service: readScores,
+});
