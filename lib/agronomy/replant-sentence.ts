@@ -1,6 +1,7 @@
 import type { Outcome } from './outcome';
 import type { Replant, ReplantOverInterval } from './replant';
 import type { Span } from './replant-sum';
+import { NAFZIGER_STAND_HIGHEST, NAFZIGER_STAND_LOWEST } from './replant-table-nafziger';
 import type { TableEnd } from './replant-table-nafziger';
 
 /** How the reader's units and rounding are written. Amounts handed over are never negative. */
@@ -9,6 +10,8 @@ export type ReplantWording = {
   dollarsPerAcre: (dollars: number) => string;
   /** For example "18,900 to 22,100 plants per acre". */
   standRange: (lower: number, upper: number) => string;
+  /** For example "10,000 plants per acre". */
+  stand: (plantsPerAcre: number) => string;
   /** For example "98 %". */
   share: (share: number) => string;
 };
@@ -34,7 +37,7 @@ export function replantSentence(answer: Replant, wording: ReplantWording): Repla
   return {
     first: firstSentence(answer, wording),
     second: secondSentence(answer.overInterval, wording),
-    third: answer.isBounded ? thirdSentence(answer) : null,
+    third: answer.isBounded ? thirdSentence(answer, wording) : null,
   };
 }
 
@@ -71,20 +74,26 @@ function secondSentence(interval: Outcome<ReplantOverInterval>, wording: Replant
   return `${range} ${ends}; keeping earns more in ${wording.share(draws.keepWinsShare)} of the counts this one could have been${open}.`;
 }
 
-const ENDS: Record<TableEnd, string> = {
-  'stand-below': 'its lowest stand is 10,000 plants per acre',
-  'stand-above': 'its highest stand is 36,000 plants per acre',
-  'date-before': 'it begins with 10 April',
-  'date-after': 'it ends with 9 June',
-};
+function endInWords(end: TableEnd, wording: ReplantWording): string {
+  switch (end) {
+    case 'stand-below':
+      return `its lowest stand is ${wording.stand(NAFZIGER_STAND_LOWEST)}`;
+    case 'stand-above':
+      return `its highest stand is ${wording.stand(NAFZIGER_STAND_HIGHEST)}`;
+    case 'date-before':
+      return 'it begins with 10 April';
+    case 'date-after':
+      return 'it ends with 9 June';
+  }
+}
 
-function thirdSentence(answer: Replant): string {
+function thirdSentence(answer: Replant, wording: ReplantWording): string {
   const parts = [
     { name: 'keeping', reading: answer.sum.keepReading },
     { name: 'replanting', reading: answer.sum.replantReading },
   ].flatMap(({ name, reading }) =>
     reading.kind === 'at-most'
-      ? [`${reading.beyond.map((end) => ENDS[end]).join(' and ')}, so ${name} makes at most what is shown`]
+      ? [`${reading.beyond.map((end) => endInWords(end, wording)).join(' and ')}, so ${name} makes at most what is shown`]
       : [],
   );
   const standing = answer.standsDespiteBound ? ' The answer stands all the same.' : '';

@@ -32,6 +32,7 @@ const purdue: ReplantQuestion = {
 const wording = {
   dollarsPerAcre: (dollars: number) => `$${dollars.toFixed(0)} an acre`,
   standRange: (lower: number, upper: number) => `${lower} to ${upper} plants per acre`,
+  stand: (plantsPerAcre: number) => `${plantsPerAcre.toLocaleString('en-US')} plants per acre`,
   share: (share: number) => `${(share * 100).toFixed(0)} %`,
 };
 
