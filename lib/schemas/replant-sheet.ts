@@ -16,6 +16,10 @@ export const moneySchema = (what: string, most: number) =>
     .refine((text) => decimalMoney.test(text), `Type ${what} in dollars, such as 4.20.`)
     .refine((text) => !decimalMoney.test(text) || Number(text) <= most, `At most ${most.toLocaleString('en-US')} dollars can be taken for ${what}.`);
 
+/** What the crop brings; at nothing there is nothing to weigh. */
+const priceSchema = (what: string, most: number) =>
+  moneySchema(what, most).refine((text) => !decimalMoney.test(text) || Number(text) > 0, `Type ${what} above zero.`);
+
 const percentSchema = (what: string) => z.number(`Type ${what} in percent.`).min(0, `Type ${what} as 0 to 100 percent.`).max(100, `Type ${what} as 0 to 100 percent.`);
 
 export const replantStandRule: ReadingRule = { ...seedingRateRule, name: 'stand after replanting' };
@@ -37,7 +41,7 @@ const figures = {
 const usInputsSchema = z.object({
   typedIn: z.literal('us'),
   ...figures,
-  pricePerBushel: moneySchema('the price a bushel', 50).nullable(),
+  pricePerBushel: priceSchema('the price a bushel', 50).nullable(),
   /** Costs of replanting, dollars an acre, each named by the user. */
   costs: z.array(z.object({ label: costLabelSchema, dollarsPerAcre: moneySchema('the cost an acre', 2_000) })).max(costLinesMost),
   extraDryingPerAcre: moneySchema('the drying an acre', 500).nullable(),
@@ -48,7 +52,7 @@ const usInputsSchema = z.object({
 const metricInputsSchema = z.object({
   typedIn: z.literal('metric'),
   ...figures,
-  pricePerTonne: moneySchema('the price a tonne', 2_000).nullable(),
+  pricePerTonne: priceSchema('the price a tonne', 2_000).nullable(),
   costs: z.array(z.object({ label: costLabelSchema, dollarsPerHectare: moneySchema('the cost a hectare', 5_000) })).max(costLinesMost),
   extraDryingPerHectare: moneySchema('the drying a hectare', 1_250).nullable(),
   insurancePaymentPerHectare: moneySchema('the insurance payment a hectare', 5_000).nullable(),

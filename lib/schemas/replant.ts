@@ -160,8 +160,8 @@ export const replantSchema = z.object({
   basisHash: z.string(),
   zones: z.array(z.object({ id: z.string(), name: z.string(), acres: z.number() })),
   fieldAcres: z.number().nullable(),
-  /** Who saved the figures shown, and when; null before anybody did. */
-  sheetSaved: z.object({ personName: z.string(), on: z.string() }).nullable(),
+  /** Who saved the figures shown; null before anybody did. */
+  sheetSavedBy: z.string().nullable(),
   /** Yield at full stand as the plan has it, for the form. */
   plannedFullYield: z.object({ typed: z.string(), unit: z.string() }).nullable(),
   /** Row samples in this planting that nobody has counted yet. */
