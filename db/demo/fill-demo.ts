@@ -11,6 +11,7 @@ import { simulateTrial } from './simulate-trial';
 import { trialLayout } from './trial-layout';
 import { writeCrustedField } from './write-crusted-field';
 import { writeOtherOrganisation } from './write-other-organisation';
+import { writeReplantSheets } from './write-replant-sheets';
 import { writeSpotCount } from './write-spot-count';
 import { writeTrialCounts } from './write-trial-counts';
 import { writeTrialPlan } from './write-trial-plan';
@@ -37,13 +38,18 @@ async function fillCropService(db: Database): Promise<void> {
   await writeFarms(write);
   await attachToFarms(db, cropService, farmsOfPeople);
   await writeSettings(write);
-  await Promise.all([fillTrial(write), writeCrustedField(write), writeSpotCount(write)]);
+  await Promise.all([fillTrial(write), fillCrustedField(write), writeSpotCount(write)]);
 }
 
 async function fillTrial(write: DemoWriter): Promise<void> {
   const blocks = trialLayout(simulateTrial(trialSeed));
   await writeTrialPlan(write, blocks);
   await writeTrialCounts(write, blocks);
+}
+
+async function fillCrustedField(write: DemoWriter): Promise<void> {
+  await writeCrustedField(write);
+  await writeReplantSheets(write);
 }
 
 async function fillOther(db: Database, other: (typeof otherOrganisations)[number]): Promise<void> {

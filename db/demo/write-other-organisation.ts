@@ -11,7 +11,7 @@ export const otherIdsOf = ({ key }: { key: string }) => {
   return {
     farmId: of('farm'), fieldId: of('field'), plantingId: of('planting'), zoneId: of('zone'), settingIds: [of('setting-one'), of('setting-two')],
     studyId: of('study'), trialId: of('trial'), blockId: of('block'), stripIds: [of('strip-one'), of('strip-two')], rowSampleId: of('row'), visitId: of('visit'),
-    countId: of('count'), wrongCountId: of('wrong-count'), tapeSheetId: of('tape'), residueId: of('residue'), withdrawalId: of('withdrawal'), importId: of('import'),
+    countId: of('count'), wrongCountId: of('wrong-count'), tapeSheetId: of('tape'), residueId: of('residue'), withdrawalId: of('withdrawal'), importId: of('import'), replantSheetId: of('replant-sheet'),
   };
 };
 
@@ -29,6 +29,7 @@ export async function writeOtherOrganisation(write: DemoWriter, other: Other): P
   await send({ kind: 'planting.add', thingId: ids.plantingId, body: plantingBody(word, ids) });
   await writeTrial(send, word, ids);
   await writeObservations(send, word, ids);
+  await send({ kind: 'replant-sheet.save', thingId: ids.replantSheetId, on: '2026-05-22', body: { plantingId: ids.plantingId, zoneId: null, inputs: replantInputs(word) } });
 }
 
 type Send = (operation: Omit<DemoOperation, 'by' | 'on'> & { on?: string }) => Promise<void>;
@@ -81,4 +82,12 @@ async function writeObservations(send: Send, word: string, ids: Ids): Promise<vo
   await send({ kind: 'residue.record', thingId: ids.residueId, on, body: { rowSampleId, readOn: on, marksRead: 50, marksCovered: 21 } });
   const text = `row_sample,date,so_far,marker\n${word},2026-05-21,30,${word}`;
   await send({ kind: 'import.take', thingId: ids.importId, on: '2026-05-21', body: { plantingId, importKind: 'counts', fileName: `${word}.csv`, text } });
+}
+
+function replantInputs(word: string) {
+  return {
+    typedIn: 'us', fullYield: { typed: '190' }, pricePerBushel: '4', replantOn: '2026-06-01', replantStand: { typed: '30,000' },
+    costs: [{ label: `${word} seed`, dollarsPerAcre: '30' }], extraDryingPerAcre: null, insurancePaymentPerAcre: null, gapLossPercent: 0,
+    unevenLossPercent: 0, poorSecondStandChancePercent: 0, poorSecondStandYieldPercent: null,
+  };
 }
