@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import type { ComparisonFinding } from '@/lib/agronomy/comparison-finding';
+import { drawnPlantSchema } from './drawn-plant';
 import { penaltiesSchema, standIntervalSchema } from './figures';
 import { outcomeSchema } from './outcome';
 import { plantingFactsSchema } from './planting-facts';
@@ -95,15 +96,6 @@ const findingSchema: z.ZodType<ComparisonFinding> = z.discriminatedUnion('kind',
   }),
 ]);
 
-const tapePlantSchema = z.object({
-  positionInches: number,
-  /** The middle of the visits around its coming up, in days after planting; null where nobody saw it. */
-  days: number.nullable(),
-  late: z.boolean(),
-  double: z.boolean(),
-  kind: z.enum(['plant', 'missing']),
-});
-
 const typicalRowSchema = z.object({
   rowSampleId: z.string(),
   label: z.string(),
@@ -111,7 +103,7 @@ const typicalRowSchema = z.object({
   lengthInches: number,
   startEnd: z.enum(rowEnds),
   farEnd: z.enum(rowEnds),
-  plants: z.array(tapePlantSchema),
+  plants: z.array(drawnPlantSchema),
   spreadDays: number.nullable(),
   plantsPerAcre: number,
   /** Among how many row samples with a tape sheet it was chosen. */

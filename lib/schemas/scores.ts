@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { drawnPlantSchema } from './drawn-plant';
 import { figuresSchema, penaltiesSchema, standIntervalSchema } from './figures';
 import { outcomeSchema } from './outcome';
 import { plantingFactsSchema } from './planting-facts';
@@ -64,6 +65,7 @@ const tapeFactsSchema = z.object({
   personName: z.string(),
   tapeUnit: z.enum(tapeUnits),
   places: z.array(z.object({ typed: z.string(), kind: z.enum(tapeEntryKinds) })),
+  plants: z.array(drawnPlantSchema),
 });
 
 const scoredRowSchema = z.object({

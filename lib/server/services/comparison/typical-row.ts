@@ -1,13 +1,8 @@
-import { emergenceCurve } from '@/lib/agronomy/emergence-curve';
-import { emergencePercentile } from '@/lib/agronomy/emergence-percentile';
-import { chainOutcome } from '@/lib/agronomy/outcome';
-import { plantDelays } from '@/lib/agronomy/plant-delays';
-import { defaultLateLimits } from '@/lib/agronomy/late-limits';
-import type { RowSample, TapePlace } from '@/lib/agronomy/row-sample';
+import type { RowSample } from '@/lib/agronomy/row-sample';
 import type { RowScores } from '@/lib/agronomy/row-scores';
-import { sortedCounts } from '@/lib/agronomy/sorted-counts';
 import type { TypicalRow } from '@/lib/schemas/comparison';
 import type { CoreSamples } from '../scores/core-samples';
+import { drawnPlants } from '../scores/drawn-plants';
 
 type Candidate = { sample: RowSample; plantsPerAcre: number; spreadDays: number | null };
 
@@ -50,28 +45,6 @@ export function typicalRow(
     chosenAmong: eligible.length,
     chosenBy: timed.length > 0 ? 'stand-and-spread' : 'stand',
   };
-}
-
-function drawnPlants(sample: RowSample): TypicalRow['plants'] {
-  const places = sample.tape ?? [];
-  const flush = chainOutcome(emergenceCurve(sortedCounts(sample)), (curve) => emergencePercentile(curve, 0.1));
-  const delays = plantDelays(
-    places.map((place) => ({ firstSeen: place.firstSeen, markedLate: place.kind === 'late' })),
-    flush,
-    sample.lateLimits ?? defaultLateLimits,
-  );
-  return places.map((place, index) => ({
-    positionInches: place.positionInches,
-    days: cameUpDays(place),
-    late: delays[index]?.lateClass === 'late' || delays[index]?.lateClass === 'very-late',
-    double: place.kind === 'double',
-    kind: place.kind === 'missing' ? 'missing' : 'plant',
-  }));
-}
-
-function cameUpDays({ firstSeen }: TapePlace): number | null {
-  if (!firstSeen) return null;
-  return firstSeen.afterDays === null ? firstSeen.byDays : (firstSeen.afterDays + firstSeen.byDays) / 2;
 }
 
 function median(numbers: readonly number[]): number {

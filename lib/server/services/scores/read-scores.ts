@@ -1,5 +1,6 @@
 import 'server-only';
 import type { RowSample } from '@/lib/agronomy/row-sample';
+import { can } from '@/lib/access/can';
 import type { ScoredSetting, ScoredStrip, Scores } from '@/lib/schemas/scores';
 import type { ReadContext } from '../../operations/context';
 import { readCoreSamples, type CoreSamples } from './core-samples';
@@ -18,6 +19,8 @@ export async function readScores(context: ReadContext, { planting }: { planting:
   const sound = soundSamples(core.samples);
   const { parts, acresNotSampled, rowSamplesOutside } = fieldZones(core, sound.samples);
   const stand = parts.length > 0 ? standOfParts(parts) : null;
+  // Who counts must not know which setting stands in a strip, and scores by setting are a comparison.
+  const seesSettings = can(context.actor, 'comparison.read');
   const acresTotal = parts.reduce((sum, part) => sum + part.acres, 0);
   return {
     planting: plantingFacts(core),
@@ -30,10 +33,10 @@ export async function readScores(context: ReadContext, { planting }: { planting:
       areaShare: acres / acresTotal,
       ...scoredGroup(samples),
     })),
-    settings: scoredSettings(core, sound.samples),
-    strips: scoredStrips(core, sound.samples),
+    settings: seesSettings ? scoredSettings(core, sound.samples) : [],
+    strips: scoredStrips(core, sound.samples, seesSettings),
     rowSamples: core.rowSamples
-      .map((rowSample) => scoredRow(core, sound, rowSample))
+      .map((rowSample) => scoredRow(core, sound, rowSample, seesSettings))
       .sort((a, b) => inOrder.compare(a.label, b.label)),
   };
 }
@@ -50,15 +53,15 @@ function scoredSettings(core: CoreSamples, samples: readonly RowSample[]): Score
   });
 }
 
-function scoredStrips(core: CoreSamples, samples: readonly RowSample[]): ScoredStrip[] {
+function scoredStrips(core: CoreSamples, samples: readonly RowSample[], seesSettings: boolean): ScoredStrip[] {
   return core.strips.map((strip) => {
     const { settingId, basis } = settingOfStrip(strip);
     return {
       stripId: strip.id,
       number: strip.number,
       blockNumber: strip.blockNumber,
-      settingId,
-      settingName: core.settings.find((setting) => setting.id === settingId)?.name ?? null,
+      settingId: seesSettings ? settingId : null,
+      settingName: (seesSettings && core.settings.find((setting) => setting.id === settingId)?.name) || null,
       settingBasis: basis,
       ...scoredGroup(samples.filter((sample) => sample.stripId === strip.id)),
     };

@@ -3,16 +3,23 @@ import type { ScoredRow } from '@/lib/schemas/scores';
 import { readingIn } from '@/lib/schemas/reading';
 import type { RowSampleRow } from '../../data/row-sample';
 import type { CoreSamples } from './core-samples';
+import { drawnPlants } from './drawn-plants';
 import { settingOfStrip } from './setting-of-strip';
 import type { SoundSamples } from './sound-samples';
 
 /** One row sample with what was observed in it and what that says. */
-export function scoredRow(core: CoreSamples, sound: SoundSamples, rowSample: RowSampleRow): ScoredRow {
+export function scoredRow(
+  core: CoreSamples,
+  sound: SoundSamples,
+  rowSample: RowSampleRow,
+  seesSettings: boolean,
+): ScoredRow {
   const strip = core.strips.find((each) => each.id === rowSample.stripId);
   const run = strip ? settingOfStrip(strip) : null;
   const counts = core.observations.counts.filter((count) => count.rowSampleId === rowSample.id);
   const sheet = core.observations.tapeSheets.find((each) => each.rowSampleId === rowSample.id && each.used);
   const scores = sound.scores.get(rowSample.id);
+  const sample = sound.samples.find((each) => each.rowSampleId === rowSample.id);
   const planted = { on: core.planting.plantedOn, at: core.planting.plantedAt };
   return {
     rowSampleId: rowSample.id,
@@ -26,7 +33,7 @@ export function scoredRow(core: CoreSamples, sound: SoundSamples, rowSample: Row
     startEnd: rowSample.startEnd,
     farEnd: rowSample.farEnd,
     stripNumber: strip?.number ?? null,
-    settingName: core.settings.find((setting) => setting.id === run?.settingId)?.name ?? null,
+    settingName: (seesSettings && core.settings.find((setting) => setting.id === run?.settingId)?.name) || null,
     settingBasis: run?.basis ?? null,
     zoneName: core.zones.find((zone) => zone.id === rowSample.zoneId)?.name ?? null,
     counts: counts
@@ -46,6 +53,7 @@ export function scoredRow(core: CoreSamples, sound: SoundSamples, rowSample: Row
           personName: sheet.personName,
           tapeUnit: sheet.tapeUnit,
           places: sheet.places.map(({ typed, kind }) => ({ typed, kind })),
+          plants: sample ? drawnPlants(sample) : [],
         }
       : null,
     scored: scores ? { figures: scores.figures, penalties: scores.penalties } : null,

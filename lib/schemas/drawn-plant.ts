@@ -1,0 +1,12 @@
+import { z } from 'zod';
+
+/** One place of a tape sheet as it is drawn. */
+export const drawnPlantSchema = z.object({
+  positionInches: z.number(),
+  /** The middle of the visits around its coming up, in days after planting; null where nobody saw it. */
+  days: z.number().nullable(),
+  late: z.boolean(),
+  double: z.boolean(),
+  kind: z.enum(['plant', 'missing']),
+});
+export type DrawnPlant = z.output<typeof drawnPlantSchema>;
