@@ -63,7 +63,8 @@ async function stands({ tx, actor, operation }: WriteContext, plantingId: string
   if (!found) return false;
   const same =
     found.rowSampleId === body.rowSampleId && found.visitId === body.visit.id && found.countedAs === body.countedAs &&
-    found.plants === body.plants && found.doubtful === body.doubtful && found.replacesId === body.replacesId;
+    found.plants === body.plants && found.doubtful === body.doubtful && found.replacesId === body.replacesId &&
+    found.visitedOn === body.visit.visitedOn && found.visitedAt === body.visit.visitedAt && found.marker === body.visit.marker;
   if (!same) throw new AppError('operation-reused');
   return true;
 }

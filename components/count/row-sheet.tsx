@@ -1,0 +1,42 @@
+import Link from 'next/link';
+import { PageHead } from '@/components/shell/page-head';
+import { TapeSection } from '@/components/tape-sheet/tape-section';
+import { LinkButton } from '@/components/ui/link-button';
+import { countText } from '@/lib/format/count-text';
+import { daysAfter } from '@/lib/format/days-after';
+import { readingText } from '@/lib/format/reading-text';
+import { paths } from '@/lib/paths/paths';
+import { countTexts } from '@/lib/texts/count-texts';
+import { countingText } from './finding-texts';
+import { CountsSection } from './counts-section';
+import { CoverSection } from './cover-section';
+import { rowPlaceText } from './row-place-text';
+import type { RowSheetData } from './row-sheet-types';
+
+/** One row sample: what stands of it, and the paper sheet to type in. */
+export function RowSheet({ org, data }: { org: string; data: RowSheetData }) {
+  const { row, counts, plantedOn, plantingId, previous, next } = data;
+  const last = counts.findLast((count) => count.used);
+  const title = last
+    ? countTexts.sheetTitle(row.label, countText(last.plantsUp, 'plant'), String(daysAfter(plantedOn, last.visitedOn)))
+    : countTexts.sheetTitleNone(row.label);
+  const about = countTexts.about(countText(Math.round(row.seeds), 'seed'));
+  return (
+    <div data-place="field">
+      <PageHead
+        kicker={<Link href={paths.count(org, plantingId)}>{countTexts.allRows}</Link>}
+        title={title}
+        sub={`${[rowPlaceText(row.place), readingText(row.length), about].join('; ')}. ${countTexts.counting}: ${countingText(data.findings)}.`}
+        actions={
+          <>
+            {previous ? <LinkButton look="secondary" href={paths.rowSample(org, plantingId, previous.id)}>{countTexts.previous(previous.label)}</LinkButton> : null}
+            {next ? <LinkButton look="secondary" href={paths.rowSample(org, plantingId, next.id)}>{countTexts.next(next.label)}</LinkButton> : null}
+          </>
+        }
+      />
+      <CountsSection data={data} />
+      <TapeSection data={data} />
+      <CoverSection data={data} />
+    </div>
+  );
+}
