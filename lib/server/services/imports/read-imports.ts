@@ -1,4 +1,5 @@
 import 'server-only';
+import { Temporal } from 'temporal-polyfill';
 import { listImportFiles } from '../../data/import-file';
 import { listRowSamples } from '../../data/row-sample';
 import { listWithdrawnIds } from '../../data/withdrawal';
@@ -13,8 +14,10 @@ export async function readImports(context: ReadContext, plantingId: string) {
   const samples = await listRowSamples(tx, { organisationId, plantingId });
   const files = await listImportFiles(tx, { organisationId, plantingId });
   const withdrawn = await listWithdrawnIds(tx, { organisationId });
+  const planted = Temporal.PlainDate.from(planting.plantedOn);
   return {
-    plantedOn: planting.plantedOn,
+    /** Days on which an example file may place its visits: plants are first looked for about then. */
+    exampleDays: [planted.add({ days: 10 }).toString(), planted.add({ days: 11 }).toString()] as [string, string],
     timeZone: farm.timeZone,
     labels: samples.map((sample) => sample.label),
     files: files.map(({ id, kind, fileName, lines, records, createdAt, personName }) => ({
