@@ -2,12 +2,13 @@ import { z } from 'zod';
 import type { DoublesAndGaps } from '@/lib/agronomy/doubles-and-gaps';
 import type { EmergenceCurve } from '@/lib/agronomy/emergence-curve';
 import type { EmergenceSpread } from '@/lib/agronomy/emergence-spread';
-import type { DaysFigure, Figures, Penalties, SeedFigure, SeedIntervalFigure, StandFigure } from '@/lib/agronomy/figures';
+import type { DaysFigure, Figures, SeedFigure, SeedIntervalFigure, StandFigure } from '@/lib/agronomy/figures';
 import type { Placement } from '@/lib/agronomy/kachman-smith';
 import type { LateLimits } from '@/lib/agronomy/late-limits';
 import type { LatePattern } from '@/lib/agronomy/late-pattern';
 import type { LateShare } from '@/lib/agronomy/late-share';
-import { penaltyStudies, type Penalty } from '@/lib/agronomy/penalty/penalty';
+import type { Outcome } from '@/lib/agronomy/outcome';
+import { penaltyStudies, type PenaltyStudy } from '@/lib/agronomy/penalty/penalty';
 import { SCORE_VERSION, type Score, type ScorePart } from '@/lib/agronomy/score';
 import type { StandInterval } from '@/lib/agronomy/stand-interval-shape';
 import { outcomeSchema } from './outcome';
@@ -131,16 +132,16 @@ export const figuresSchema: z.ZodType<Figures> = z.object({
   scoreSpacing: outcomeSchema(scorePartSchema),
 });
 
-const penaltySchema: z.ZodType<Penalty> = z.object({
-  study: z.enum(penaltyStudies),
-  source: z.string(),
-  reading: z.enum(['read', 'quoted']),
+/** What a study says of this stand; its name, source and limits stand in the register. */
+const saidPenaltySchema = z.object({
   lossLow: number,
   lossHigh: number,
   unit: z.enum(['percent-of-even-stand', 'percent-of-three-plants', 'percent-of-yield', 'bushels-per-acre']),
   basis: z.enum(['measured', 'interpolated', 'formula']),
   column: z.string(),
-  domain: z.string(),
 });
+export type SaidPenalty = z.output<typeof saidPenaltySchema>;
 
-export const penaltiesSchema: z.ZodType<Penalties> = z.record(z.enum(penaltyStudies), outcomeSchema(penaltySchema));
+export type SaidPenalties = Record<PenaltyStudy, Outcome<SaidPenalty>>;
+
+export const penaltiesSchema: z.ZodType<SaidPenalties> = z.record(z.enum(penaltyStudies), outcomeSchema(saidPenaltySchema));

@@ -90,8 +90,15 @@ const scoredRowSchema = z.object({
 });
 export type ScoredRow = z.output<typeof scoredRowSchema>;
 
+/** How finely a screen looks: the planting and its zones are always there, of the others one at a time. */
+export const scoreLevels = ['planting', 'setting', 'strip', 'row-sample'] as const;
+export type ScoreLevel = (typeof scoreLevels)[number];
+
 export const scoresSchema = z.object({
   planting: plantingFactsSchema,
+  level: z.enum(scoreLevels),
+  /** How many there are at each level; a level without any is not offered. */
+  things: z.record(z.enum(scoreLevels), number),
   whole: groupSchema,
   /** How the planting's stand was taken together where zones are drawn. */
   zoneStand: z
@@ -107,5 +114,11 @@ export const scoresSchema = z.object({
   settings: z.array(scoredSettingSchema),
   strips: z.array(scoredStripSchema),
   rowSamples: z.array(scoredRowSchema),
+  notes: z.object({
+    notCounted: z.array(z.string()),
+    impossible: z.array(z.object({ label: z.string(), field: z.string() })),
+    countsNotUsed: number,
+    rowSamplesOfLostStrips: number,
+  }),
 });
 export type Scores = z.output<typeof scoresSchema>;

@@ -4,6 +4,7 @@ import type { RowSample } from '@/lib/agronomy/row-sample';
 import { rowAreaAcres } from '@/lib/agronomy/stand';
 import type { ComparedSetting } from '@/lib/schemas/comparison';
 import type { CoreSamples } from '../scores/core-samples';
+import { saidPenalties } from '../scores/said-penalties';
 import type { SoundSamples } from '../scores/sound-samples';
 import { trialSettings } from '../scores/trial-settings';
 import type { ComparedStrip } from './compared-strips';
@@ -33,7 +34,7 @@ export function comparedSettings(core: CoreSamples, sound: SoundSamples, strips:
         countingEnded: curve.countingEnded,
       })),
       standInterval: chainOutcome(figures.emergenceCurve, () => figures.plantsPerAcreInterval),
-      penalties,
+      penalties: saidPenalties(penalties),
       typicalRow: typicalRow(core, samples, sound.scores),
       coverReadings: core.observations.residueReadings.filter((reading) => rowSampleIds.has(reading.rowSampleId)).length,
     };

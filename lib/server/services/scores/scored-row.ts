@@ -4,6 +4,7 @@ import { readingIn } from '@/lib/schemas/reading';
 import type { RowSampleRow } from '../../data/row-sample';
 import type { CoreSamples } from './core-samples';
 import { drawnPlants } from './drawn-plants';
+import { saidPenalties } from './said-penalties';
 import { settingOfStrip } from './setting-of-strip';
 import type { SoundSamples } from './sound-samples';
 
@@ -56,7 +57,7 @@ export function scoredRow(
           plants: sample ? drawnPlants(sample) : [],
         }
       : null,
-    scored: scores ? { figures: scores.figures, penalties: scores.penalties } : null,
+    scored: scores ? { figures: scores.figures, penalties: saidPenalties(scores.penalties) } : null,
     impossible: sound.impossible.get(rowSample.id) ?? null,
   };
 }
