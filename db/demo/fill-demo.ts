@@ -1,7 +1,9 @@
 import { count } from 'drizzle-orm';
 import type { Database } from '@/db/connection';
 import { person } from '@/db/schema/person';
-import { attachToFarms, insertAccount } from './insert-account';
+import { withActor } from '@/lib/server/operations/actor-context';
+import { readReplant } from '@/lib/server/services/replant/read-replant';
+import { attachToFarms, insertAccount, organisationIdOf, personIdOf } from './insert-account';
 import { cropService, otherOrganisations } from './demo-people';
 import { farmsOfPeople, writeFarms } from './demo-farms';
 import { writeSettings } from './demo-settings';
@@ -54,5 +56,7 @@ async function fillCrustedField(write: DemoWriter): Promise<void> {
 
 async function fillOther(db: Database, other: (typeof otherOrganisations)[number]): Promise<void> {
   await insertAccount(db, other);
-  await writeOtherOrganisation(demoWriter(db, other), other);
+  const owner = { organisationId: organisationIdOf(other), personId: personIdOf(other, 'owner'), now: () => new Date(`${other.demoToday}T21:00:00Z`) };
+  const basisHashOf = (planting: string, zone: string) => withActor(db, owner, async (context) => (await readReplant(context, { planting, zone })).basisHash);
+  await writeOtherOrganisation(demoWriter(db, other), other, basisHashOf);
 }

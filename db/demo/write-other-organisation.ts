@@ -11,15 +11,18 @@ export const otherIdsOf = ({ key }: { key: string }) => {
   return {
     farmId: of('farm'), fieldId: of('field'), plantingId: of('planting'), zoneId: of('zone'), settingIds: [of('setting-one'), of('setting-two')],
     studyId: of('study'), trialId: of('trial'), blockId: of('block'), stripIds: [of('strip-one'), of('strip-two')], rowSampleId: of('row'), visitId: of('visit'),
-    countId: of('count'), wrongCountId: of('wrong-count'), tapeSheetId: of('tape'), residueId: of('residue'), withdrawalId: of('withdrawal'), importId: of('import'), replantSheetId: of('replant-sheet'),
+    countId: of('count'), wrongCountId: of('wrong-count'), tapeSheetId: of('tape'), residueId: of('residue'), withdrawalId: of('withdrawal'), importId: of('import'), replantSheetId: of('replant-sheet'), decisionId: of('decision'),
   };
 };
 
 const plantedOn = '2026-05-04';
 const countedOn = '2026-05-20';
 
-/** A little of everything, with the organisation's own word in every text that a person writes: found anywhere else, it leaked. */
-export async function writeOtherOrganisation(write: DemoWriter, other: Other): Promise<void> {
+/**
+ * A little of everything, with the organisation's own word in every text that a person writes: found anywhere else, it leaked.
+ * `basisHashOf` reads what the decision is signed on, as the screen would show it.
+ */
+export async function writeOtherOrganisation(write: DemoWriter, other: Other, basisHashOf: (planting: string, zone: string) => Promise<string>): Promise<void> {
   const { word } = other;
   const ids = otherIdsOf(other);
   const send = (operation: Omit<DemoOperation, 'by' | 'on'> & { on?: string }) => write({ by: 'owner', on: '2026-05-01', ...operation });
@@ -29,7 +32,9 @@ export async function writeOtherOrganisation(write: DemoWriter, other: Other): P
   await send({ kind: 'planting.add', thingId: ids.plantingId, body: plantingBody(word, ids) });
   await writeTrial(send, word, ids);
   await writeObservations(send, word, ids);
-  await send({ kind: 'replant-sheet.save', thingId: ids.replantSheetId, on: '2026-05-22', body: { plantingId: ids.plantingId, zoneId: null, inputs: replantInputs(word) } });
+  await send({ kind: 'replant-sheet.save', thingId: ids.replantSheetId, on: '2026-05-22', body: { plantingId: ids.plantingId, zoneId: ids.zoneId, inputs: replantInputs(word) } });
+  const decision = { plantingId: ids.plantingId, zoneId: ids.zoneId, decided: 'keep', signedName: `${word} owner`, basisHash: await basisHashOf(ids.plantingId, ids.zoneId) };
+  await send({ kind: 'decision.sign', thingId: ids.decisionId, on: '2026-05-23', body: decision });
 }
 
 type Send = (operation: Omit<DemoOperation, 'by' | 'on'> & { on?: string }) => Promise<void>;
@@ -87,7 +92,7 @@ async function writeObservations(send: Send, word: string, ids: Ids): Promise<vo
 function replantInputs(word: string) {
   return {
     typedIn: 'us', fullYield: { typed: '190' }, pricePerBushel: '4', replantOn: '2026-06-01', replantStand: { typed: '30,000' },
-    costs: [{ label: `${word} seed`, dollarsPerAcre: '30' }], extraDryingPerAcre: null, insurancePaymentPerAcre: null, gapLossPercent: 0,
-    unevenLossPercent: 0, poorSecondStandChancePercent: 0, poorSecondStandYieldPercent: null,
+    costs: [{ label: `${word} seed`, dollarsPerAcre: '30' }], extraDryingPerAcre: '8', insurancePaymentPerAcre: '0', gapLossPercent: 0,
+    unevenLossPercent: 0, poorSecondStandChancePercent: 0, poorSecondStandYieldPercent: 80,
   };
 }

@@ -5,7 +5,7 @@ import { crustedPlantingId, zoneIdOf } from './write-crusted-field';
 
 /**
  * Invented amounts, said to be so on the sheet itself; no price or cost of any year or place. With them the field as a whole
- * and its high ground are kept, and on the low ground replanting comes out a little ahead.
+ * and its high ground are kept; on the low ground replanting comes out a little ahead, and four counts leave both open.
  */
 const inputs = {
   typedIn: 'us',
