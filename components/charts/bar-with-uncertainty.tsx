@@ -7,6 +7,7 @@ export type UncertainBar = {
   /** "Keep, 20,500 plants". */
   label: string;
   value: number;
+  /** Equal to `upper` where no range is known; no line is drawn then. */
   lower: number;
   upper: number;
   /** "185 bu/ac", or "at most 120 bu/ac" where the table ends. */
@@ -85,7 +86,7 @@ export function BarWithUncertainty({ bars, unit, fileName, ...notes }: BarWithUn
                 fillOpacity={bar.isBound ? 0.35 : 1}
               />
               {/* Ink over a halo of paper, so that the line shows on the bar and beside it. */}
-              {(['stroke-paper', 'stroke-ink'] as const).map((stroke) => (
+              {(bar.lower < bar.upper ? (['stroke-paper', 'stroke-ink'] as const) : []).map((stroke) => (
                 <g key={stroke} strokeWidth={stroke === 'stroke-paper' ? 6 : 2} className={stroke}>
                   <line
                     x1={percent(bar.lower)}

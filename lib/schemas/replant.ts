@@ -56,8 +56,11 @@ const valueSchema = z.object({
   replantReading: readingOfTableSchema,
   keepYieldBushelsPerAcre: spanSchema,
   replantYieldBushelsPerAcre: spanSchema,
-  /** What keeping makes between the low and the high end of the count; null where the count has no interval. */
-  keepYieldOverCount: spanSchema.nullable(),
+  /**
+   * What keeping makes between the low and the high end of the count; null where the count has no interval. Below the
+   * table the low end is only known to be no more than that.
+   */
+  keepYieldOverCount: spanSchema.extend({ lowerIsBound: z.boolean() }).nullable(),
   /** What replanting makes between a poor second stand and a good one; null where no chance of a poor one was typed. */
   replantYieldOverSecondStand: spanSchema.nullable(),
   lines: z.array(lineSchema),

@@ -58,9 +58,8 @@ describe('keep or replant', () => {
   it('takes amounts per tonne and per hectare as they are typed', async () => {
     const planting = await scene.plant();
     await scene.count(planting, [19, 21, 20, 20]);
-    const { pricePerBushel: _price, extraDryingPerAcre: _drying, insurancePaymentPerAcre: _payment, ...rest } = purdueInputs;
     const saved = await scene.save('grower', planting, {
-      ...rest, typedIn: 'metric', pricePerTonne: '157,46', extraDryingPerHectare: '0', insurancePaymentPerHectare: '0',
+      ...purdueInputs, typedIn: 'metric', pricePerTonne: '157,46', extraDryingPerHectare: '0', insurancePaymentPerHectare: '0',
       costs: [{ label: 'All', dollarsPerHectare: '98.84' }],
     });
     expect(saved.outcome).toBe('applied');

@@ -35,9 +35,12 @@ export function replantValue(
 }
 
 /** The line of the table falls again at thick stands, so the ends of the count need not be the ends of the yield. */
-function yieldOverCount(terms: ReplantTerms, plantsPerAcre: number, interval: { lower: number; upper: number }): Span {
-  const yields = [interval.lower, plantsPerAcre, interval.upper].map((stand) => replantSum(terms, Math.max(0, stand)).keepYieldBushelsPerAcre);
-  return { lower: Math.min(...yields.map(({ lower }) => lower)), upper: Math.max(...yields.map(({ upper }) => upper)) };
+function yieldOverCount(terms: ReplantTerms, plantsPerAcre: number, interval: { lower: number; upper: number }): ReplantValue['keepYieldOverCount'] {
+  const sums = [interval.lower, plantsPerAcre, interval.upper].map((stand) => replantSum(terms, Math.max(0, stand)));
+  const ascending = sums.sort((a, b) => a.keepYieldBushelsPerAcre.upper - b.keepYieldBushelsPerAcre.upper);
+  const [least, most] = [ascending[0], ascending.at(-1)];
+  if (!least || !most) return null;
+  return { lower: least.keepYieldBushelsPerAcre.upper, upper: most.keepYieldBushelsPerAcre.upper, lowerIsBound: least.keepReading.kind === 'at-most' };
 }
 
 function yieldOverSecondStand(terms: ReplantTerms, isInTable: boolean): Span | null {

@@ -1,0 +1,63 @@
+import { PageHead } from '@/components/shell/page-head';
+import { fieldIdOf } from '@/components/form/problem-summary';
+import { LinkButton } from '@/components/ui/link-button';
+import { intervalText } from '@/lib/format/interval-text';
+import { plantsPerAreaText } from '@/lib/format/plants-per-area-text';
+import { unitName } from '@/lib/format/unit-name';
+import type { ReplantBasis, ReplantFigure, ReplantGap } from '@/lib/schemas/replant';
+import type { UnitSystem } from '@/lib/schemas/vocabulary';
+import { replantTexts } from '@/lib/texts/replant-texts';
+import { figurePath } from './figure-path';
+import { FindingSentences } from './finding-sentences';
+
+type FindingProps = { basis: ReplantBasis; units: UnitSystem; countHref: string };
+
+/** What the page opens with: the answer in a sentence, or what is still needed for one. */
+export function Finding({ basis, units, countHref }: FindingProps) {
+  if (basis.sentences) {
+    const sentences = basis.sentences[units];
+    return <PageHead title={sentences.first} sub={<FindingSentences sentences={sentences} />} />;
+  }
+  const gaps = basis.answer.kind === 'insufficient' ? basis.answer.gaps : [];
+  const isOtherCrop = gaps.some(({ reason }) => reason === 'crop-without-table');
+  const wantsCounts = gaps.some(({ reason }) => ['no-row-samples', 'zone-not-counted', 'rest-not-counted'].includes(reason));
+  return (
+    <PageHead
+      title={isOtherCrop ? replantTexts.noAnswerForCrop : replantTexts.noAnswer}
+      sub={
+        <div className="flex flex-col gap-3">
+          {gaps.map((gap) => (
+            <Gap key={gap.reason} gap={gap} units={units} basis={basis} />
+          ))}
+          {basis.stand ? <p>{standSentence(basis.stand, units)}</p> : null}
+        </div>
+      }
+      {...(wantsCounts ? { actions: <LinkButton href={countHref}>{replantTexts.toCounts}</LinkButton> } : {})}
+    />
+  );
+}
+
+function Gap({ gap, units, basis }: { gap: ReplantGap; units: UnitSystem; basis: ReplantBasis }) {
+  if (gap.reason !== 'figures-missing') return <p>{replantTexts.gaps[gap.reason](gap.names)}</p>;
+  const figures = gap.names as ReplantFigure[];
+  const typedIn = basis.sheet?.inputs.typedIn ?? units;
+  return (
+    <p>
+      {replantTexts.type}
+      {figures.map((figure, index) => (
+        <span key={figure}>
+          {index === 0 ? ' ' : index === figures.length - 1 ? replantTexts.and : ', '}
+          <a href={`#${fieldIdOf(figurePath(figure, typedIn))}`}>{replantTexts.figureNames[figure]}</a>
+        </span>
+      ))}
+      {replantTexts.andPageAnswers}
+    </p>
+  );
+}
+
+function standSentence(stand: NonNullable<ReplantBasis['stand']>, units: UnitSystem): string {
+  const plants = (plantsPerAcre: number) => plantsPerAreaText(plantsPerAcre, units, { nearest: 100, withUnit: false });
+  const { interval } = stand;
+  const range = interval ? replantTexts.standInterval(intervalText(interval.lower, interval.upper, plants)) : replantTexts.standWithoutInterval;
+  return `${replantTexts.stand}: ${plants(stand.plantsPerAcre)} ${unitName('plants-per-area', units)}. ${range}`;
+}
