@@ -30,7 +30,7 @@ export function CountLineFields({ line, number, errors, onChange, onRemove, onEn
   const markerError = errors.get('visit.marker');
   return (
     <div
-      className="grid grid-cols-2 items-start gap-x-3 gap-y-2 md:grid-cols-[minmax(11rem,1.3fr)_9rem_1fr_1fr_1.2fr_1.6fr_auto]"
+      className="grid grid-cols-[minmax(0,1.25fr)_minmax(0,1fr)] items-start gap-x-3 gap-y-2 md:grid-cols-[minmax(12rem,1.3fr)_10rem_minmax(0,1fr)_minmax(0,1fr)_minmax(0,1.2fr)_minmax(0,1.8fr)_auto]"
       onKeyDown={(event) => {
         if (event.key !== 'Enter' || !(event.target instanceof HTMLInputElement)) return;
         event.preventDefault();

@@ -12,6 +12,7 @@ type CountTableProps = { org: string; plantingId: string; plantedOn: string; vis
 
 /** All row samples with their counts by visit day, for a desk. */
 export function CountTable({ org, plantingId, plantedOn, visitDays, rows }: CountTableProps) {
+  const anyFlag = rows.some((row) => findingTexts(row.findings).length > 0);
   return (
     <DataTable
       caption={countTexts.openPage}
@@ -27,7 +28,7 @@ export function CountTable({ org, plantingId, plantedOn, visitDays, rows }: Coun
         })),
         { key: 'tape', head: countTexts.tape, align: 'number' },
         { key: 'counting', head: countTexts.counting },
-        { key: 'flags', head: countTexts.toLookAt },
+        ...(anyFlag ? [{ key: 'flags', head: countTexts.toLookAt }] : []),
       ]}
       rows={rows.map((row): TableRow => {
         const flags = findingTexts(row.findings).join('; ');

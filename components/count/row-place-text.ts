@@ -13,3 +13,9 @@ export function rowPlaceText(place: RowPlaceFacts): string {
   const parts = [...(strip.length + zone.length === 0 ? [countTexts.spot] : []), ...strip, ...zone, ...row];
   return parts.join(', ');
 }
+
+/** The same as the beginning of a sentence. */
+export function rowPlaceSentence(place: RowPlaceFacts): string {
+  const text = rowPlaceText(place);
+  return `${text.charAt(0).toUpperCase()}${text.slice(1)}.`;
+}

@@ -7,10 +7,9 @@ import { daysAfter } from '@/lib/format/days-after';
 import { readingText } from '@/lib/format/reading-text';
 import { paths } from '@/lib/paths/paths';
 import { countTexts } from '@/lib/texts/count-texts';
-import { countingText } from './finding-texts';
 import { CountsSection } from './counts-section';
 import { CoverSection } from './cover-section';
-import { rowPlaceText } from './row-place-text';
+import { rowPlaceSentence } from './row-place-text';
 import type { RowSheetData } from './row-sheet-types';
 
 /** One row sample: what stands of it, and the paper sheet to type in. */
@@ -20,13 +19,12 @@ export function RowSheet({ org, data }: { org: string; data: RowSheetData }) {
   const title = last
     ? countTexts.sheetTitle(row.label, countText(last.plantsUp, 'plant'), String(daysAfter(plantedOn, last.visitedOn)))
     : countTexts.sheetTitleNone(row.label);
-  const about = countTexts.about(countText(Math.round(row.seeds), 'seed'));
   return (
     <div data-place="field">
       <PageHead
-        kicker={<Link href={paths.count(org, plantingId)}>{countTexts.allRows}</Link>}
+        kicker={<Link className="inline-flex min-h-press items-center text-15 underline underline-offset-4" href={paths.count(org, plantingId)}>{countTexts.allRows}</Link>}
         title={title}
-        sub={`${[rowPlaceText(row.place), readingText(row.length), about].join('; ')}. ${countTexts.counting}: ${countingText(data.findings)}.`}
+        sub={[rowPlaceSentence(row.place), countTexts.lengthAndSeeds(readingText(row.length), countText(Math.round(row.seeds), 'seed')), countingSentence(data)].join(' ')}
         actions={
           <>
             {previous ? <LinkButton look="secondary" href={paths.rowSample(org, plantingId, previous.id)}>{countTexts.previous(previous.label)}</LinkButton> : null}
@@ -39,4 +37,9 @@ export function RowSheet({ org, data }: { org: string; data: RowSheetData }) {
       <CoverSection data={data} />
     </div>
   );
+}
+
+function countingSentence({ counts, findings }: RowSheetData): string {
+  if (counts.length === 0) return '';
+  return findings.countingEnded ? countTexts.rowEnded : countTexts.rowStillComing;
 }

@@ -1,3 +1,6 @@
+'use client';
+
+import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { countText } from '@/lib/format/count-text';
 import { dateText } from '@/lib/format/date-text';
@@ -16,6 +19,7 @@ type StandingCountsProps = {
 
 /** The counts that stand, in the order of visits; each can be corrected or taken back. */
 export function StandingCounts({ counts, plantedOn, fallingOn, mayWrite, onCorrect }: StandingCountsProps) {
+  const [open, setOpen] = useState<string>();
   if (counts.length === 0) return <p className="text-18">{countTexts.noCounts}</p>;
   return (
     <ul className="flex flex-col">
@@ -23,12 +27,12 @@ export function StandingCounts({ counts, plantedOn, fallingOn, mayWrite, onCorre
         const date = dateText(count.visitedOn);
         const plants = countText(count.plantsUp, 'plant');
         return (
-          <li key={count.id} className="flex flex-wrap items-center gap-x-5 gap-y-1 border-t border-rule py-3">
-            <p className={`w-20 shrink-0 text-right font-mono text-34 leading-none font-bold ${count.used ? '' : 'line-through decoration-2'}`}>
+          <li key={count.id} className="flex flex-wrap items-center gap-x-4 gap-y-1 border-t border-rule py-3">
+            <p className={`w-16 shrink-0 text-right font-mono text-34 leading-none font-bold ${count.used ? '' : 'line-through decoration-2'}`}>
               {count.plantsUp}
               <span className="sr-only"> {countTexts.up}</span>
             </p>
-            <div className="min-w-0 flex-1 basis-48">
+            <div className="min-w-0 flex-1 basis-40">
               <p className="text-18 font-bold">
                 {[dateText(count.visitedOn, 'day-and-month'), countTexts.day(String(daysAfter(plantedOn, count.visitedOn))), ...(count.visitedAt ? [count.visitedAt] : [])].join(', ')}
               </p>
@@ -39,16 +43,25 @@ export function StandingCounts({ counts, plantedOn, fallingOn, mayWrite, onCorre
                 </p>
               ))}
             </div>
-            {mayWrite ? (
-              <div className="flex flex-wrap gap-1">
+            {mayWrite && open !== count.id ? (
+              <Button look="quiet" aria-label={countTexts.changeOf(countTexts.countOf(date, plants))} onClick={() => setOpen(count.id)}>
+                {countTexts.change}
+              </Button>
+            ) : null}
+            {mayWrite && open === count.id ? (
+              <div className="flex basis-full flex-wrap justify-end gap-2">
                 <Button
-                  look="quiet"
+                  look="secondary"
+                  autoFocus
                   aria-label={countTexts.correctOf(`${date}, ${plants}`)}
-                  onClick={() => onCorrect(count, countTexts.correcting(date, plants))}
+                  onClick={() => {
+                    setOpen(undefined);
+                    onCorrect(count, countTexts.correcting(date, plants));
+                  }}
                 >
                   {countTexts.correct}
                 </Button>
-                <TakeBack targetKind="count" targetId={count.id} what={countTexts.countOf(date, plants)} />
+                <TakeBack look="secondary" targetKind="count" targetId={count.id} what={countTexts.countOf(date, plants)} />
               </div>
             ) : null}
           </li>

@@ -16,10 +16,11 @@ type TakeBackProps = {
   targetId: string;
   /** "the count of 18 May 2026, 24 plants": what is taken back, in the question and for who only hears the button. */
   what: string;
+  look?: 'quiet' | 'secondary';
 };
 
 /** Takes an observation, or a whole import, out of the figures, with a reason. */
-export function TakeBack({ targetKind, targetId, what }: TakeBackProps) {
+export function TakeBack({ targetKind, targetId, what, look = 'quiet' }: TakeBackProps) {
   const [open, setOpen] = useState(false);
   const [reason, setReason] = useState('');
   const [attempt, setAttempt] = useState(0);
@@ -30,7 +31,7 @@ export function TakeBack({ targetKind, targetId, what }: TakeBackProps) {
   };
   return (
     <>
-      <Button look="quiet" aria-label={countTexts.takeBackOf(what)} onClick={() => setOpen(true)}>
+      <Button look={look} aria-label={countTexts.takeBackOf(what)} onClick={() => setOpen(true)}>
         {countTexts.takeBack}
       </Button>
       <Dialog

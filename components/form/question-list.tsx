@@ -33,12 +33,12 @@ function AskedQuestions({ questions, onConfirm, pending = false, yes = formTexts
   return (
     <div ref={box} tabIndex={-1} role="alert" className="flex max-w-reading flex-col gap-3 border-l-8 border-flag py-2 pl-4 outline-none">
       <p>{isOne ? formTexts.askedLeadOne : formTexts.askedLead}</p>
-      {isOne ? <p className="text-18 font-bold">{only.sentence}</p> : null}
+      {isOne ? <p className="text-18 font-bold whitespace-pre-line">{only.sentence}</p> : null}
       {isOne ? null : (
         <ul className="flex flex-col gap-3">
           {questions.map((question) => (
             <li key={keyOf(question)} className="border-t border-rule pt-2">
-              <p className="font-bold">{question.sentence}</p>
+              <p className="font-bold whitespace-pre-line">{question.sentence}</p>
               <Checkbox
                 label={yes}
                 checked={answered.includes(keyOf(question))}

@@ -68,7 +68,7 @@ export function NextPlace({ tapeUnit, markers, onAdd }: NextPlaceProps) {
             add();
           }}
         >
-          <Field label={tapeSheetTexts.next} unit={tapeSheetTexts.tapes[tapeUnit].hint} hint={tapeSheetTexts.nextHelp} id="next-place" error={error}>
+          <Field label={tapeSheetTexts.next} hint={tapeSheetTexts.nextHelp(tapeSheetTexts.tapes[tapeUnit].hint)} id="next-place" error={error}>
             {(wiring) => (
               <NumberInput
                 {...wiring}

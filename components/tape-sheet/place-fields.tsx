@@ -24,7 +24,7 @@ export function PlaceFields({ place, index, markers, errorOf, onChange, onDone, 
   const listId = `place-${index}-markers`;
   return (
     <div
-      className="grid grid-cols-2 items-start gap-3 lg:grid-cols-[1fr_1.3fr_1fr_1fr_auto]"
+      className="grid grid-cols-[minmax(0,1fr)_minmax(0,1.2fr)] items-start gap-3"
       onKeyDown={(event) => {
         if (event.key !== 'Enter' || !(event.target instanceof HTMLInputElement)) return;
         event.preventDefault();
@@ -54,7 +54,7 @@ export function PlaceFields({ place, index, markers, errorOf, onChange, onDone, 
       <Field label={tapeSheetTexts.leaf} error={errorOf('leafStage')}>
         {(wiring) => <NumberInput {...wiring} value={place.leafStage} onChange={(event) => onChange({ ...place, leafStage: event.target.value })} />}
       </Field>
-      <div className="col-span-2 flex justify-end gap-2 lg:col-span-1 lg:pt-7">
+      <div className="col-span-2 flex justify-end gap-2">
         <Button look="quiet" aria-label={tapeSheetTexts.removePlaceOf(place.typed)} onClick={onRemove}>
           {tapeSheetTexts.removePlace}
         </Button>

@@ -20,12 +20,12 @@ export function PlaceList({ places, markers, errorOf, onChange, onRemove }: Plac
   const [open, setOpen] = useState<number>();
   if (places.length === 0) return <p className="text-18">{tapeSheetTexts.empty}</p>;
   return (
-    <ol className="flex flex-col sm:grid sm:grid-cols-2 sm:gap-x-8 xl:grid-cols-3">
+    <ol className="gap-x-8 sm:columns-2 xl:columns-3">
       {places.map((place, index) => {
         const errors = (['typed', 'marker', 'leafStage'] as const).flatMap((field) => errorOf(index, field) ?? []);
         if (open === index) {
           return (
-            <li key={index} className="border-t border-rule py-3 sm:col-span-full">
+            <li key={index} className="break-inside-avoid border-t border-rule py-3">
               <PlaceFields
                 place={place}
                 index={index}
@@ -42,7 +42,7 @@ export function PlaceList({ places, markers, errorOf, onChange, onRemove }: Plac
           );
         }
         return (
-          <li key={index} className="border-t border-rule">
+          <li key={index} className="break-inside-avoid border-t border-rule">
             <button
               type="button"
               aria-label={tapeSheetTexts.changeOf(`${place.typed}, ${notesOf(place).join(', ')}`)}

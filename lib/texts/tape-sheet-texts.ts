@@ -32,7 +32,7 @@ export const tapeSheetTexts = {
   date: 'Date',
   readByPerson: 'Read by',
   next: 'Next place',
-  nextHelp: 'Enter takes it and waits for the next one.',
+  nextHelp: (example: string) => `Such as ${example}. Enter takes it and waits for the next.`,
   add: 'Next',
   kind: 'What stands there',
   kinds: { plant: 'Plant', late: 'Late plant', double: 'Double', missing: 'One missing' } satisfies Record<TapeEntryKind, string>,
