@@ -8,7 +8,7 @@ import { FigureOpener } from './figure-opener';
 import { plainFigure } from './plain-figure';
 import type { ScoredThing } from './scored-things';
 import { SeriesName } from './series-name';
-import { shownFigure } from './shown-figure';
+import { shownFigure, withoutBound } from './shown-figure';
 
 type LevelListProps = { things: readonly ScoredThing[]; hrefOf: (id: string) => string };
 
@@ -37,10 +37,11 @@ export function LevelList({ things, hrefOf }: LevelListProps) {
                 {important.map((id) => {
                   const shown = shownFigure(id, subject, units);
                   return (
-                    <div key={id} className="flex flex-col justify-between">
+                    <div key={id}>
                       <dt className="text-13 text-ink-soft">{head(id)}</dt>
                       <dd className="font-mono text-15">
-                        <FigureOpener id={id} subject={subject} text={shown.sort === null ? undefined : plainFigure(id, subject, units)} />
+                        <FigureOpener id={id} subject={subject} text={shown.sort === null ? undefined : withoutBound(plainFigure(id, subject, units), shown.bound)} />
+                        {shown.bound ? <span className="block font-sans text-13 text-ink-soft">{shown.bound}</span> : null}
                       </dd>
                     </div>
                   );

@@ -21,12 +21,12 @@ export function scoresFinding(scores: Scores, units: UnitSystem): ScoresFinding 
   const stand = texts.stand(plants(figures.plantsPerAcre.value.plantsPerAcre), unitName('plants-per-area', units));
   const ofSeed = figures.shareOfSeed.kind === 'value' ? texts.ofSeed(percentText(figures.shareOfSeed.value.share)) : '';
   return {
-    headline: `${stand}${ofSeed}${spreadClause(scores)}.`,
+    headline: `${stand}${ofSeed}.${spreadSentence(scores)}`,
     details: [intervalSentence(scores, plants), timingSentence(scores), scoreSentence(scores)].filter(Boolean),
   };
 }
 
-function spreadClause({ whole: { figures } }: Scores): string {
+function spreadSentence({ whole: { figures } }: Scores): string {
   const spread = figures.spreadDays;
   if (spread.kind === 'insufficient') return '';
   return texts.spread(daysText(spread.value.days), spread.value.bound === 'at-least');

@@ -19,11 +19,21 @@ import type { FigureSubject } from './figure-subject';
 import { penaltyOf, penaltyText } from './penalty-text';
 
 /** A figure as it is read: its number with unit, how sure or of what, and what to sort it by. */
-export type ShownFigure = { label: string; text: string; detail: string | null; sort: number | null };
+export type ShownFigure = {
+  label: string;
+  text: string;
+  /** "at least", "at most" or "by", where the number is only a bound; the text holds it too. */
+  bound: string | null;
+  detail: string | null;
+  sort: number | null;
+};
 
-type Said = { text: string; detail?: string | null; sort: number };
+type Said = { text: string; bound?: string | null; detail?: string | null; sort: number };
 
-const atLeast = (isBound: boolean, text: string) => (isBound ? `at least ${text}` : text);
+const atLeast = (isBound: boolean, text: string) => {
+  const bound = isBound ? scoreTexts.bounds.atLeast : null;
+  return { bound, text: bound ? `${bound} ${text}` : text };
+};
 
 /** Says one figure of a row sample or a group; where there is too little, in a word what is missing and below it what it needs. */
 export function shownFigure(id: FigureId, subject: FigureSubject, units: UnitSystem): ShownFigure {
@@ -31,10 +41,15 @@ export function shownFigure(id: FigureId, subject: FigureSubject, units: UnitSys
   const answer = isStudy(id) ? said(subject.penalties[id], penaltySaid(units)) : figureSaid(id, subject, units);
   if (answer.kind === 'insufficient') {
     const { reason, needed, had } = answer;
-    return { label, text: scoreTexts.short[reason] ?? scoreTexts.tooLittle, detail: scoreTexts.needs(needed, had), sort: null };
+    return { label, text: scoreTexts.short[reason] ?? scoreTexts.tooLittle, bound: null, detail: scoreTexts.needs(needed, had), sort: null };
   }
-  const { text, detail = null, sort } = answer.value;
-  return { label, text, detail, sort };
+  const { text, bound = null, detail = null, sort } = answer.value;
+  return { label, text, bound, detail, sort };
+}
+
+/** The number alone, where the word of its bound stands beside it in small. */
+export function withoutBound(text: string, bound: string | null): string {
+  return bound && text.startsWith(`${bound} `) ? text.slice(bound.length + 1) : text;
 }
 
 export function isStudy(id: FigureId): id is PenaltyStudy {
@@ -90,7 +105,7 @@ function figureSaid(id: keyof Figures, subject: FigureSubject, units: UnitSystem
       return said(figures[id], daysSaid);
     case 'spreadDays':
       return said(figures[id], ({ days, bound, boundReasons }) => ({
-        text: atLeast(bound === 'at-least', daysText(days)),
+        ...atLeast(bound === 'at-least', daysText(days)),
         detail: boundReasons.length > 0 ? boundReasons.map((reason) => scoreTexts.spreadBounds[reason]).join(' ') : null,
         sort: days,
       }));
@@ -160,14 +175,16 @@ function daysSaid({ days, bound }: DaysFigure): Said {
 function lateSaid({ share: late, bound, latePlants, plants, source, limits }: LateShare): Said {
   const count = (of: number) => decimalText(of, Number.isInteger(of) ? 0 : 1);
   return {
-    text: atLeast(bound === 'at-least', share(late)),
+    ...atLeast(bound === 'at-least', share(late)),
     detail: scoreTexts.late(count(latePlants), count(plants), scoreTexts.lateSources[source], decimalText(limits.lateDays, 0)),
     sort: late,
   };
 }
 
 function pointsSaid({ points, bound }: ScorePart): Said {
-  return { text: `${bound === 'at-most' ? 'at most ' : ''}${decimalText(points, 0)}`, sort: points };
+  const word = bound === 'at-most' ? scoreTexts.bounds.atMost : null;
+  const number = decimalText(points, 0);
+  return { text: word ? `${word} ${number}` : number, bound: word, sort: points };
 }
 
 const penaltySaid =

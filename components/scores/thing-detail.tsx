@@ -14,7 +14,7 @@ import { FigureOpener } from './figure-opener';
 import type { FigureSubject } from './figure-subject';
 import { PenaltyList } from './penalty-list';
 import { ScoreParts } from './score-parts';
-import { isOneRow, shownFigure, standText } from './shown-figure';
+import { isOneRow, shownFigure, standText, withoutBound } from './shown-figure';
 
 const first: readonly FigureId[] = ['plantsPerAcre', 'shareOfSeed', 'spreadDays', 'lateShare', 'score'];
 const stand: readonly FigureId[] = ['plantsPerAcre', 'shareOfSeed', 'tapeLessCounted'];
@@ -47,7 +47,8 @@ export function ThingDetail({ subject, name }: { subject: FigureSubject; name: s
               label={shown.label}
               value={
                 <span className={shown.sort === null ? 'text-21' : 'text-27 lg:text-34'}>
-                  <FigureOpener id={id} subject={subject} text={id === 'plantsPerAcre' ? plainStand : undefined} />
+                  {shown.bound ? <span className="text-15">{shown.bound} </span> : null}
+                  <FigureOpener id={id} subject={subject} text={id === 'plantsPerAcre' ? plainStand : withoutBound(shown.text, shown.bound)} />
                 </span>
               }
               detail={id === 'plantsPerAcre' && plainStand ? `${unitName('plants-per-area', units)}; ${shown.detail ?? ''}` : shown.detail}

@@ -2,7 +2,7 @@
 export const findingTexts = {
   stand: (plants: string, unit: string) => `${plants} ${unit} stand`,
   ofSeed: (share: string) => `, ${share} of the seed`,
-  spread: (days: string, isAtLeast: boolean) => `; from 10 to 90 % up took ${isAtLeast ? 'at least ' : ''}${days}`,
+  spread: (days: string, isAtLeast: boolean) => ` They took ${isAtLeast ? 'at least ' : ''}${days} to come up, from 10 to 90 %.`,
   interval: (interval: string, from: string, weighted: string) => `The 95 % interval is ${interval}, from ${from}${weighted}.`,
   byArea: (zones: number) => `, weighted by the area of ${zones} zones`,
   countingOnly: (interval: string) =>
@@ -10,7 +10,7 @@ export const findingTexts = {
   noInterval: (from: string, needed: string) => `From ${from}; an interval needs ${needed}.`,
   inStrips: (rows: string, strips: string) => `${rows} in ${strips}`,
   countingEnded: 'Counting has ended: two visits found nothing new.',
-  stillComing: 'Plants were still coming at the last counts.',
+  stillComing: 'Counting has not ended: until two visits find nothing new, more may come.',
   halfUp: (day: string, isAtLatest: boolean) => `Half were up ${isAtLatest ? 'by' : 'on'} day ${day}${isAtLatest ? ' at the latest' : ''}`,
   late: (share: string, isAtLeast: boolean) => `${isAtLeast ? 'at least ' : ''}${share} of the plants came up late`,
   score: (points: string, isAtMost: boolean, parts: string, leftOut: string) =>

@@ -117,8 +117,9 @@ export const scoreTexts = {
     'one-place': 'one place only',
     'no-residue-reading': 'not read',
   } as Record<string, string>,
+  bounds: { atLeast: 'at least', atMost: 'at most' },
   spreadBounds: {
-    'still-coming': 'Plants were still coming at the last counts.',
+    'still-coming': 'Counting has not ended.',
     'first-visit-too-late': 'A tenth were up at the first visit.',
   },
   patterns: { alternating: 'alternating', 'in-groups': 'in groups' },
