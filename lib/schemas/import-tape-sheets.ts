@@ -1,7 +1,7 @@
 import { ImportCells } from './import-cells';
 import { inOrder } from './import-counts';
 import { readImportTable, type ImportProblem } from './import-table';
-import { tapePlacesMost } from './observation';
+import { leafCollarsMost, tapePlacesMost } from './observation';
 import { parseTapePlace } from './tape-place';
 import { tapeEntryKinds, tapeUnits, type TapeEntryKind, type TapeUnit } from './vocabulary';
 
@@ -18,8 +18,6 @@ export const tapeSheetColumns = [
   { name: 'kind', required: false },
   { name: 'leaf_stage', required: false },
 ] as const;
-
-const leafCollarsMost = 20;
 
 function leafStageOf(cells: ImportCells): number | null | undefined {
   const text = cells.text('leaf_stage');

@@ -4,8 +4,12 @@ import { countKinds, importKinds, tapeEntryKinds, tapeUnits, withdrawableKinds }
 
 export const plantsMost = 2_000;
 export const tapePlacesMost = 1_000;
+export const leafCollarsMost = 20;
+export const marksMost = 1_000;
 export const importLinesMost = 2_000;
 export const importCharactersMost = 1_000_000;
+
+const markerSchema = z.string().trim().min(1, 'Name the marker, or leave it empty.').max(20, 'Use at most 20 characters.');
 
 /** A visit as it travels with what was observed at it. One that stands already is named by its id again. */
 export const visitSchema = z.object({
@@ -14,7 +18,7 @@ export const visitSchema = z.object({
   personId: z.uuid().nullable(),
   visitedOn: calendarDaySchema,
   visitedAt: timeOfDaySchema.nullable(),
-  marker: z.string().trim().min(1).max(20).nullable(),
+  marker: markerSchema.nullable(),
 });
 export type VisitInput = z.output<typeof visitSchema>;
 
@@ -36,28 +40,35 @@ export const recordCountSchema = z.object({
 export type RecordCountInput = z.output<typeof recordCountSchema>;
 
 export const tapePlaceSchema = z.object({
-  typed: z.string().trim().min(1, 'Type the place on the tape.').max(30),
+  typed: z.string().trim().min(1, 'Type the place on the tape.').max(30, 'That is too long for a place on the tape.'),
   kind: z.enum(tapeEntryKinds),
-  marker: z.string().trim().min(1).max(20).nullable(),
+  marker: markerSchema.nullable(),
   /** Leaf collars, such as 2 or 2.5; null where not read. */
-  leafStage: z.number().min(0).max(20).nullable(),
+  leafStage: z
+    .number('Type the leaf collars, such as 2 or 2.5.')
+    .min(0, 'Leaf collars cannot be below zero.')
+    .max(leafCollarsMost, `More than ${leafCollarsMost} leaf collars cannot be right.`)
+    .nullable(),
 });
 
 export const recordTapeSheetSchema = z.object({
   rowSampleId: z.uuid(),
   visit: visitSchema,
   tapeUnit: z.enum(tapeUnits),
-  places: z.array(tapePlaceSchema).min(1, 'Type at least one place.').max(tapePlacesMost),
+  places: z.array(tapePlaceSchema).min(1, 'Type at least one place.').max(tapePlacesMost, `More than ${tapePlacesMost.toLocaleString('en-US')} places on one sheet cannot be right.`),
   replacesId: z.uuid().nullable(),
 });
 export type RecordTapeSheetInput = z.output<typeof recordTapeSheetSchema>;
+
+const marks = (message: string, least: number) =>
+  z.number(message).int(message).min(least, message).max(marksMost, `More than ${marksMost.toLocaleString('en-US')} marks cannot be right.`);
 
 export const recordResidueSchema = z
   .object({
     rowSampleId: z.uuid(),
     readOn: calendarDaySchema,
-    marksRead: z.number().int().min(1, 'Type how many marks were read.').max(1_000),
-    marksCovered: z.number().int().min(0).max(1_000),
+    marksRead: marks('Type how many marks were read, as a whole number.', 1),
+    marksCovered: marks('Type how many marks lie on residue, as a whole number.', 0),
   })
   .refine((reading) => reading.marksCovered <= reading.marksRead, { path: ['marksCovered'], message: 'No more marks can lie on residue than were read.' });
 export type RecordResidueInput = z.output<typeof recordResidueSchema>;
@@ -65,14 +76,14 @@ export type RecordResidueInput = z.output<typeof recordResidueSchema>;
 export const withdrawSchema = z.object({
   targetKind: z.enum(withdrawableKinds),
   targetId: z.uuid(),
-  reason: z.string().trim().min(1, 'Say why.').max(300),
+  reason: z.string().trim().min(1, 'Say why.').max(300, 'Use at most 300 characters.'),
 });
 export type WithdrawInput = z.output<typeof withdrawSchema>;
 
 export const takeImportSchema = z.object({
   plantingId: z.uuid(),
   importKind: z.enum(importKinds),
-  fileName: z.string().trim().min(1).max(200),
+  fileName: z.string().trim().min(1, 'Name the file.').max(200, 'Use a file name of at most 200 characters.'),
   text: z.string().max(importCharactersMost, 'That file is larger than 2,000 lines can be.'),
 });
 export type TakeImportInput = z.output<typeof takeImportSchema>;

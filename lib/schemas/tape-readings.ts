@@ -1,29 +1,40 @@
+import { parseTapePlace } from './tape-place';
 import type { TapeUnit } from './vocabulary';
 
-const fraction = /^\d+\/\d+$/;
-
 /**
- * Takes a line of readings apart, as it is read out or copied: "0 2 17 33 38". Line ends, semicolons and tabs part them
- * where there are any; otherwise spaces do, a fraction staying with the whole number before it. On a tape of feet and
- * inches, where a reading holds spaces itself, a comma before a space parts them too.
+ * Takes a line of readings apart, as it is read out or copied: "0 2 17 33 38". Line ends, semicolons, tabs and a comma
+ * before a space part them; what is left between is one reading where the tape can be read so, and otherwise parted at its
+ * spaces, a fraction staying with the whole number before it.
  */
 export function splitTapeReadings(text: string, unit: TapeUnit): string[] {
-  const parted = /[\n;\t]/.test(text) ? text.split(/[\n;\t]/) : /,\s/.test(text) ? text.split(/,\s+/) : undefined;
-  if (parted) return parted.map((each) => each.trim()).filter((each) => each !== '');
-  const words = text.trim().split(/\s+/).filter((each) => each !== '');
-  if (unit === 'ft-in' && words.some((word) => /^(ft|feet|foot|in|inch|inches)\.?$/i.test(word))) return feetAndInches(words);
-  return words.reduce<string[]>((readings, word) => {
+  return text
+    .split(/[\n\r;\t]|,\s/)
+    .map((piece) => piece.trim())
+    .filter((piece) => piece !== '')
+    .flatMap((piece) => (parseTapePlace(piece, unit).ok ? [piece] : partedAtSpaces(piece)));
+}
+
+const fraction = /^\d+\/\d+$/;
+const takesFraction = /^(\d+|\d+'\d+)$/;
+const feetWord = /^(ft|feet|foot)\.?$/i;
+
+function partedAtSpaces(piece: string): string[] {
+  const words = piece.split(/\s+/);
+  if (words.some((word) => feetWord.test(word))) return feetAndInches(words);
+  const readings: string[] = [];
+  for (const word of words) {
     const before = readings.at(-1);
-    if (fraction.test(word) && before !== undefined && /^(\d+|\d+'\d+)$/.test(before)) return [...readings.slice(0, -1), `${before} ${word}`];
-    return [...readings, word];
-  }, []);
+    if (before !== undefined && fraction.test(word) && takesFraction.test(before)) readings[readings.length - 1] = `${before} ${word}`;
+    else readings.push(word);
+  }
+  return readings;
 }
 
 /** "5 ft 3 in 5 ft 9 6 ft": a number before "ft" opens the next reading. */
 function feetAndInches(words: readonly string[]): string[] {
   const readings: string[][] = [];
   words.forEach((word, index) => {
-    const opens = /^\d+$/.test(word) && /^(ft|feet|foot)\.?$/i.test(words[index + 1] ?? '');
+    const opens = /^\d+$/.test(word) && feetWord.test(words[index + 1] ?? '');
     if (opens || readings.length === 0) readings.push([word]);
     else readings.at(-1)?.push(word);
   });
