@@ -1,4 +1,5 @@
 import { scaleLinear } from 'd3-scale';
+import { useId } from 'react';
 import { interfaceTexts } from '@/lib/texts/interface-texts';
 import { ChartFrame, type ChartNotes } from './chart-frame';
 
@@ -29,6 +30,8 @@ const barHeight = 26;
 /** A few amounts beside each other from zero, each with its uncertainty: what the stand makes, and what another would. */
 export function BarWithUncertainty({ bars, unit, fileName, ...notes }: BarWithUncertaintyProps) {
   const texts = interfaceTexts.charts;
+  // The same bars may stand twice on a page, frozen and as of now.
+  const chartId = useId();
   const x = scaleLinear()
     .domain([0, Math.max(1, ...bars.map((bar) => Math.max(bar.value, bar.upper)))])
     .range([0, 98]);
@@ -64,7 +67,7 @@ export function BarWithUncertainty({ bars, unit, fileName, ...notes }: BarWithUn
             <svg aria-hidden="true" width="100%" height={barHeight} className="block">
               <defs>
                 <pattern
-                  id={`${bar.id}-hatch`}
+                  id={`${chartId}-${bar.id}`}
                   width={7}
                   height={7}
                   patternUnits="userSpaceOnUse"
@@ -82,7 +85,7 @@ export function BarWithUncertainty({ bars, unit, fileName, ...notes }: BarWithUn
                 strokeWidth={2}
                 strokeDasharray={bar.isBound ? '5 4' : undefined}
                 className={bar.look === 'solid' ? 'fill-series-2 stroke-series-2' : 'stroke-series-3'}
-                fill={bar.look === 'solid' ? undefined : `url(#${bar.id}-hatch)`}
+                fill={bar.look === 'solid' ? undefined : `url(#${chartId}-${bar.id})`}
                 fillOpacity={bar.isBound ? 0.35 : 1}
               />
               {/* Ink over a halo of paper, so that the line shows on the bar and beside it. */}

@@ -5,6 +5,7 @@ import { moneyText } from '@/lib/format/money-text';
 import { plantsPerAreaText } from '@/lib/format/plants-per-area-text';
 import { readingText } from '@/lib/format/reading-text';
 import { percentText } from '@/lib/format/percent-text';
+import { unitName } from '@/lib/format/unit-name';
 import { yieldText } from '@/lib/format/yield-text';
 import type { ReplantBasis } from '@/lib/schemas/replant';
 import type { UnitSystem } from '@/lib/schemas/vocabulary';
@@ -19,13 +20,14 @@ export type BasisFact = { id: string; label: string; text: string };
 export function basisFacts(basis: ReplantBasis, units: UnitSystem): BasisFact[] {
   const texts = replantTexts.inputs;
   const fact = (id: string, label: string, text: string | null | undefined): BasisFact[] => (text ? [{ id, label, text }] : []);
-  const stand = (plantsPerAcre: number) => plantsPerAreaText(plantsPerAcre, units, { nearest: 100 });
+  const number = (plantsPerAcre: number) => plantsPerAreaText(plantsPerAcre, units, { nearest: 100, withUnit: false });
+  const unit = unitName('plants-per-area', units);
   const interval = basis.stand?.interval;
   return [
     ...fact('planted', texts.planted, dateText(basis.plantedOn)),
     ...fact('area', replantTexts.scope(basis.zone?.name ?? replantTexts.wholeField, null), basis.acres === null ? null : areaText(basis.acres, units)),
-    ...fact('stand', replantTexts.stand, basis.stand && stand(basis.stand.plantsPerAcre)),
-    ...fact('interval', '95 %', interval && intervalText(interval.lower, interval.upper, stand)),
+    ...fact('stand', texts.stand, basis.stand && `${number(basis.stand.plantsPerAcre)} ${unit}`),
+    ...fact('interval', texts.interval, interval && intervalText(interval.lower, interval.upper, number, unit)),
     ...basis.countedRows.flatMap((row) =>
       fact(`row ${row.rowSampleId}`, texts.row(row.label), `${plantsPerAreaText(row.plantsPerAcre, units)}, ${texts.seen(dateText(row.lastSeenOn, 'day-and-month'))}`),
     ),

@@ -1,10 +1,11 @@
-import { Figure } from '@/components/ui/figure';
 import { NumberSource } from '@/components/ui/number-source';
 import { plantsPerAreaText } from '@/lib/format/plants-per-area-text';
 import type { ReplantBasis, ReplantValue } from '@/lib/schemas/replant';
 import type { UnitSystem } from '@/lib/schemas/vocabulary';
+import { interfaceTexts } from '@/lib/texts/interface-texts';
 import { replantTexts } from '@/lib/texts/replant-texts';
 import { entryOf, sumWords } from './sum-words';
+import { TurningScale } from './turning-scale';
 
 type BreakEvenProps = { basis: ReplantBasis; answer: ReplantValue; units: UnitSystem };
 
@@ -13,6 +14,7 @@ export function BreakEven({ basis, answer, units }: BreakEvenProps) {
   const texts = replantTexts.breakEven;
   const { breakEven } = answer;
   const stand = (plantsPerAcre: number) => plantsPerAreaText(plantsPerAcre, units, { nearest: 100 });
+  const number = (plantsPerAcre: number) => plantsPerAreaText(plantsPerAcre, units, { nearest: 100, withUnit: false });
   if (breakEven.kind !== 'stand') {
     const words =
       breakEven.kind === 'below-table'
@@ -37,10 +39,24 @@ export function BreakEven({ basis, answer, units }: BreakEvenProps) {
     ...(basis.stand ? [{ name: replantTexts.stand, text: stand(basis.stand.plantsPerAcre) }] : []),
   ];
   return (
-    <Figure
-      label={texts.label}
-      value={<NumberSource label={texts.label} text={text} inputs={inputs} {...(entry ? { entry } : {})} />}
-      detail={breakEven.bound === 'exact' ? texts.exact : texts.bound}
-    />
+    <div className="flex flex-col gap-1">
+      <p className="text-15 font-bold">{texts.label}</p>
+      <p className="text-21 font-bold">
+        <NumberSource label={texts.label} text={text} inputs={inputs} {...(entry ? { entry } : {})} />
+      </p>
+      <p className="text-15">{breakEven.bound === 'exact' ? texts.exact : texts.bound}</p>
+      {basis.stand ? (
+        <div className="pt-3">
+          <TurningScale
+            breakEvenPlantsPerAcre={breakEven.plantsPerAcre}
+            breakEvenText={texts.turnsAt(said(number(breakEven.plantsPerAcre)))}
+            stand={basis.stand}
+            standText={number(basis.stand.plantsPerAcre)}
+            units={units}
+          />
+          <p className="text-13 text-ink-soft">{texts.scaleNote(interfaceTexts.charts.thousandPlants(units), basis.stand.interval !== null)}</p>
+        </div>
+      ) : null}
+    </div>
   );
 }

@@ -11,7 +11,11 @@ import { replantSheetTexts } from '@/lib/texts/replant-sheet-texts';
 import { costAmountPath } from './figure-path';
 import { sentCosts, type ReplantDraft } from './replant-draft';
 
-type CostLinesProps = { draft: ReplantDraft; onChange: (costs: ReplantDraft['costs']) => void; error: ProblemError | null };
+type CostLinesProps = {
+  draft: ReplantDraft;
+  onChange: (costs: ReplantDraft['costs']) => void;
+  error: ProblemError | null;
+};
 
 /** The costs of replanting, each under the grower's own name for it. */
 export function CostLines({ draft, onChange, error }: CostLinesProps) {
@@ -24,11 +28,6 @@ export function CostLines({ draft, onChange, error }: CostLinesProps) {
     <fieldset className="flex min-w-0 flex-col gap-2">
       <legend className="text-15 font-bold">{texts.costs}</legend>
       <p className="text-13 text-ink-soft">{texts.costsHint}</p>
-      <div aria-hidden="true" className="grid grid-cols-[minmax(0,1fr)_6.5rem_auto] gap-2 text-13">
-        <span>{texts.nameHead}</span>
-        <span>{texts.amountHead[typedIn]}</span>
-        <span className="invisible h-0">{texts.removeCost}</span>
-      </div>
       {costs.map((cost, index) => {
         // An empty line is not sent, so the place in the refusal is the place among those sent.
         const place = sent.indexOf(cost);
@@ -37,23 +36,31 @@ export function CostLines({ draft, onChange, error }: CostLinesProps) {
         const nameError = place < 0 ? undefined : fieldError(error, namePath);
         const amountError = place < 0 ? undefined : fieldError(error, amountPath);
         return (
-          <div key={index} className="grid grid-cols-[minmax(0,1fr)_6.5rem_auto] items-start gap-2">
-            <TextInput
-              id={place < 0 ? undefined : fieldIdOf(namePath)}
-              aria-label={texts.costName(index + 1)}
-              aria-invalid={nameError ? true : undefined}
-              aria-describedby={nameError ? `cost-${index}-error` : undefined}
-              value={cost.label}
-              onChange={(event) => change(index, { label: event.target.value })}
-            />
-            <NumberInput
-              id={place < 0 ? undefined : fieldIdOf(amountPath)}
-              aria-label={texts.costAmount[typedIn](index + 1)}
-              aria-invalid={amountError ? true : undefined}
-              aria-describedby={amountError ? `cost-${index}-error` : undefined}
-              value={cost.amount}
-              onChange={(event) => change(index, { amount: event.target.value })}
-            />
+          <div
+            key={index}
+            className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-2 border-t border-rule pt-3 pb-1"
+          >
+            <div className="col-span-2">
+              <TextInput
+                id={place < 0 ? undefined : fieldIdOf(namePath)}
+                aria-label={texts.costName(index + 1)}
+                aria-invalid={nameError ? true : undefined}
+                aria-describedby={nameError ? `cost-${index}-error` : undefined}
+                value={cost.label}
+                onChange={(event) => change(index, { label: event.target.value })}
+              />
+            </div>
+            <label className="flex items-center gap-3 text-15">
+              <span className="shrink-0">{texts.amountHead[typedIn]}</span>
+              <NumberInput
+                id={place < 0 ? undefined : fieldIdOf(amountPath)}
+                aria-label={texts.costAmount[typedIn](index + 1)}
+                aria-invalid={amountError ? true : undefined}
+                aria-describedby={amountError ? `cost-${index}-error` : undefined}
+                value={cost.amount}
+                onChange={(event) => change(index, { amount: event.target.value })}
+              />
+            </label>
             <Button
               look="quiet"
               aria-label={texts.removeCostNamed(cost.label || texts.costName(index + 1))}
@@ -61,7 +68,7 @@ export function CostLines({ draft, onChange, error }: CostLinesProps) {
             >
               {texts.removeCost}
             </Button>
-            <div className="col-span-3">
+            <div className="col-span-2">
               <FieldMessage id={`cost-${index}-error`} error={nameError ?? amountError} />
             </div>
           </div>

@@ -30,19 +30,21 @@ export function Decide({ org, planting, zone, maySign, mayWrite }: DecideProps) 
   const { basis, basisHash, decisions } = replant;
   const signed = decisions.find((each) => (each.zone?.id ?? null) === zone);
   const hasChanged = signed !== undefined && signed.basisHash !== basisHash;
-  const finding = <Finding basis={basis} units={units} countHref={paths.count(org, planting)} />;
+  const finding = { basis, units, countHref: paths.count(org, planting) };
   return (
     <div className="flex flex-col gap-6">
       <Scopes org={org} planting={planting} zone={zone} replant={replant} />
       <div className="grid grid-cols-1 gap-x-16 lg:grid-cols-[minmax(0,1fr)_24rem]">
         <div className="min-w-0">
-          {signed ? <SignedHead decision={signed} current={basis} hasChanged={hasChanged} units={units} /> : finding}
+          {signed ? <SignedHead decision={signed} current={basis} hasChanged={hasChanged} units={units} /> : <Finding {...finding} />}
           {signed && hasChanged ? (
             <>
               <Disclosure label={decisionTexts.restedOn}>
                 <FrozenDecision decision={signed} units={units} />
               </Disclosure>
-              <Section title={decisionTexts.now}>{finding}</Section>
+              <Section title={decisionTexts.now}>
+                <Finding {...finding} second />
+              </Section>
             </>
           ) : null}
           <Evidence basis={basis} units={units} />

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { PageHead } from '@/components/shell/page-head';
 import { fieldIdOf } from '@/components/form/problem-summary';
 import { LinkButton } from '@/components/ui/link-button';
@@ -10,31 +11,47 @@ import { replantTexts } from '@/lib/texts/replant-texts';
 import { figurePath } from './figure-path';
 import { FindingSentences } from './finding-sentences';
 
-type FindingProps = { basis: ReplantBasis; units: UnitSystem; countHref: string };
+type FindingProps = {
+  basis: ReplantBasis;
+  units: UnitSystem;
+  countHref: string;
+  /** Below a signed decision, which is what such a page opens with. */
+  second?: boolean;
+};
 
 /** What the page opens with: the answer in a sentence, or what is still needed for one. */
-export function Finding({ basis, units, countHref }: FindingProps) {
+export function Finding({ second = false, ...props }: FindingProps) {
+  const { title, sub, actions } = findingParts(props);
+  if (!second) return <PageHead title={title} sub={sub} {...(actions ? { actions } : {})} />;
+  return (
+    <div className="flex max-w-reading flex-col gap-3 pb-4">
+      <h3 className="text-21">{title}</h3>
+      {sub}
+      {actions}
+    </div>
+  );
+}
+
+function findingParts({ basis, units, countHref }: Omit<FindingProps, 'second'>): { title: string; sub: ReactNode; actions?: ReactNode } {
   if (basis.sentences) {
     const sentences = basis.sentences[units];
-    return <PageHead title={sentences.first} sub={<FindingSentences sentences={sentences} />} />;
+    return { title: sentences.first, sub: <FindingSentences sentences={sentences} /> };
   }
   const gaps = basis.answer.kind === 'insufficient' ? basis.answer.gaps : [];
   const isOtherCrop = gaps.some(({ reason }) => reason === 'crop-without-table');
   const wantsCounts = gaps.some(({ reason }) => ['no-row-samples', 'zone-not-counted', 'rest-not-counted'].includes(reason));
-  return (
-    <PageHead
-      title={isOtherCrop ? replantTexts.noAnswerForCrop : replantTexts.noAnswer}
-      sub={
-        <div className="flex flex-col gap-3">
-          {gaps.map((gap) => (
-            <Gap key={gap.reason} gap={gap} units={units} basis={basis} />
-          ))}
-          {basis.stand ? <p>{standSentence(basis.stand, units)}</p> : null}
-        </div>
-      }
-      {...(wantsCounts ? { actions: <LinkButton href={countHref}>{replantTexts.toCounts}</LinkButton> } : {})}
-    />
-  );
+  return {
+    title: isOtherCrop ? replantTexts.noAnswerForCrop : replantTexts.noAnswer,
+    sub: (
+      <div className="flex flex-col gap-3">
+        {gaps.map((gap) => (
+          <Gap key={gap.reason} gap={gap} units={units} basis={basis} />
+        ))}
+        {basis.stand ? <p>{standSentence(basis.stand, units)}</p> : null}
+      </div>
+    ),
+    ...(wantsCounts ? { actions: <LinkButton href={countHref}>{replantTexts.toCounts}</LinkButton> } : {}),
+  };
 }
 
 function Gap({ gap, units, basis }: { gap: ReplantGap; units: UnitSystem; basis: ReplantBasis }) {

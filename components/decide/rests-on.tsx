@@ -6,6 +6,7 @@ import { unitName } from '@/lib/format/unit-name';
 import type { ReplantBasis } from '@/lib/schemas/replant';
 import type { UnitSystem } from '@/lib/schemas/vocabulary';
 import { replantTexts } from '@/lib/texts/replant-texts';
+import { formulaName } from './formula-name';
 import { TableOrigin } from './table-origin';
 
 type RestsOnProps = { basis: ReplantBasis; units: UnitSystem; today: string; uncountedLabels?: readonly string[] };
@@ -14,7 +15,7 @@ type RestsOnProps = { basis: ReplantBasis; units: UnitSystem; today: string; unc
 export function RestsOn({ basis, units, today, uncountedLabels = [] }: RestsOnProps) {
   const texts = replantTexts.rests;
   const draws = basis.answer.kind === 'value' ? basis.answer.overInterval?.draws : undefined;
-  const versions = Object.entries(basis.versions).map(([id, version]) => `${id} ${version}`);
+  const versions = Object.entries(basis.versions).map(([id, version]) => `${formulaName(id)} (${version})`);
   return (
     <>
       <TableOrigin basis={basis} today={today} />

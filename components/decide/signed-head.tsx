@@ -23,7 +23,7 @@ export function SignedHead({ decision, current, hasChanged, units }: SignedHeadP
           {hasChanged ? (
             <div className="border-l-6 border-flag pl-4">
               <p>{texts.changed}</p>
-              <ul className="text-15">
+              <ul className="flex list-disc flex-col gap-1 pl-5 pt-2 text-15">
                 {basisChanges(basis, current, units).map((line) => (
                   <li key={line}>{line}</li>
                 ))}

@@ -18,7 +18,7 @@ export const replantTexts = {
   atLeast: (amount: string) => `at least ${amount}`,
   atMost: (amount: string) => `at most ${amount}`,
   between: (lower: string, upper: string) => `${lower} to ${upper}`,
-  notInIt: 'Only the count is drawn at random in that. The price, the yield table and the second stand are not in it: they are taken as typed and as printed, and each can be off by more than the count.',
+  notInIt: 'The price, the yield table and the second stand are not in that: they are taken as typed and as printed, and each can be off by more than the count.',
   notInItWithoutCount: 'The price, the yield table and the second stand are taken as typed and as printed; each can be off by more than the count.',
   countingCanStop: 'No stand inside that interval turns the answer, so counting can stop.',
   countingCouldTurn: 'Another stand inside that interval would turn the answer, so more row samples are worth their time.',
@@ -59,8 +59,8 @@ export const replantTexts = {
 
   bars: {
     title: 'What keeping and replanting make',
-    keep: (stand: string) => `Keep, ${stand}`,
-    replant: (day: string, stand: string) => `Replant ${day}, ${stand}`,
+    keep: (stand: string) => `Keep, ${stand} plants`,
+    replant: (day: string, stand: string) => `Replant ${day}, ${stand} plants`,
     sample: (rows: string) => `Keeping rests on ${rows}`,
     uncertainty: 'The line on a bar runs from the low to the high end: of the count for keeping, of a poor and a good second stand for replanting',
     bounded: 'A dashed bar is at most that long: the table ends before it',
@@ -81,7 +81,7 @@ export const replantTexts = {
     unevenLoss: 'Less for unevenness',
     poorChance: 'Chance of a poor second stand',
     poorYield: 'which then yields, of full',
-    ofFullYield: 'of the yield at full stand and best date',
+    ofFullYield: 'of the yield at full stand',
     keepYield: 'Keeping makes',
     replantYield: 'Replanting makes',
     yieldChange: (more: boolean, bushels: string, price: string) => `${bushels} ${more ? 'more' : 'less'}, at ${price}`,
@@ -96,6 +96,8 @@ export const replantTexts = {
 
   inputs: {
     planted: 'Planted',
+    stand: 'The stand',
+    interval: 'Its 95 % interval',
     readFor: 'Stand it is read for',
     reading: 'How it is read',
     printed: 'printed in the table',
@@ -118,6 +120,10 @@ export const replantTexts = {
   breakEven: {
     label: 'Break-even stand',
     about: (stand: string) => `about ${stand}`,
+    thisStand: (stand: string) => `this stand, ${stand}`,
+    turnsAt: (stand: string) => `break-even, ${stand}`,
+    scaleNote: (unit: string, hasInterval: boolean) =>
+      `In ${unit}.${hasInterval ? ' The line above the tape is the count’s 95 % interval.' : ''} Hatched: replanting earns more; solid: keeping.`,
     exact: 'There keeping and replanting earn the same; above it keeping earns more.',
     bound: 'There keeping and replanting earn the same. It is a bound because a date lies beyond the table.',
     belowTable: (stand: string) => `Keeping earns more at every stand of the table, down to ${stand}.`,
@@ -140,6 +146,6 @@ export const replantTexts = {
     seen: 'Last seen',
     noZone: 'outside the zones',
     draws: (draws: string, seed: string) => `${draws} draws from seed ${seed}.`,
-    formulas: (versions: string) => `Formulas and their versions: ${versions}.`,
+    formulas: (versions: string) => `Formulas, with their versions: ${versions}.`,
   },
 } as const;

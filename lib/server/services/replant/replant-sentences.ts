@@ -3,10 +3,10 @@ import type { Replant } from '@/lib/agronomy/replant';
 import { replantSentence, type ReplantWording } from '@/lib/agronomy/replant-sentence';
 import { insufficient, value } from '@/lib/agronomy/outcome';
 import { areaText } from '@/lib/format/area-text';
+import { drawShareText } from '@/lib/format/draw-share-text';
 import { fieldMoneyText } from '@/lib/format/field-money-text';
 import { intervalText } from '@/lib/format/interval-text';
 import { moneyPerAreaText } from '@/lib/format/money-per-area-text';
-import { percentText } from '@/lib/format/percent-text';
 import { plantsPerAreaText } from '@/lib/format/plants-per-area-text';
 import { unitName } from '@/lib/format/unit-name';
 import type { ReplantBasis, ReplantSentencesShown, ReplantValue } from '@/lib/schemas/replant';
@@ -40,7 +40,7 @@ function wordingIn(units: UnitSystem): ReplantWording {
     dollarsPerAcre: (dollars) => perArea(dollars, units),
     standRange: (lower, upper) => intervalText(lower, upper, stand, unitName('plants-per-area', units)),
     stand: (plantsPerAcre) => plantsPerAreaText(plantsPerAcre, units, { nearest: 100 }),
-    share: (share) => percentText(share),
+    share: drawShareText,
   };
 }
 
