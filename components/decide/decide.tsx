@@ -1,6 +1,7 @@
 'use client';
 
 import { useSuspenseQuery } from '@tanstack/react-query';
+import { useRef } from 'react';
 import { Disclosure } from '@/components/ui/disclosure';
 import { LinkTabs } from '@/components/ui/link-tabs';
 import { Section } from '@/components/ui/section';
@@ -26,16 +27,22 @@ type DecideProps = { org: string; planting: string; zone: string | null; maySign
 /** Keep or replant: the sentence, its evidence, the cautions and the signature; beside them the grower's own figures. */
 export function Decide({ org, planting, zone, maySign, mayWrite }: DecideProps) {
   const { units, today } = useWho();
+  const answer = useRef<HTMLDivElement>(null);
   const { data: replant } = useSuspenseQuery(replantQuery(org, planting, zone));
   const { basis, basisHash, decisions } = replant;
   const signed = decisions.find((each) => (each.zone?.id ?? null) === zone);
   const hasChanged = signed !== undefined && signed.basisHash !== basisHash;
+  // What was pressed stands far below the sentence that it changed.
+  const showAnswer = () => {
+    answer.current?.focus({ preventScroll: true });
+    answer.current?.scrollIntoView();
+  };
   const finding = { basis, units, countHref: paths.count(org, planting) };
   return (
     <div className="flex flex-col gap-6">
       <Scopes org={org} planting={planting} zone={zone} replant={replant} />
       <div className="grid grid-cols-1 gap-x-16 lg:grid-cols-[minmax(0,1fr)_24rem]">
-        <div className="min-w-0">
+        <div ref={answer} tabIndex={-1} className="min-w-0 outline-none">
           {signed ? <SignedHead decision={signed} current={basis} hasChanged={hasChanged} units={units} /> : <Finding {...finding} />}
           {signed && hasChanged ? (
             <>
@@ -50,14 +57,14 @@ export function Decide({ org, planting, zone, maySign, mayWrite }: DecideProps) 
           <Evidence basis={basis} units={units} />
           {basis.answer.kind === 'value' ? (
             <Section title={signed ? decisionTexts.decideAnew : decisionTexts.title} {...(signed ? { lead: decisionTexts.decideAnewHelp } : {})}>
-              <SignButtons replant={replant} maySign={maySign} />
+              <SignButtons replant={replant} maySign={maySign} onSigned={showAnswer} />
             </Section>
           ) : null}
         </div>
         <div className="min-w-0 lg:col-start-2 lg:row-span-2 lg:row-start-1">
           {mayWrite && basis.crop === 'corn' ? (
             <Section title={replantSheetTexts.title} lead={<FormLead replant={replant} />}>
-              <ReplantForm key={zone ?? 'field'} replant={replant} />
+              <ReplantForm key={zone ?? 'field'} replant={replant} onSaved={showAnswer} />
             </Section>
           ) : null}
         </div>

@@ -20,10 +20,10 @@ import { FormPart } from './form-part';
 import { replantDraftSchema, sheetInputs, standingDraft, type ReplantDraft } from './replant-draft';
 import { TypedField } from './typed-field';
 
-type ReplantFormProps = { replant: ReplantAnswer };
+type ReplantFormProps = { replant: ReplantAnswer; onSaved: () => void };
 
 /** The grower's own figures. Saved, they are appended as a new version, and the page answers from them at once. */
-export function ReplantForm({ replant }: ReplantFormProps) {
+export function ReplantForm({ replant, onSaved }: ReplantFormProps) {
   const { units, today } = useWho();
   const texts = replantSheetTexts;
   const { basis } = replant;
@@ -36,6 +36,7 @@ export function ReplantForm({ replant }: ReplantFormProps) {
     onApplied: () => {
       keep(() => undefined);
       setSheetId(v7());
+      onSaved();
     },
   });
   const draft = kept ?? standing;

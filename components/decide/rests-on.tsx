@@ -18,7 +18,7 @@ export function RestsOn({ basis, units, today, uncountedLabels = [] }: RestsOnPr
   const versions = Object.entries(basis.versions).map(([id, version]) => `${formulaName(id)} (${version})`);
   return (
     <>
-      <TableOrigin basis={basis} today={today} />
+      <TableOrigin basis={basis} units={units} today={today} />
       <DataTable
         caption={texts.counts}
         captionShown

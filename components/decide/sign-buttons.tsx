@@ -9,10 +9,10 @@ import { decisionChoices, type DecisionChoice } from '@/lib/schemas/vocabulary';
 import { decisionTexts } from '@/lib/texts/decision-texts';
 import { SignDialog } from './sign-dialog';
 
-type SignButtonsProps = { replant: ReplantAnswer; maySign: boolean };
+type SignButtonsProps = { replant: ReplantAnswer; maySign: boolean; onSigned: () => void };
 
 /** The cautions, and right below them the two presses they are about. */
-export function SignButtons({ replant, maySign }: SignButtonsProps) {
+export function SignButtons({ replant, maySign, onSigned }: SignButtonsProps) {
   const [pressed, setPressed] = useState<{ choice: DecisionChoice; read: ReplantAnswer }>();
   const texts = decisionTexts;
   const { answer } = replant.basis;
@@ -45,7 +45,17 @@ export function SignButtons({ replant, maySign }: SignButtonsProps) {
           <p>{texts.awaitsHelp}</p>
         </div>
       )}
-      {pressed ? <SignDialog {...pressed} current={replant} onClose={() => setPressed(undefined)} /> : null}
+      {pressed ? (
+        <SignDialog
+          {...pressed}
+          current={replant}
+          onClose={() => setPressed(undefined)}
+          onSigned={() => {
+            setPressed(undefined);
+            onSigned();
+          }}
+        />
+      ) : null}
     </div>
   );
 }

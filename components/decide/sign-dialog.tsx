@@ -22,18 +22,19 @@ type SignDialogProps = {
   /** What stands now. */
   current: ReplantAnswer;
   onClose: () => void;
+  onSigned: () => void;
 };
 
 const formId = 'sign-decision';
 
 /** The name is typed and the decision signed. If the numbers moved meanwhile nothing is signed, and it says what moved. */
-export function SignDialog({ choice, read, current, onClose }: SignDialogProps) {
+export function SignDialog({ choice, read, current, onClose, onSigned }: SignDialogProps) {
   const { units } = useWho();
   const queries = useQueryClient();
   const [name, setName] = useState('');
   const [attempt, setAttempt] = useState(0);
   const [decisionId] = useState(() => v7());
-  const operation = useOperation({ onApplied: onClose });
+  const operation = useOperation({ onApplied: onSigned });
   const { error } = operation;
   const texts = decisionTexts;
   const { basis, basisHash } = read;
@@ -74,7 +75,9 @@ export function SignDialog({ choice, read, current, onClose }: SignDialogProps) 
             sign();
           }}
         >
-          <p className="text-18 font-bold">{basis.sentences?.[units].first}</p>
+          <p>
+            {texts.answerRead} <strong>{basis.sentences?.[units].first}</strong>
+          </p>
           {isAgainst ? <p className="border-l-6 border-flag pl-4">{texts.againstAnswer}</p> : null}
           {basis.zone ? <p>{texts.otherPart(basis.zone.name)}</p> : null}
           <p>{texts.freezes}</p>

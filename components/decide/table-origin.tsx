@@ -1,5 +1,8 @@
 import { countText } from '@/lib/format/count-text';
+import { plantsPerAreaText } from '@/lib/format/plants-per-area-text';
+import { yieldText } from '@/lib/format/yield-text';
 import type { ReplantBasis } from '@/lib/schemas/replant';
+import type { UnitSystem } from '@/lib/schemas/vocabulary';
 import { replantTexts } from '@/lib/texts/replant-texts';
 
 const publishedIn = 1994;
@@ -7,8 +10,10 @@ const publishedIn = 1994;
 const lowYieldBushels = 100;
 const respondsUpTo = 24_000;
 
+type TableOriginProps = { basis: ReplantBasis; units: UnitSystem; today: string };
+
 /** How old the yield table is and where it comes from, with what it does not know of this field. */
-export function TableOrigin({ basis, today }: { basis: ReplantBasis; today: string }) {
+export function TableOrigin({ basis, units, today }: TableOriginProps) {
   const texts = replantTexts.rests;
   const { answer } = basis;
   const age = countText(Number(today.slice(0, 4)) - publishedIn, 'year');
@@ -20,7 +25,7 @@ export function TableOrigin({ basis, today }: { basis: ReplantBasis; today: stri
       <h3 className="text-15">{texts.table}</h3>
       <p>{texts.tableOrigin(age)}</p>
       {isExtrapolated ? <p>{texts.tableExtrapolated}</p> : null}
-      {isLow ? <p>{texts.lowYield}</p> : null}
+      {isLow ? <p>{texts.lowYield(yieldText(lowYieldBushels, units), plantsPerAreaText(respondsUpTo, units, { nearest: 100 }))}</p> : null}
     </div>
   );
 }

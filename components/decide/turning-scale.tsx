@@ -35,7 +35,8 @@ export function TurningScale({ breakEvenPlantsPerAcre, breakEvenText, stand, sta
   const share = x(shown(breakEvenPlantsPerAcre));
   const standShare = x(shown(stand.plantsPerAcre));
   const marks = x.ticks(units === 'us' ? 14 : 16);
-  const numerals = x.ticks(6).filter((each) => x(each) > 3 && x(each) < 97);
+  // No numeral under the break-even line, nor cut off at an end.
+  const numerals = x.ticks(6).filter((each) => x(each) > 3 && x(each) < 97 && Math.abs(x(each) - share) > 3.5);
   return (
     <svg aria-hidden="true" width="100%" height={height} className="block overflow-visible">
       <text x={`${standShare.toFixed(2)}%`} y={14} textAnchor={anchorAt(standShare)} className="fill-ink text-13 font-bold">

@@ -23,6 +23,7 @@ export const decisionTexts = {
   dialogTitle: { keep: 'Keep this stand', replant: 'Replant' } satisfies Record<DecisionChoice, string>,
   againstAnswer: 'That is not what the figures say. It is yours to decide; the answer you read is kept beside your signature.',
   otherPart: (part: string) => `This is about ${part}.`,
+  answerRead: 'The answer you read:',
   freezes: 'Your signature keeps the figures, counts and sentences of this page as they stand. A later change of mind is a new decision.',
   name: 'Your name',
   nameHint: 'Type it to sign.',

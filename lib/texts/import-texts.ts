@@ -42,6 +42,7 @@ export const importTexts = {
   example: 'Download an example',
   chooseFile: 'The file',
   chosen: (name: string) => `Chosen: ${name}`,
+  tooLarge: (name: string) => `${name} is larger than 2,000 lines can be. Split it, or save the right sheet.`,
   orPaste: 'Or paste its text',
   pastedName: 'pasted text',
   understood: 'What was understood',

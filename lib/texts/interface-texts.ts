@@ -50,6 +50,7 @@ export const interfaceTexts = {
     daysAfterPlanting: 'days after planting',
     dayAfterPlanting: 'Day after planting',
     setting: 'Setting',
+    block: 'Block',
     choice: 'Choice',
     range: 'Range',
     difference: 'Difference',

@@ -35,7 +35,7 @@ export const replantSheetTexts = {
   insuranceHint: 'What your agent names for your county and year. A part of a field is often paid only from a certain size on: ask.',
   present: 'The stand that is there',
   gapLoss: 'Loss from gaps, %',
-  gapLossHint: 'Iowa 1996 to 2006: small gaps of 1 to 3 ft 2 %, many of 4 to 6 ft 4 to 6 %. 0 leaves it out.',
+  gapLossHint: 'Iowa 1996 to 2006: small gaps of 1 to 3 ft (0.3 to 0.9 m) 2 %, many of 4 to 6 ft (1.2 to 1.8 m) 4 to 6 %. 0 leaves it out.',
   unevenLoss: 'Loss from late plants, %',
   unevenLossHint: 'See the penalties under Scores. 0 leaves it out.',
   save: 'Save and answer',

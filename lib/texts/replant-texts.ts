@@ -137,7 +137,7 @@ export const replantTexts = {
     tableOrigin: (age: string) =>
       `Nafziger 1994, Journal of Production Agriculture 7:59, as printed by Purdue: ${age} old, averages over hybrids of the 1980s and 1990s in the central Corn Belt. Published tables of this kind differ by 5 to 10 points at one and the same stand and date.`,
     tableExtrapolated: 'Its rows after 25 May were extrapolated by its author.',
-    lowYield: 'Fields under about 100 bu/ac do not respond to stands above about 24,000 plants per acre; the table does not know that.',
+    lowYield: (yields: string, stand: string) => `Fields under about ${yields} do not respond to stands above about ${stand}; the table does not know that.`,
     counts: 'The counts',
     uncounted: (labels: string) => `Not counted yet, so not in it: ${labels}.`,
     noRows: 'No row sample is counted yet.',

@@ -1,0 +1,23 @@
+/** The words of fields. */
+export const fieldTexts = {
+  name: 'Field name',
+  area: 'Area',
+  areaHint: 'Needed for dollars for the whole field; dollars per acre come without it.',
+  add: 'Add field',
+  addTitle: 'Add a field',
+  change: 'Change the field',
+  save: 'Save field',
+  none: 'No field yet',
+  noneHint: 'Add the first field of this farm; its plantings come next.',
+  remove: (name: string) => `Remove the field ${name}`,
+  removeExplanation: 'The field goes from the lists. A field with plantings stays.',
+  fieldsTitle: 'Fields',
+  areaMissing: 'area not given',
+  noPlantingYet: 'no planting yet',
+  newest: (crop: string, day: string) => `${crop}, planted ${day}`,
+  plantingsTitle: 'Plantings',
+  noPlanting: 'No planting yet',
+  noPlantingHint: 'Add the planting with its date, row spacing and seeding rate. Row samples and a trial are laid out in it afterwards.',
+  addPlanting: 'Add a planting',
+  openPlan: 'Plan',
+} as const;
