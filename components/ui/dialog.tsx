@@ -25,6 +25,8 @@ function OpenDialog({ onClose, title, children, actions }: DialogContent) {
   useEffect(() => {
     const element = dialog.current;
     element?.showModal();
+    // The first thing that takes the focus may be a button at the end; reading begins at the top.
+    element?.scrollTo(0, 0);
     return () => element?.close();
   }, []);
   return (
