@@ -10,5 +10,5 @@ export function countingHeadline(rows: readonly CountRow[]): string {
   if (counted.length === 0) return countTexts.nothingCounted(all);
   if (ended.length === rows.length) return countTexts.allEnded(all);
   if (ended.length === 0) return countTexts.noneEnded(all);
-  return countTexts.finding(countText(ended.length, 'row sample'), String(rows.length - ended.length));
+  return countTexts.finding(String(ended.length), all);
 }

@@ -9,7 +9,7 @@ import { paths } from '@/lib/paths/paths';
 import { countTexts } from '@/lib/texts/count-texts';
 import { CountsSection } from './counts-section';
 import { CoverSection } from './cover-section';
-import { rowPlaceSentence } from './row-place-text';
+import { rowPlaceText } from './row-place-text';
 import type { RowSheetData } from './row-sheet-types';
 
 /** One row sample: what stands of it, and the paper sheet to type in. */
@@ -18,13 +18,15 @@ export function RowSheet({ org, data }: { org: string; data: RowSheetData }) {
   const last = counts.findLast((count) => count.used);
   const title = last
     ? countTexts.sheetTitle(row.label, countText(last.plantsUp, 'plant'), String(daysAfter(plantedOn, last.visitedOn)))
-    : countTexts.sheetTitleNone(row.label);
+    : data.findings.tapePlants === null
+      ? countTexts.sheetTitleNone(row.label)
+      : countTexts.sheetTitleTape(row.label, countText(data.findings.tapePlants, 'plant'));
   return (
     <div data-place="field">
       <PageHead
         kicker={<Link className="inline-flex min-h-press items-center text-15 underline underline-offset-4" href={paths.count(org, plantingId)}>{countTexts.allRows}</Link>}
         title={title}
-        sub={[rowPlaceSentence(row.place), countTexts.lengthAndSeeds(readingText(row.length), countText(Math.round(row.seeds), 'seed')), countingSentence(data)].join(' ')}
+        sub={[`${rowPlaceText(row.place)}.`, countTexts.lengthAndSeeds(readingText(row.length), countText(Math.round(row.seeds), 'seed')), countingSentence(data)].join(' ')}
         actions={
           <>
             {previous ? <LinkButton look="secondary" href={paths.rowSample(org, plantingId, previous.id)}>{countTexts.previous(previous.label)}</LinkButton> : null}

@@ -33,12 +33,12 @@ function AskedQuestions({ questions, onConfirm, pending = false, yes = formTexts
   return (
     <div ref={box} tabIndex={-1} role="alert" className="flex max-w-reading flex-col gap-3 border-l-8 border-flag py-2 pl-4 outline-none">
       <p>{isOne ? formTexts.askedLeadOne : formTexts.askedLead}</p>
-      {isOne ? <p className="text-18 font-bold whitespace-pre-line">{only.sentence}</p> : null}
+      {isOne ? <Asked sentence={only.sentence} look="text-18 font-bold" /> : null}
       {isOne ? null : (
         <ul className="flex flex-col gap-3">
           {questions.map((question) => (
             <li key={keyOf(question)} className="border-t border-rule pt-2">
-              <p className="font-bold whitespace-pre-line">{question.sentence}</p>
+              <Asked sentence={question.sentence} look="font-bold" />
               <Checkbox
                 label={yes}
                 checked={answered.includes(keyOf(question))}
@@ -60,5 +60,22 @@ function AskedQuestions({ questions, onConfirm, pending = false, yes = formTexts
         </Button>
       </div>
     </div>
+  );
+}
+
+/** What is asked, and below it, line by line, what it is asked about where that is more than one thing. */
+function Asked({ sentence, look }: { sentence: string; look: string }) {
+  const [asked, ...about] = sentence.split('\n');
+  return (
+    <>
+      <p className={look}>{asked}</p>
+      {about.length > 0 ? (
+        <ul>
+          {about.map((line) => (
+            <li key={line}>{line}</li>
+          ))}
+        </ul>
+      ) : null}
+    </>
   );
 }

@@ -15,6 +15,7 @@ import { useAskedOperation } from '@/lib/client/use-asked-operation';
 import { useWho } from '@/lib/client/who';
 import { countText } from '@/lib/format/count-text';
 import { paths } from '@/lib/paths/paths';
+import { importCharactersMost } from '@/lib/schemas/observation';
 import { importKinds, type ImportKind } from '@/lib/schemas/vocabulary';
 import { importTexts } from '@/lib/texts/import-texts';
 import { ImportColumns } from './import-columns';
@@ -34,6 +35,7 @@ export function ImportForm({ plantingId, labels, exampleDays }: ImportFormProps)
   const [kind, setKind] = useState<ImportKind>('counts');
   const [chosen, setChosen] = useState<Chosen>(nothing);
   const [taken, setTaken] = useState<string>();
+  const [tooLarge, setTooLarge] = useState<string>();
   const operation = useAskedOperation({
     onApplied: (answer) => {
       setTaken(takenText(kind, answer.result));
@@ -43,10 +45,12 @@ export function ImportForm({ plantingId, labels, exampleDays }: ImportFormProps)
   const reading = useMemo(() => (chosen.text.trim() === '' ? undefined : readImport(kind, chosen.text)), [kind, chosen.text]);
   const choose = (name: string, text: string) => {
     setTaken(undefined);
+    setTooLarge(undefined);
     operation.reset();
     // Another text is another import; the same one sent again after silence is the same one.
     setChosen({ id: v7(), name, text });
   };
+  const isAsked = operation.error?.problem.code === 'needs-confirmation';
   const problems = problemsOf(reading, labels, operation.error?.problem.fields.map((field) => field.message) ?? []);
   return (
     <form
@@ -69,7 +73,7 @@ export function ImportForm({ plantingId, labels, exampleDays }: ImportFormProps)
               choose(chosen.name, chosen.text);
             }}
           />
-          <Field label={importTexts.chooseFile} hint={chosen.text !== '' && chosen.name !== importTexts.pastedName ? importTexts.chosen(chosen.name) : undefined}>
+          <Field label={importTexts.chooseFile} error={tooLarge === undefined ? undefined : importTexts.tooLarge(tooLarge)} hint={chosen.text !== '' && chosen.name !== importTexts.pastedName ? importTexts.chosen(chosen.name) : undefined}>
             {(wiring) => (
               <input
                 {...wiring}
@@ -80,7 +84,9 @@ export function ImportForm({ plantingId, labels, exampleDays }: ImportFormProps)
                   const input = event.target;
                   const file = input.files?.[0];
                   if (!file) return;
-                  choose(file.name, await file.text());
+                  // What is far too long is not read into the page at all.
+                  if (file.size > importCharactersMost) setTooLarge(file.name);
+                  else choose(file.name, await file.text());
                   // So that the same file, mended, can be chosen again.
                   input.value = '';
                 }}
@@ -98,14 +104,14 @@ export function ImportForm({ plantingId, labels, exampleDays }: ImportFormProps)
       {reading ? <ImportPreview reading={reading} /> : null}
       <ImportProblems problems={problems} />
       {operation.error && problems.length === 0 ? (
-        operation.error.problem.code === 'needs-confirmation' ? (
+        isAsked ? (
           <QuestionList questions={operation.error.problem.questions} onConfirm={operation.confirm} pending={operation.isPending} yes={importTexts.yes} />
         ) : (
           <ProblemSummary error={operation.error} attempt={operation.attempt} />
         )
       ) : null}
       {operation.isPending && reading ? <Progress label={importTexts.working} share={null} text={importTexts.workingText(countText(linesOf(reading), 'line'))} /> : null}
-      {reading && problems.length === 0 ? (
+      {reading && problems.length === 0 && !isAsked ? (
         <div>
           <Button type="submit" pending={operation.isPending} pendingText={importTexts.working}>
             {importTexts.take(whatOf(reading))}

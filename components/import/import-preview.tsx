@@ -6,6 +6,7 @@ import { importTexts } from '@/lib/texts/import-texts';
 import type { ImportReading } from './import-reading';
 
 const linesShown = 10;
+const unbroken = (text: string) => text.replaceAll(' ', '\u00A0');
 
 /** What was understood of a file: how much, where and when, and its first lines. */
 export function ImportPreview({ reading }: { reading: ImportReading }) {
@@ -33,7 +34,7 @@ function CountLines({ lines }: { lines: Extract<ImportReading['read'], { kind: '
   const counted = shown[0]?.countedAs === 'new' ? importTexts.newSince : importTexts.soFar;
   return (
     <DataTable
-      caption={importTexts.firstLines(countText(shown.length, 'count'))}
+      caption={shown.length < lines.length ? importTexts.firstLines(countText(shown.length, 'count')) : countText(shown.length, 'count')}
       captionShown
       emptyText=""
       columns={[
@@ -48,7 +49,7 @@ function CountLines({ lines }: { lines: Extract<ImportReading['read'], { kind: '
         id: String(line.line),
         cells: {
           row: { text: line.rowSample },
-          date: { text: dateText(line.date) },
+          date: { text: unbroken(dateText(line.date)) },
           time: { text: line.time ?? '' },
           plants: { text: String(line.plants) },
           doubtful: { text: String(line.doubtful) },
@@ -63,7 +64,7 @@ function SheetLines({ sheets }: { sheets: Extract<ImportReading['read'], { kind:
   const shown = sheets.slice(0, linesShown);
   return (
     <DataTable
-      caption={importTexts.firstLines(countText(shown.length, 'tape sheet'))}
+      caption={shown.length < sheets.length ? importTexts.firstLines(countText(shown.length, 'tape sheet')) : countText(shown.length, 'tape sheet')}
       captionShown
       emptyText=""
       columns={[
@@ -77,7 +78,7 @@ function SheetLines({ sheets }: { sheets: Extract<ImportReading['read'], { kind:
         id: String(sheet.line),
         cells: {
           row: { text: sheet.rowSample },
-          date: { text: dateText(sheet.date) },
+          date: { text: unbroken(dateText(sheet.date)) },
           tape: { text: sheet.tapeUnit },
           places: { text: String(sheet.places.length) },
           readings: { text: sheet.places.slice(0, linesShown).map((place) => place.typed).join(' · ') },

@@ -39,6 +39,7 @@ export const countTexts = {
   rowEnded: 'Counting has ended: nothing new at the last two visits.',
   rowStillComing: 'Plants may still come: count until two visits have found nothing new.',
   sheetTitle: (label: string, up: string, day: string) => `${label}: ${up} up on day ${day}`,
+  sheetTitleTape: (label: string, plants: string) => `${label}: ${plants} on the tape, not counted`,
   sheetTitleNone: (label: string) => `${label}: not counted yet`,
   previous: (label: string) => `Row before: ${label}`,
   next: (label: string) => `Next row: ${label}`,

@@ -29,7 +29,8 @@ export function importQuestions(asked: readonly LineQuestion[]): Question[] {
     const about = `${countText(of.length, 'entry', 'entries')}, ${contentHash(of.map((each) => `${each.line} ${each.about}`)).slice(0, 40)}`;
     const [only] = of;
     if (only && of.length === 1) return { rule, about, sentence: `Line ${only.line}: ${only.sentence}` };
-    const named = of.slice(0, linesNamed).map((each) => `Line ${each.line}: ${each.sentence}`);
+    // What is asked stands above the lines once.
+    const named = of.slice(0, linesNamed).map((each) => `Line ${each.line}: ${each.sentence.replace(/ [^.]*\?$/, '')}`);
     const rest = of.length > linesNamed ? [`And ${of.length - linesNamed} more.`] : [];
     return { rule, about, sentence: [`In ${of.length} places ${askedTogether[rule] ?? 'a look is needed.'}`, ...named, ...rest].join('\n') };
   });
