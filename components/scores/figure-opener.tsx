@@ -14,10 +14,12 @@ type FigureOpenerProps = {
   subject: FigureSubject;
   /** Written instead of the whole figure, where a column head already holds its unit. */
   text?: string | undefined;
+  /** Whose figure it is, where several stand side by side. */
+  of?: string;
 };
 
 /** A figure that opens to what it was made from, its formula, its source and what it does not tell. */
-export function FigureOpener({ id, subject, text }: FigureOpenerProps) {
+export function FigureOpener({ id, subject, text, of }: FigureOpenerProps) {
   const { units } = useWho();
   const shown = shownFigure(id, subject, units);
   const pooled = subject.pooled;
@@ -25,7 +27,7 @@ export function FigureOpener({ id, subject, text }: FigureOpenerProps) {
   const note = [shown.detail, isTiming(id) || id === 'plantsPerAcre' ? taken : null].filter(Boolean).join(' ');
   return (
     <NumberSource
-      label={shown.label}
+      label={of ? `${of}: ${shown.label}` : shown.label}
       text={text ?? shown.text}
       entry={register[id]}
       inputs={figureInputs(id, subject, units)}

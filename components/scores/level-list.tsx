@@ -7,7 +7,7 @@ import { scoreTexts } from '@/lib/texts/score-texts';
 import { FigureOpener } from './figure-opener';
 import { plainFigure } from './plain-figure';
 import type { ScoredThing } from './scored-things';
-import { SeriesName } from './series-name';
+import { SeriesName } from '@/components/charts/series-name';
 import { shownFigure, withoutBound } from './shown-figure';
 
 type LevelListProps = { things: readonly ScoredThing[]; hrefOf: (id: string) => string };

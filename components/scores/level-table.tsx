@@ -13,7 +13,7 @@ import type { FigureSubject } from './figure-subject';
 import { plainFigure } from './plain-figure';
 import type { ScoredThing } from './scored-things';
 import { shownFigure } from './shown-figure';
-import { SeriesName } from './series-name';
+import { SeriesName } from '@/components/charts/series-name';
 
 type LevelTableProps = { things: readonly ScoredThing[]; caption: string; head: string; fileName: string; hrefOf: (id: string) => string };
 

@@ -1,9 +1,9 @@
 import { z } from 'zod';
 import type { ComparisonFinding } from '@/lib/agronomy/comparison-finding';
 import { drawnPlantSchema } from './drawn-plant';
-import { penaltiesSchema, standIntervalSchema } from './figures';
 import { outcomeSchema } from './outcome';
 import { plantingFactsSchema } from './planting-facts';
+import { scoredGroupSchema } from './scored-group';
 import { comparisonRules, mainFigures, rowEnds } from './vocabulary';
 
 /** The comparison of a trial's settings as it travels. */
@@ -124,8 +124,8 @@ const comparedSettingSchema = z.object({
   curve: outcomeSchema(
     z.object({ points: z.array(z.object({ days: number, plantsPerAcre: number })), plantsLost: number, countingEnded: z.boolean() }),
   ),
-  standInterval: outcomeSchema(standIntervalSchema),
-  penalties: penaltiesSchema,
+  /** All its row samples together: what the penalties and the interval of the stand are read from. */
+  scored: scoredGroupSchema,
   typicalRow: typicalRowSchema.nullable(),
   coverReadings: number,
 });

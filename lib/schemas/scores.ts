@@ -3,6 +3,7 @@ import { drawnPlantSchema } from './drawn-plant';
 import { figuresSchema, penaltiesSchema, standIntervalSchema } from './figures';
 import { outcomeSchema } from './outcome';
 import { plantingFactsSchema } from './planting-facts';
+import { scoredGroupSchema } from './scored-group';
 import { rowEnds, tapeEntryKinds, tapeUnits } from './vocabulary';
 
 /** The scores of a planting as they travel: every level at once, so that a screen shows one reading of the field. */
@@ -12,27 +13,10 @@ const number = z.number();
 export const settingBases = ['as-planted', 'as-planned', 'lost'] as const;
 export type SettingBasis = (typeof settingBases)[number];
 
-const pooledSchema = z.object({
-  definition: z.object({
-    stand: z.enum(['one-row-sample', 'row-samples-as-places', 'strips-as-places']),
-    timing: z.enum(['one-row-sample', 'one-curve', 'mean-of-strips']),
-  }),
-  rowSamples: number,
-  rowSamplesCounted: number,
-  rowSamplesWithTape: number,
-  strips: number,
-  stripsTimed: number,
-  rowSamplesOutsideTiming: number,
-});
-export type PooledFacts = z.output<typeof pooledSchema>;
-
-const groupSchema = z.object({ figures: figuresSchema, penalties: penaltiesSchema, pooled: pooledSchema });
-export type ScoredGroup = z.output<typeof groupSchema>;
-
-const scoredZoneSchema = groupSchema.extend({ zoneId: z.string().nullable(), name: z.string().nullable(), acres: number, areaShare: number });
+const scoredZoneSchema = scoredGroupSchema.extend({ zoneId: z.string().nullable(), name: z.string().nullable(), acres: number, areaShare: number });
 export type ScoredZone = z.output<typeof scoredZoneSchema>;
 
-const scoredSettingSchema = groupSchema.extend({
+const scoredSettingSchema = scoredGroupSchema.extend({
   settingId: z.string(),
   name: z.string(),
   seriesIndex: number,
@@ -40,7 +24,7 @@ const scoredSettingSchema = groupSchema.extend({
 });
 export type ScoredSetting = z.output<typeof scoredSettingSchema>;
 
-const scoredStripSchema = groupSchema.extend({
+const scoredStripSchema = scoredGroupSchema.extend({
   stripId: z.string(),
   number,
   blockNumber: number,
@@ -99,7 +83,7 @@ export const scoresSchema = z.object({
   level: z.enum(scoreLevels),
   /** How many there are at each level; a level without any is not offered. */
   things: z.record(z.enum(scoreLevels), number),
-  whole: groupSchema,
+  whole: scoredGroupSchema,
   /** How the planting's stand was taken together where zones are drawn. */
   zoneStand: z
     .object({

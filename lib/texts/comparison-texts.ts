@@ -118,7 +118,8 @@ export const comparisonTexts = {
     lead: 'Yield below an even stand by each published response. Units are each study’s own; they are not added up.',
     late: 'From late plants',
     spacing: 'From spacing',
-    cannot: (studies: string, why: string) => `${studies}: ${why}.`,
+    study: 'Study',
+    cannot: (studies: string, why: string) => `Not read here: ${studies}. ${why}`,
   },
   alsoSeen: {
     title: 'Also seen',
@@ -134,7 +135,10 @@ export const comparisonTexts = {
     first: 'Setting',
     second: 'less',
     p: 'p, adjusted',
+    interval: '95 % interval',
     told: 'Told apart',
+    notClaimed: 'not claimed',
+    methods: 'All methods',
     yes: 'yes',
     no: 'no',
     facts: {

@@ -1,10 +1,9 @@
-import { chainOutcome, mapOutcome } from '@/lib/agronomy/outcome';
-import { poolScores } from '@/lib/agronomy/pool-scores';
+import { mapOutcome } from '@/lib/agronomy/outcome';
 import type { RowSample } from '@/lib/agronomy/row-sample';
 import { rowAreaAcres } from '@/lib/agronomy/stand';
 import type { ComparedSetting } from '@/lib/schemas/comparison';
 import type { CoreSamples } from '../scores/core-samples';
-import { saidPenalties } from '../scores/said-penalties';
+import { scoredGroup } from '../scores/scored-group';
 import type { SoundSamples } from '../scores/sound-samples';
 import { trialSettings } from '../scores/trial-settings';
 import type { ComparedStrip } from './compared-strips';
@@ -15,7 +14,7 @@ export function comparedSettings(core: CoreSamples, sound: SoundSamples, strips:
   return trialSettings(core).map(({ setting, seriesIndex, isReference }) => {
     const own = strips.filter((strip) => strip.settingId === setting.id);
     const samples = own.flatMap((strip) => strip.samples);
-    const { figures, penalties } = poolScores(samples);
+    const scored = scoredGroup(samples);
     const rowSampleIds = new Set(
       core.rowSamples.filter((row) => own.some(({ strip }) => strip.id === row.stripId)).map((row) => row.id),
     );
@@ -28,13 +27,12 @@ export function comparedSettings(core: CoreSamples, sound: SoundSamples, strips:
       isReference,
       strips: own.length,
       rowSamples: samples.length,
-      curve: mapOutcome(figures.emergenceCurve, (curve) => ({
+      curve: mapOutcome(scored.figures.emergenceCurve, (curve) => ({
         points: curve.points.map(({ days, plantsUp }) => ({ days, plantsPerAcre: plantsUp / acres })),
         plantsLost: curve.plantsLost,
         countingEnded: curve.countingEnded,
       })),
-      standInterval: chainOutcome(figures.emergenceCurve, () => figures.plantsPerAcreInterval),
-      penalties: saidPenalties(penalties),
+      scored,
       typicalRow: typicalRow(core, samples, sound.scores),
       coverReadings: core.observations.residueReadings.filter((reading) => rowSampleIds.has(reading.rowSampleId)).length,
     };

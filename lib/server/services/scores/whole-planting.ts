@@ -2,7 +2,7 @@ import type { StandEstimate } from '@/lib/agronomy/inference/stand-interval';
 import { mapOutcome, type Outcome } from '@/lib/agronomy/outcome';
 import type { RowSample } from '@/lib/agronomy/row-sample';
 import { scoreFigures } from '@/lib/agronomy/score-figures';
-import type { ScoredGroup } from '@/lib/schemas/scores';
+import type { ScoredGroup } from '@/lib/schemas/scored-group';
 import { scoredGroup } from './scored-group';
 
 /**

@@ -1,5 +1,5 @@
-import { SeriesMarker } from '@/components/charts/series-marker';
-import { seriesMost, seriesStyle } from '@/components/charts/series-style';
+import { SeriesMarker } from './series-marker';
+import { seriesMost, seriesStyle } from './series-style';
 
 type SeriesNameProps = { index: number; name: string };
 
