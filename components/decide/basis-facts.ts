@@ -19,19 +19,37 @@ export type BasisFact = { id: string; label: string; text: string };
 /** What an answer rests on, as a flat list of named facts, so that two bases can be held beside each other. */
 export function basisFacts(basis: ReplantBasis, units: UnitSystem): BasisFact[] {
   const texts = replantTexts.inputs;
-  const fact = (id: string, label: string, text: string | null | undefined): BasisFact[] => (text ? [{ id, label, text }] : []);
-  const number = (plantsPerAcre: number) => plantsPerAreaText(plantsPerAcre, units, { nearest: 100, withUnit: false });
+  const fact = (id: string, label: string, text: string | null | undefined): BasisFact[] =>
+    text ? [{ id, label, text }] : [];
+  const number = (plantsPerAcre: number) =>
+    plantsPerAreaText(plantsPerAcre, units, { nearest: 100, withUnit: false });
   const unit = unitName('plants-per-area', units);
   const interval = basis.stand?.interval;
   return [
     ...fact('planted', texts.planted, dateText(basis.plantedOn)),
-    ...fact('area', replantTexts.scope(basis.zone?.name ?? replantTexts.wholeField, null), basis.acres === null ? null : areaText(basis.acres, units)),
-    ...fact('stand', texts.stand, basis.stand && `${number(basis.stand.plantsPerAcre)} ${unit}`),
-    ...fact('interval', texts.interval, interval && intervalText(interval.lower, interval.upper, number, unit)),
-    ...basis.countedRows.flatMap((row) =>
-      fact(`row ${row.rowSampleId}`, texts.row(row.label), `${plantsPerAreaText(row.plantsPerAcre, units)}, ${texts.seen(dateText(row.lastSeenOn, 'day-and-month'))}`),
+    ...fact(
+      'area',
+      replantTexts.scope(basis.zone?.name ?? replantTexts.wholeField, null),
+      basis.acres === null ? null : areaText(basis.acres, units),
     ),
-    ...fact('full-yield', texts.fullYield, basis.fullYield && yieldText(basis.fullYield.bushelsPerAcre, units)),
+    ...fact('stand', texts.stand, basis.stand && `${number(basis.stand.plantsPerAcre)} ${unit}`),
+    ...fact(
+      'interval',
+      texts.interval,
+      interval && intervalText(interval.lower, interval.upper, number, unit),
+    ),
+    ...basis.countedRows.flatMap((row) =>
+      fact(
+        `row ${row.rowSampleId}`,
+        texts.row(row.label),
+        `${plantsPerAreaText(row.plantsPerAcre, units)}, ${texts.seen(dateText(row.lastSeenOn, 'day-and-month'))}`,
+      ),
+    ),
+    ...fact(
+      'full-yield',
+      texts.fullYield,
+      basis.fullYield && yieldText(basis.fullYield.bushelsPerAcre, units),
+    ),
     ...(basis.sheet ? sheetFacts(basis.sheet.inputs) : []),
   ];
 }
@@ -41,14 +59,19 @@ function sheetFacts(inputs: NonNullable<ReplantBasis['sheet']>['inputs']): Basis
   const { typedIn } = inputs;
   const { price, costs, extraDrying, insurancePayment } = typedAmounts(inputs);
   const money = (amount: string | null) => (amount === null ? null : moneyText(amount, { decimals: 2 }));
-  const percent = (amount: number | null) => (amount === null ? null : percentText(amount / 100, { decimals: 1 }));
+  const percent = (amount: number | null) =>
+    amount === null ? null : percentText(amount / 100, { decimals: 1 });
   const facts: [string, string, string | null][] = [
     ['price', texts.price[typedIn], money(price)],
     ['replant-on', texts.replantOn, inputs.replantOn && dateText(inputs.replantOn)],
     ['replant-stand', texts.replantStand, inputs.replantStand && readingText(inputs.replantStand)],
     ['poor-chance', texts.poorChance, percent(inputs.poorSecondStandChancePercent)],
     ['poor-yield', texts.poorYield, percent(inputs.poorSecondStandYieldPercent)],
-    ...costs.map(({ label, amount }, index): [string, string, string | null] => [`cost ${index} ${label}`, label, money(amount)]),
+    ...costs.map(({ label, amount }, index): [string, string, string | null] => [
+      `cost ${index} ${label}`,
+      label,
+      money(amount),
+    ]),
     ['drying', texts.extraDrying[typedIn], money(extraDrying)],
     ['insurance', texts.insurancePayment[typedIn], money(insurancePayment)],
     ['gap-loss', texts.gapLoss, percent(inputs.gapLossPercent)],
@@ -69,7 +92,9 @@ export function basisChanges(before: ReplantBasis, after: ReplantBasis, units: U
       if (!found) return [texts.isGone(label, text)];
       return found.text === text ? [] : [texts.was(label, text, found.text)];
     }),
-    ...now.filter(({ id }) => !old.some((each) => each.id === id)).map(({ label, text }) => texts.isNew(label, text)),
+    ...now
+      .filter(({ id }) => !old.some((each) => each.id === id))
+      .map(({ label, text }) => texts.isNew(label, text)),
   ];
   if (changes.length === 0) return [texts.sameNumbers];
   const rest = changes.length - shownMost;

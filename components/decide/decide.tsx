@@ -22,7 +22,13 @@ import { RestsOn } from './rests-on';
 import { SignButtons } from './sign-buttons';
 import { SignedHead } from './signed-head';
 
-type DecideProps = { org: string; planting: string; zone: string | null; maySign: boolean; mayWrite: boolean };
+type DecideProps = {
+  org: string;
+  planting: string;
+  zone: string | null;
+  maySign: boolean;
+  mayWrite: boolean;
+};
 
 /** Keep or replant: the sentence, its evidence, the cautions and the signature; beside them the grower's own figures. */
 export function Decide({ org, planting, zone, maySign, mayWrite }: DecideProps) {
@@ -37,13 +43,17 @@ export function Decide({ org, planting, zone, maySign, mayWrite }: DecideProps) 
     answer.current?.focus({ preventScroll: true });
     answer.current?.scrollIntoView();
   };
-  const finding = { basis, units, countHref: paths.count(org, planting) };
+  const finding = { basis, units, today, countHref: paths.count(org, planting) };
   return (
     <div className="flex flex-col gap-6">
       <Scopes org={org} planting={planting} zone={zone} replant={replant} />
       <div className="grid grid-cols-1 gap-x-16 lg:grid-cols-[minmax(0,1fr)_24rem]">
         <div ref={answer} tabIndex={-1} className="min-w-0 outline-none">
-          {signed ? <SignedHead decision={signed} current={basis} hasChanged={hasChanged} units={units} /> : <Finding {...finding} />}
+          {signed ? (
+            <SignedHead decision={signed} current={basis} hasChanged={hasChanged} units={units} />
+          ) : (
+            <Finding {...finding} />
+          )}
           {signed && hasChanged ? (
             <>
               <Disclosure label={decisionTexts.restedOn}>
@@ -56,7 +66,10 @@ export function Decide({ org, planting, zone, maySign, mayWrite }: DecideProps) 
           ) : null}
           <Evidence basis={basis} units={units} />
           {basis.answer.kind === 'value' ? (
-            <Section title={signed ? decisionTexts.decideAnew : decisionTexts.title} {...(signed ? { lead: decisionTexts.decideAnewHelp } : {})}>
+            <Section
+              title={signed ? decisionTexts.decideAnew : decisionTexts.title}
+              {...(signed ? { lead: decisionTexts.decideAnewHelp } : {})}
+            >
               <SignButtons replant={replant} maySign={maySign} onSigned={showAnswer} />
             </Section>
           ) : null}
@@ -91,7 +104,12 @@ function FormLead({ replant }: { replant: ReplantAnswer }) {
   );
 }
 
-function Scopes({ org, planting, zone, replant }: Pick<DecideProps, 'org' | 'planting' | 'zone'> & { replant: ReplantAnswer }) {
+function Scopes({
+  org,
+  planting,
+  zone,
+  replant,
+}: Pick<DecideProps, 'org' | 'planting' | 'zone'> & { replant: ReplantAnswer }) {
   const { units } = useWho();
   if (replant.zones.length === 0) return null;
   const here = paths.decide(org, planting);
@@ -101,7 +119,11 @@ function Scopes({ org, planting, zone, replant }: Pick<DecideProps, 'org' | 'pla
       label={replantTexts.scopes}
       tabs={[
         { label: replantTexts.scope(replantTexts.wholeField, fieldArea), href: here, current: zone === null },
-        ...replant.zones.map(({ id, name, acres }) => ({ label: replantTexts.scope(name, areaText(acres, units)), href: `${here}?zone=${id}`, current: zone === id })),
+        ...replant.zones.map(({ id, name, acres }) => ({
+          label: replantTexts.scope(name, areaText(acres, units)),
+          href: `${here}?zone=${id}`,
+          current: zone === id,
+        })),
       ]}
     />
   );

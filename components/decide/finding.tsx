@@ -2,11 +2,13 @@ import type { ReactNode } from 'react';
 import { PageHead } from '@/components/shell/page-head';
 import { fieldIdOf } from '@/components/form/problem-summary';
 import { LinkButton } from '@/components/ui/link-button';
+import { dateText } from '@/lib/format/date-text';
 import { intervalText } from '@/lib/format/interval-text';
 import { plantsPerAreaText } from '@/lib/format/plants-per-area-text';
 import { unitName } from '@/lib/format/unit-name';
 import type { ReplantBasis, ReplantFigure, ReplantGap } from '@/lib/schemas/replant';
 import type { UnitSystem } from '@/lib/schemas/vocabulary';
+import { replantSheetTexts } from '@/lib/texts/replant-sheet-texts';
 import { replantTexts } from '@/lib/texts/replant-texts';
 import { figurePath } from './figure-path';
 import { FindingSentences } from './finding-sentences';
@@ -15,6 +17,7 @@ type FindingProps = {
   basis: ReplantBasis;
   units: UnitSystem;
   countHref: string;
+  today: string;
   /** Below a signed decision, which is what such a page opens with. */
   second?: boolean;
 };
@@ -32,14 +35,23 @@ export function Finding({ second = false, ...props }: FindingProps) {
   );
 }
 
-function findingParts({ basis, units, countHref }: Omit<FindingProps, 'second'>): { title: string; sub: ReactNode; actions?: ReactNode } {
+function findingParts({ basis, units, countHref, today }: Omit<FindingProps, 'second'>): {
+  title: string;
+  sub: ReactNode;
+  actions?: ReactNode;
+} {
   if (basis.sentences) {
     const sentences = basis.sentences[units];
-    return { title: sentences.first, sub: <FindingSentences sentences={sentences} /> };
+    return {
+      title: sentences.first,
+      sub: <FindingSentences sentences={sentences} passed={passedSentence(basis, today)} />,
+    };
   }
   const gaps = basis.answer.kind === 'insufficient' ? basis.answer.gaps : [];
   const isOtherCrop = gaps.some(({ reason }) => reason === 'crop-without-table');
-  const wantsCounts = gaps.some(({ reason }) => ['no-row-samples', 'zone-not-counted', 'rest-not-counted'].includes(reason));
+  const wantsCounts = gaps.some(({ reason }) =>
+    ['no-row-samples', 'zone-not-counted', 'rest-not-counted'].includes(reason),
+  );
   return {
     title: isOtherCrop ? replantTexts.noAnswerForCrop : replantTexts.noAnswer,
     sub: (
@@ -73,8 +85,17 @@ function Gap({ gap, units, basis }: { gap: ReplantGap; units: UnitSystem; basis:
 }
 
 function standSentence(stand: NonNullable<ReplantBasis['stand']>, units: UnitSystem): string {
-  const plants = (plantsPerAcre: number) => plantsPerAreaText(plantsPerAcre, units, { nearest: 100, withUnit: false });
+  const plants = (plantsPerAcre: number) =>
+    plantsPerAreaText(plantsPerAcre, units, { nearest: 100, withUnit: false });
   const { interval } = stand;
-  const range = interval ? replantTexts.standInterval(intervalText(interval.lower, interval.upper, plants)) : replantTexts.standWithoutInterval;
+  const range = interval
+    ? replantTexts.standInterval(intervalText(interval.lower, interval.upper, plants))
+    : replantTexts.standWithoutInterval;
   return `${replantTexts.stand}: ${plants(stand.plantsPerAcre)} ${unitName('plants-per-area', units)}. ${range}`;
+}
+
+/** The sum goes on for a day that is over; nobody can act on it any more. */
+function passedSentence(basis: ReplantBasis, today: string): string | null {
+  const day = basis.sheet?.inputs.replantOn;
+  return day && day < today ? replantSheetTexts.replantOnPassed(dateText(day)) : null;
 }

@@ -42,11 +42,16 @@ function changeLine(words: SumWords): ShownLine {
   const isExact = change.lower === change.upper;
   return shownLine({
     id: 'change',
-    label: isExact ? texts.yieldChange(change.upper > 0, words.yieldOf(Math.abs(change.upper)), price) : texts.yieldChangeBounded(price),
+    label: isExact
+      ? texts.yieldChange(change.upper > 0, words.yieldOf(Math.abs(change.upper)), price)
+      : texts.yieldChangeBounded(price),
     text: words.between(words.amount('yield-change-value'), (amount) => words.dollars(amount)),
     entry: entryOf('keep-or-replant'),
     inputs: [
-      { name: texts.replantYield, text: words.bounded(answer.replantYieldBushelsPerAcre, answer.replantReading) },
+      {
+        name: texts.replantYield,
+        text: words.bounded(answer.replantYieldBushelsPerAcre, answer.replantReading),
+      },
       { name: texts.keepYield, text: words.bounded(answer.keepYieldBushelsPerAcre, answer.keepReading) },
       { name: replantTexts.inputs.price, text: price },
     ],

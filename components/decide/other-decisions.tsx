@@ -18,7 +18,12 @@ export function OtherDecisions({ decisions, units }: OtherDecisionsProps) {
       {decisions.map((decision) => (
         <Disclosure
           key={decision.id}
-          label={texts.otherLine(decision.zone?.name ?? replantTexts.wholeField, texts.choices[decision.decided].toLowerCase(), decision.signedName, dateText(decision.signedOn))}
+          label={texts.otherLine(
+            decision.zone?.name ?? replantTexts.wholeField,
+            texts.choices[decision.decided].toLowerCase(),
+            decision.signedName,
+            dateText(decision.signedOn),
+          )}
         >
           <FrozenDecision decision={decision} units={units} />
         </Disclosure>

@@ -27,14 +27,23 @@ export const replantDraftSchema = z.object({
 });
 export type ReplantDraft = z.infer<typeof replantDraftSchema>;
 
-const emptyAmounts = { price: null, costs: replantSheetTexts.suggestedCosts.map((label) => ({ label, amount: '' })), extraDrying: null, insurancePayment: null };
+const emptyAmounts = {
+  price: null,
+  costs: replantSheetTexts.suggestedCosts.map((label) => ({ label, amount: '' })),
+  extraDrying: null,
+  insurancePayment: null,
+};
 
 /** The standing figures as they were typed; before anybody typed any, empty places and names for the usual costs. */
 export function standingDraft({ basis, plannedFullYield }: ReplantAnswer, units: UnitSystem): ReplantDraft {
   const inputs = basis.sheet?.inputs ?? null;
   const amounts = inputs ? typedAmounts(inputs) : emptyAmounts;
-  const percent = (value: number | null | undefined, otherwise: string) => (value === null || value === undefined ? otherwise : String(value));
-  const planned = plannedFullYield && { typed: plannedFullYield.typed, unit: plannedFullYield.unit as ReadingUnit };
+  const percent = (value: number | null | undefined, otherwise: string) =>
+    value === null || value === undefined ? otherwise : String(value);
+  const planned = plannedFullYield && {
+    typed: plannedFullYield.typed,
+    unit: plannedFullYield.unit as ReadingUnit,
+  };
   return {
     begunOn: basis.sheet?.id ?? null,
     typedIn: inputs?.typedIn ?? units,
@@ -54,7 +63,8 @@ export function standingDraft({ basis, plannedFullYield }: ReplantAnswer, units:
 }
 
 /** The lines of cost that are sent: one without a name and an amount is no line. */
-export const sentCosts = (draft: ReplantDraft) => draft.costs.filter(({ label, amount }) => label.trim() !== '' || amount.trim() !== '');
+export const sentCosts = (draft: ReplantDraft) =>
+  draft.costs.filter(({ label, amount }) => label.trim() !== '' || amount.trim() !== '');
 
 /** The draft as the body of a sheet. What is no number goes out as it was typed, so that the answer names its field. */
 export function sheetInputs(draft: ReplantDraft): Record<string, unknown> {

@@ -29,7 +29,10 @@ export function ReplantForm({ replant, onSaved }: ReplantFormProps) {
   const { basis } = replant;
   const zoneId = basis.zone?.id ?? null;
   const standing = standingDraft(replant, units);
-  const [kept, keep] = useKeptDraft(`replant-sheet ${basis.plantingId} ${zoneId ?? 'field'}`, replantDraftSchema);
+  const [kept, keep] = useKeptDraft(
+    `replant-sheet ${basis.plantingId} ${zoneId ?? 'field'}`,
+    replantDraftSchema,
+  );
   const [sheetId, setSheetId] = useState(() => v7());
   const [attempt, setAttempt] = useState(0);
   const operation = useOperation({
@@ -43,17 +46,30 @@ export function ReplantForm({ replant, onSaved }: ReplantFormProps) {
   const change = (part: Partial<ReplantDraft>) => keep((before) => ({ ...(before ?? standing), ...part }));
   const submit = () => {
     setAttempt(attempt + 1);
-    operation.mutate({ noun: 'replant-sheets', kind: 'replant-sheet.save', thingId: sheetId, body: { plantingId: basis.plantingId, zoneId, inputs: sheetInputs(draft) } });
+    operation.mutate({
+      noun: 'replant-sheets',
+      kind: 'replant-sheet.save',
+      thingId: sheetId,
+      body: { plantingId: basis.plantingId, zoneId, inputs: sheetInputs(draft) },
+    });
   };
   const { error } = operation;
   const { typedIn } = draft;
-  const typed = (figure: ReplantFigure, key: 'price' | 'replantOn' | 'extraDrying' | 'insurancePayment' | 'poorChance' | 'poorYield') => ({
+  const typed = (
+    figure: ReplantFigure,
+    key: 'price' | 'replantOn' | 'extraDrying' | 'insurancePayment' | 'poorChance' | 'poorYield',
+  ) => ({
     path: figurePath(figure, typedIn),
     value: draft[key],
     onChange: (value: string) => change({ [key]: value }),
     error,
   });
-  const loss = (key: 'gapLoss' | 'unevenLoss') => ({ path: `inputs.${key}Percent`, value: draft[key], onChange: (value: string) => change({ [key]: value }), error });
+  const loss = (key: 'gapLoss' | 'unevenLoss') => ({
+    path: `inputs.${key}Percent`,
+    value: draft[key],
+    onChange: (value: string) => change({ [key]: value }),
+    error,
+  });
   const isNewer = kept !== undefined && replant.sheetSavedBy !== null && standing.begunOn !== kept.begunOn;
   return (
     <form
@@ -80,23 +96,54 @@ export function ReplantForm({ replant, onSaved }: ReplantFormProps) {
             name="typed-in"
             inline
             value={typedIn}
-            options={unitSystems.map((value) => ({ value, label: value === 'us' ? texts.typedInUs : texts.typedInMetric }))}
+            options={unitSystems.map((value) => ({
+              value,
+              label: value === 'us' ? texts.typedInUs : texts.typedInMetric,
+            }))}
             onChange={(event) => change({ typedIn: event.target.value as UnitSystem })}
           />
         )}
-        <ReadingField label={texts.fullYield} hint={texts.fullYieldHint} path={figurePath('fullYield', typedIn)} value={draft.fullYield} onChange={(fullYield) => change({ fullYield })} error={error} />
+        <ReadingField
+          label={texts.fullYield}
+          hint={texts.fullYieldHint}
+          path={figurePath('fullYield', typedIn)}
+          value={draft.fullYield}
+          onChange={(fullYield) => change({ fullYield })}
+          error={error}
+        />
         <TypedField label={texts.price[typedIn]} {...typed('price', 'price')} />
       </FormPart>
       <FormPart title={texts.secondStand}>
-        <TypedField label={texts.replantOn} isDate {...typed('replantOn', 'replantOn')} {...(draft.replantOn !== '' && draft.replantOn < today ? { hint: passedHint(draft.replantOn) } : {})} />
-        <ReadingField label={texts.replantStand} path={figurePath('replantStand', typedIn)} value={draft.replantStand} onChange={(replantStand) => change({ replantStand })} error={error} />
-        <TypedField label={texts.poorChance} hint={texts.poorChanceHint} {...typed('poorSecondStandChance', 'poorChance')} />
+        <TypedField
+          label={texts.replantOn}
+          isDate
+          {...typed('replantOn', 'replantOn')}
+          {...(draft.replantOn !== '' && draft.replantOn < today
+            ? { hint: passedHint(draft.replantOn) }
+            : {})}
+        />
+        <ReadingField
+          label={texts.replantStand}
+          path={figurePath('replantStand', typedIn)}
+          value={draft.replantStand}
+          onChange={(replantStand) => change({ replantStand })}
+          error={error}
+        />
+        <TypedField
+          label={texts.poorChance}
+          hint={texts.poorChanceHint}
+          {...typed('poorSecondStandChance', 'poorChance')}
+        />
         <TypedField label={texts.poorYield} {...typed('poorSecondStandYield', 'poorYield')} />
       </FormPart>
       <CostLines draft={draft} onChange={(costs) => change({ costs })} error={error} />
       <FormPart>
         <TypedField label={texts.extraDrying[typedIn]} {...typed('extraDrying', 'extraDrying')} />
-        <TypedField label={texts.insurancePayment[typedIn]} hint={texts.insuranceHint} {...typed('insurancePayment', 'insurancePayment')} />
+        <TypedField
+          label={texts.insurancePayment[typedIn]}
+          hint={texts.insuranceHint}
+          {...typed('insurancePayment', 'insurancePayment')}
+        />
       </FormPart>
       <FormPart title={texts.present}>
         <TypedField label={texts.gapLoss} hint={texts.gapLossHint} {...loss('gapLoss')} />

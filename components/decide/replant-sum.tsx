@@ -17,7 +17,10 @@ export function ReplantSum({ basis, answer, units }: ReplantSumProps) {
   return (
     <div className="flex flex-col gap-5">
       <Part head={texts.keepHead(dateText(basis.plantedOn, 'day-and-month'))} lines={keepLines(words)} />
-      <Part head={texts.replantHead(dateText(words.replantOn, 'day-and-month'))} lines={replantLines(words)} />
+      <Part
+        head={texts.replantHead(dateText(words.replantOn, 'day-and-month'))}
+        lines={replantLines(words)}
+      />
       <Part head={texts.moneyHead[units]} lines={moneyLines(words)} />
       {hasCosts ? null : <p className="text-15 font-bold">{texts.noCosts}</p>}
       {basis.acres === null ? <p className="text-13 text-ink-soft">{texts.noField}</p> : null}

@@ -9,16 +9,22 @@ import { replantTexts } from '@/lib/texts/replant-texts';
 import { formulaName } from './formula-name';
 import { TableOrigin } from './table-origin';
 
-type RestsOnProps = { basis: ReplantBasis; units: UnitSystem; today: string; uncountedLabels?: readonly string[] };
+type RestsOnProps = {
+  basis: ReplantBasis;
+  units: UnitSystem;
+  today: string;
+  uncountedLabels?: readonly string[];
+};
 
 /** The counts behind the stand and the table behind the yields, with their age and origin. */
 export function RestsOn({ basis, units, today, uncountedLabels = [] }: RestsOnProps) {
   const texts = replantTexts.rests;
   const draws = basis.answer.kind === 'value' ? basis.answer.overInterval?.draws : undefined;
+  const isCorn = basis.crop === 'corn';
   const versions = Object.entries(basis.versions).map(([id, version]) => `${formulaName(id)} (${version})`);
   return (
     <>
-      <TableOrigin basis={basis} units={units} today={today} />
+      {isCorn ? <TableOrigin basis={basis} units={units} today={today} /> : null}
       <DataTable
         caption={texts.counts}
         captionShown
@@ -33,18 +39,25 @@ export function RestsOn({ basis, units, today, uncountedLabels = [] }: RestsOnPr
           cells: {
             label: { text: row.label },
             zone: { text: row.zoneName ?? texts.noZone },
-            stand: { text: plantsPerAreaText(row.plantsPerAcre, units, { withUnit: false }), sort: row.plantsPerAcre },
+            stand: {
+              text: plantsPerAreaText(row.plantsPerAcre, units, { withUnit: false }),
+              sort: row.plantsPerAcre,
+            },
             seen: { text: dateText(row.lastSeenOn, 'day-and-month'), sort: row.lastSeenOn },
           },
         }))}
         fileName="stand-counts"
         emptyText={texts.noRows}
       />
-      {uncountedLabels.length > 0 ? <p className="text-13 text-ink-soft">{texts.uncounted(uncountedLabels.join(', '))}</p> : null}
-      <p className="text-13 text-ink-soft">
-        {draws ? `${texts.draws(decimalText(draws.draws, 0), String(draws.seed))} ` : ''}
-        {texts.formulas(versions.join(', '))}
-      </p>
+      {uncountedLabels.length > 0 ? (
+        <p className="text-13 text-ink-soft">{texts.uncounted(uncountedLabels.join(', '))}</p>
+      ) : null}
+      {isCorn ? (
+        <p className="text-13 text-ink-soft">
+          {draws ? `${texts.draws(decimalText(draws.draws, 0), String(draws.seed))} ` : ''}
+          {texts.formulas(versions.join(', '))}
+        </p>
+      ) : null}
     </>
   );
 }

@@ -34,7 +34,12 @@ export function SignButtons({ replant, maySign, onSigned }: SignButtonsProps) {
       {maySign ? (
         <div className="grid max-w-reading grid-cols-2 gap-3" data-print="leave-out">
           {decisionChoices.map((choice) => (
-            <Button key={choice} wide look={answer.recommendation === choice ? 'primary' : 'secondary'} onClick={() => setPressed({ choice, read: replant })}>
+            <Button
+              key={choice}
+              wide
+              look={answer.recommendation === choice ? 'primary' : 'secondary'}
+              onClick={() => setPressed({ choice, read: replant })}
+            >
               <span className="text-18">{texts.choices[choice]}</span>
             </Button>
           ))}

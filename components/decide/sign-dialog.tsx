@@ -44,8 +44,24 @@ export function SignDialog({ choice, read, current, onClose, onSigned }: SignDia
   const sign = () => {
     setAttempt(attempt + 1);
     operation.mutate(
-      { noun: 'decisions', kind: 'decision.sign', thingId: decisionId, body: { plantingId: basis.plantingId, zoneId: basis.zone?.id ?? null, decided: choice, signedName: name, basisHash } },
-      { onError: (refused) => (refused.problem.code === 'basis-changed' ? void queries.invalidateQueries({ queryKey: ['replant'] }) : undefined) },
+      {
+        noun: 'decisions',
+        kind: 'decision.sign',
+        thingId: decisionId,
+        body: {
+          plantingId: basis.plantingId,
+          zoneId: basis.zone?.id ?? null,
+          decided: choice,
+          signedName: name,
+          basisHash,
+        },
+      },
+      {
+        onError: (refused) =>
+          refused.problem.code === 'basis-changed'
+            ? void queries.invalidateQueries({ queryKey: ['replant'] })
+            : undefined,
+      },
     );
   };
   const actions = hasChanged ? (
@@ -81,8 +97,20 @@ export function SignDialog({ choice, read, current, onClose, onSigned }: SignDia
           {isAgainst ? <p className="border-l-6 border-flag pl-4">{texts.againstAnswer}</p> : null}
           {basis.zone ? <p>{texts.otherPart(basis.zone.name)}</p> : null}
           <p>{texts.freezes}</p>
-          <Field label={texts.name} hint={texts.nameHint} id={fieldIdOf('signedName')} error={fieldError(error, 'signedName')}>
-            {(wiring) => <TextInput {...wiring} autoComplete="name" value={name} onChange={(event) => setName(event.target.value)} />}
+          <Field
+            label={texts.name}
+            hint={texts.nameHint}
+            id={fieldIdOf('signedName')}
+            error={fieldError(error, 'signedName')}
+          >
+            {(wiring) => (
+              <TextInput
+                {...wiring}
+                autoComplete="name"
+                value={name}
+                onChange={(event) => setName(event.target.value)}
+              />
+            )}
           </Field>
         </form>
       )}

@@ -5,7 +5,12 @@ import type { UnitSystem } from '@/lib/schemas/vocabulary';
 import { decisionTexts } from '@/lib/texts/decision-texts';
 import { basisChanges } from './basis-facts';
 
-type SignedHeadProps = { decision: SignedDecision; current: ReplantBasis; hasChanged: boolean; units: UnitSystem };
+type SignedHeadProps = {
+  decision: SignedDecision;
+  current: ReplantBasis;
+  hasChanged: boolean;
+  units: UnitSystem;
+};
 
 /** A signed decision is the finding: who decided what and when, what they read, and whether that still stands so. */
 export function SignedHead({ decision, current, hasChanged, units }: SignedHeadProps) {
@@ -19,7 +24,9 @@ export function SignedHead({ decision, current, hasChanged, units }: SignedHeadP
           <p>
             {texts.answerThen} {basis.sentences?.[units].first}
           </p>
-          {signedName === personName ? null : <p className="text-15 text-ink-soft">{texts.signedAs(signedName, personName)}</p>}
+          {signedName === personName ? null : (
+            <p className="text-15 text-ink-soft">{texts.signedAs(signedName, personName)}</p>
+          )}
           {hasChanged ? (
             <div className="border-l-6 border-flag pl-4">
               <p>{texts.changed}</p>

@@ -21,7 +21,13 @@ export function SumLine({ label, name, text, entry, inputs, note, total = false 
     >
       <dt className="min-w-0">{label}</dt>
       <dd className="shrink-0 text-right font-mono">
-        <NumberSource label={name} text={text} inputs={inputs} {...(entry ? { entry } : {})} {...(note ? { note } : {})} />
+        <NumberSource
+          label={name}
+          text={text}
+          inputs={inputs}
+          {...(entry ? { entry } : {})}
+          {...(note ? { note } : {})}
+        />
       </dd>
     </div>
   );

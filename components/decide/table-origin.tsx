@@ -18,14 +18,25 @@ export function TableOrigin({ basis, units, today }: TableOriginProps) {
   const { answer } = basis;
   const age = countText(Number(today.slice(0, 4)) - publishedIn, 'year');
   const value = answer.kind === 'value' ? answer : null;
-  const isExtrapolated = value !== null && (value.keepReading.extrapolatedInSource || value.replantReading.extrapolatedInSource);
-  const isLow = value !== null && value.terms.maximumYieldBushelsPerAcre < lowYieldBushels && Math.max(value.terms.replantPlantsPerAcre, basis.stand?.plantsPerAcre ?? 0) > respondsUpTo;
+  const isExtrapolated =
+    value !== null && (value.keepReading.extrapolatedInSource || value.replantReading.extrapolatedInSource);
+  const isLow =
+    value !== null &&
+    value.terms.maximumYieldBushelsPerAcre < lowYieldBushels &&
+    Math.max(value.terms.replantPlantsPerAcre, basis.stand?.plantsPerAcre ?? 0) > respondsUpTo;
   return (
     <div className="flex max-w-reading flex-col gap-1">
       <h3 className="text-15">{texts.table}</h3>
       <p>{texts.tableOrigin(age)}</p>
       {isExtrapolated ? <p>{texts.tableExtrapolated}</p> : null}
-      {isLow ? <p>{texts.lowYield(yieldText(lowYieldBushels, units), plantsPerAreaText(respondsUpTo, units, { nearest: 100 }))}</p> : null}
+      {isLow ? (
+        <p>
+          {texts.lowYield(
+            yieldText(lowYieldBushels, units),
+            plantsPerAreaText(respondsUpTo, units, { nearest: 100 }),
+          )}
+        </p>
+      ) : null}
     </div>
   );
 }

@@ -15,11 +15,26 @@ type YieldBarsProps = { basis: ReplantBasis; answer: ReplantValue; units: UnitSy
 /** What keeping and what replanting makes, beside each other, each with what is known of its uncertainty. */
 export function YieldBars({ basis, answer, units }: YieldBarsProps) {
   const texts = replantTexts.bars;
-  const stand = (plantsPerAcre: number) => plantsPerAreaText(plantsPerAcre, units, { nearest: 100, withUnit: false });
+  const stand = (plantsPerAcre: number) =>
+    plantsPerAreaText(plantsPerAcre, units, { nearest: 100, withUnit: false });
   const day = dateText(basis.sheet?.inputs.replantOn ?? basis.plantedOn, 'day-and-month');
   const bars = [
-    bar('keep', texts.keep(stand(basis.stand?.plantsPerAcre ?? 0)), answer.keepYieldBushelsPerAcre, answer.keepReading, answer.keepYieldOverCount, units),
-    bar('replant', texts.replant(day, stand(answer.terms.replantPlantsPerAcre)), answer.replantYieldBushelsPerAcre, answer.replantReading, answer.replantYieldOverSecondStand && { ...answer.replantYieldOverSecondStand, lowerIsBound: false }, units),
+    bar(
+      'keep',
+      texts.keep(stand(basis.stand?.plantsPerAcre ?? 0)),
+      answer.keepYieldBushelsPerAcre,
+      answer.keepReading,
+      answer.keepYieldOverCount,
+      units,
+    ),
+    bar(
+      'replant',
+      texts.replant(day, stand(answer.terms.replantPlantsPerAcre)),
+      answer.replantYieldBushelsPerAcre,
+      answer.replantReading,
+      answer.replantYieldOverSecondStand && { ...answer.replantYieldOverSecondStand, lowerIsBound: false },
+      units,
+    ),
   ];
   return (
     <BarWithUncertainty
@@ -33,7 +48,14 @@ export function YieldBars({ basis, answer, units }: YieldBarsProps) {
   );
 }
 
-function bar(id: 'keep' | 'replant', label: string, made: ReplantSpan, reading: ReadingOfTable, range: ReplantValue['keepYieldOverCount'], units: UnitSystem): UncertainBar {
+function bar(
+  id: 'keep' | 'replant',
+  label: string,
+  made: ReplantSpan,
+  reading: ReadingOfTable,
+  range: ReplantValue['keepYieldOverCount'],
+  units: UnitSystem,
+): UncertainBar {
   const shown = (bushelsPerAcre: number) => shownInUnits(bushelsPerAcre, 'yield', units);
   const text = yieldText(made.upper, units);
   const isBound = reading.kind === 'at-most';
@@ -54,5 +76,7 @@ function bar(id: 'keep' | 'replant', label: string, made: ReplantSpan, reading: 
 
 function rangeText(range: NonNullable<ReplantValue['keepYieldOverCount']>, units: UnitSystem): string {
   const end = (bushelsPerAcre: number) => yieldText(bushelsPerAcre, units, { withUnit: false });
-  return range.lowerIsBound ? replantTexts.bars.orLess(end(range.lower), end(range.upper)) : intervalText(range.lower, range.upper, end);
+  return range.lowerIsBound
+    ? replantTexts.bars.orLess(end(range.lower), end(range.upper))
+    : intervalText(range.lower, range.upper, end);
 }

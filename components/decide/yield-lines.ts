@@ -12,10 +12,17 @@ export function keepLines(words: SumWords): ShownLine[] {
   const { basis, answer, units } = words;
   const stand = basis.stand ? words.stand(basis.stand.plantsPerAcre) : '';
   const tableShare = texts.tableShare(dateText(basis.plantedOn, 'day-and-month'));
-  const rows = basis.countedRows.map((row) => ({ name: replantTexts.inputs.row(row.label), text: plantsPerAreaText(row.plantsPerAcre, units) }));
+  const rows = basis.countedRows.map((row) => ({
+    name: replantTexts.inputs.row(row.label),
+    text: plantsPerAreaText(row.plantsPerAcre, units),
+  }));
   return [
     shownLine({
-      id: 'stand', label: texts.stand, text: stand, entry: register.plantsPerAcre, inputs: rows,
+      id: 'stand',
+      label: texts.stand,
+      text: stand,
+      entry: register.plantsPerAcre,
+      inputs: rows,
       ...(basis.stand?.places === 'zones' ? { note: replantTexts.weightedNote } : {}),
     }),
     tableLine('keep-table', basis.plantedOn, answer.keepReading, stand),
@@ -48,7 +55,12 @@ export function replantLines(words: SumWords): ShownLine[] {
   return [
     shownLine({ id: 'second-stand', label: texts.secondStand, text: stand, inputs: typed }),
     tableLine('replant-table', replantOn, answer.replantReading, stand),
-    ...(hasChance ? [shownLine({ id: 'poor-chance', ...chance, inputs: typed }), shownLine({ id: 'poor-yield', ...poor, inputs: typed })] : []),
+    ...(hasChance
+      ? [
+          shownLine({ id: 'poor-chance', ...chance, inputs: typed }),
+          shownLine({ id: 'poor-yield', ...poor, inputs: typed }),
+        ]
+      : []),
     shownLine({
       id: 'replant-yield',
       label: texts.replantYield,
@@ -56,7 +68,10 @@ export function replantLines(words: SumWords): ShownLine[] {
       entry: entryOf('keep-or-replant'),
       inputs: [
         { name: replantTexts.inputs.fullYield, text: words.fullYield },
-        { name: texts.tableShare(dateText(replantOn, 'day-and-month')), text: words.percent('replant-table-share') },
+        {
+          name: texts.tableShare(dateText(replantOn, 'day-and-month')),
+          text: words.percent('replant-table-share'),
+        },
         ...[chance, poor].map(({ label, text }) => ({ name: label, text })),
       ],
       total: true,
@@ -67,10 +82,21 @@ export function replantLines(words: SumWords): ShownLine[] {
 function fullYieldLine({ basis, fullYield }: SumWords): ShownLine {
   const inputs = replantTexts.inputs;
   const from = basis.fullYield?.from === 'planting' ? inputs.fromPlan : inputs.fromSheet;
-  return shownLine({ id: 'full-yield', label: texts.ofFullYield, text: fullYield, inputs: [{ name: inputs.typed, text: from }] });
+  return shownLine({
+    id: 'full-yield',
+    label: texts.ofFullYield,
+    text: fullYield,
+    inputs: [{ name: inputs.typed, text: from }],
+  });
 }
 
-function lossLine(words: SumWords, id: 'keep-gap-loss-share' | 'keep-uneven-loss-share', label: string): ShownLine[] {
+function lossLine(
+  words: SumWords,
+  id: 'keep-gap-loss-share' | 'keep-uneven-loss-share',
+  label: string,
+): ShownLine[] {
   const share = words.amount(id).upper;
-  return share === 0 ? [] : [shownLine({ id, label, text: percentText(-share, { decimals: 1 }), inputs: words.typed })];
+  return share === 0
+    ? []
+    : [shownLine({ id, label, text: percentText(-share, { decimals: 1 }), inputs: words.typed })];
 }

@@ -12,15 +12,30 @@ export const moneySchema = (what: string, most: number) =>
   z
     .string(`Type ${what} in dollars, such as 4.20.`)
     .trim()
-    .transform((text) => text.replace(/^\$\s*/, '').replace(/,(?=\d{3}(\D|$))/g, '').replace(/^(\d+),(\d{1,2})$/, '$1.$2'))
+    .transform((text) =>
+      text
+        .replace(/^\$\s*/, '')
+        .replace(/,(?=\d{3}(\D|$))/g, '')
+        .replace(/^(\d+),(\d{1,2})$/, '$1.$2'),
+    )
     .refine((text) => decimalMoney.test(text), `Type ${what} in dollars, such as 4.20.`)
-    .refine((text) => !decimalMoney.test(text) || Number(text) <= most, `At most ${most.toLocaleString('en-US')} dollars can be taken for ${what}.`);
+    .refine(
+      (text) => !decimalMoney.test(text) || Number(text) <= most,
+      `At most ${most.toLocaleString('en-US')} dollars can be taken for ${what}.`,
+    );
 
 /** What the crop brings; at nothing there is nothing to weigh. */
 const priceSchema = (what: string, most: number) =>
-  moneySchema(what, most).refine((text) => !decimalMoney.test(text) || Number(text) > 0, `Type ${what} above zero.`);
+  moneySchema(what, most).refine(
+    (text) => !decimalMoney.test(text) || Number(text) > 0,
+    `Type ${what} above zero.`,
+  );
 
-const percentSchema = (what: string) => z.number(`Type ${what} in percent.`).min(0, `Type ${what} as 0 to 100 percent.`).max(100, `Type ${what} as 0 to 100 percent.`);
+const percentSchema = (what: string) =>
+  z
+    .number(`Type ${what} in percent.`)
+    .min(0, `Type ${what} as 0 to 100 percent.`)
+    .max(100, `Type ${what} as 0 to 100 percent.`);
 
 export const replantStandRule: ReadingRule = { ...seedingRateRule, name: 'stand after replanting' };
 export const costLinesMost = 12;
@@ -43,7 +58,9 @@ const usInputsSchema = z.object({
   ...figures,
   pricePerBushel: priceSchema('the price a bushel', 50).nullable(),
   /** Costs of replanting, dollars an acre, each named by the user. */
-  costs: z.array(z.object({ label: costLabelSchema, dollarsPerAcre: moneySchema('the cost an acre', 2_000) })).max(costLinesMost),
+  costs: z
+    .array(z.object({ label: costLabelSchema, dollarsPerAcre: moneySchema('the cost an acre', 2_000) }))
+    .max(costLinesMost),
   extraDryingPerAcre: moneySchema('the drying an acre', 500).nullable(),
   insurancePaymentPerAcre: moneySchema('the insurance payment an acre', 2_000).nullable(),
 });
@@ -53,7 +70,9 @@ const metricInputsSchema = z.object({
   typedIn: z.literal('metric'),
   ...figures,
   pricePerTonne: priceSchema('the price a tonne', 2_000).nullable(),
-  costs: z.array(z.object({ label: costLabelSchema, dollarsPerHectare: moneySchema('the cost a hectare', 5_000) })).max(costLinesMost),
+  costs: z
+    .array(z.object({ label: costLabelSchema, dollarsPerHectare: moneySchema('the cost a hectare', 5_000) }))
+    .max(costLinesMost),
   extraDryingPerHectare: moneySchema('the drying a hectare', 1_250).nullable(),
   insurancePaymentPerHectare: moneySchema('the insurance payment a hectare', 5_000).nullable(),
 });
@@ -63,12 +82,17 @@ const metricInputsSchema = z.object({
  * the units they were typed in; a sheet that does not say is in bushels and acres.
  */
 export const replantInputsSchema = z.preprocess(
-  (sent) => (sent !== null && typeof sent === 'object' && !('typedIn' in sent) ? { ...sent, typedIn: 'us' } : sent),
+  (sent) =>
+    sent !== null && typeof sent === 'object' && !('typedIn' in sent) ? { ...sent, typedIn: 'us' } : sent,
   z.discriminatedUnion('typedIn', [usInputsSchema, metricInputsSchema]),
 );
 export type ReplantInputs = z.output<typeof replantInputsSchema>;
 
-export const saveReplantSheetSchema = z.object({ plantingId: z.uuid(), zoneId: z.uuid().nullable(), inputs: replantInputsSchema });
+export const saveReplantSheetSchema = z.object({
+  plantingId: z.uuid(),
+  zoneId: z.uuid().nullable(),
+  inputs: replantInputsSchema,
+});
 export type SaveReplantSheetInput = z.output<typeof saveReplantSheetSchema>;
 
 export const signDecisionSchema = z.object({

@@ -11,15 +11,29 @@ export type ReplantSpan = z.infer<typeof spanSchema>;
 
 /** The figures somebody has to type, in the order in which the form asks for them. */
 export const replantFigures = [
-  'fullYield', 'price', 'replantOn', 'replantStand', 'costs', 'extraDrying', 'insurancePayment', 'poorSecondStandChance', 'poorSecondStandYield',
+  'fullYield',
+  'price',
+  'replantOn',
+  'replantStand',
+  'costs',
+  'extraDrying',
+  'insurancePayment',
+  'poorSecondStandChance',
+  'poorSecondStandYield',
 ] as const;
 export type ReplantFigure = (typeof replantFigures)[number];
 
 /** Why there is no answer yet. `names` are zones, or figures of the list above where figures are missing. */
 const gapSchema = z.object({
   reason: z.enum([
-    'crop-without-table', 'no-row-samples', 'zone-not-counted', 'rest-not-counted', 'rest-without-area', 'rest-without-room',
-    'figures-missing', 'replant-not-after-planting',
+    'crop-without-table',
+    'no-row-samples',
+    'zone-not-counted',
+    'rest-not-counted',
+    'rest-without-area',
+    'rest-without-room',
+    'figures-missing',
+    'replant-not-after-planting',
   ]),
   names: z.array(z.string()),
 });
@@ -27,16 +41,38 @@ export type ReplantGap = z.infer<typeof gapSchema>;
 
 const tableEnd = z.enum(['stand-below', 'stand-above', 'date-before', 'date-after']);
 const readingOfTableSchema = z.discriminatedUnion('kind', [
-  z.object({ kind: z.literal('value'), percent: z.number(), basis: z.enum(['printed', 'interpolated', 'no-plants']), extrapolatedInSource: z.boolean() }),
-  z.object({ kind: z.literal('at-most'), percent: z.number(), beyond: z.array(tableEnd), extrapolatedInSource: z.boolean() }),
+  z.object({
+    kind: z.literal('value'),
+    percent: z.number(),
+    basis: z.enum(['printed', 'interpolated', 'no-plants']),
+    extrapolatedInSource: z.boolean(),
+  }),
+  z.object({
+    kind: z.literal('at-most'),
+    percent: z.number(),
+    beyond: z.array(tableEnd),
+    extrapolatedInSource: z.boolean(),
+  }),
 ]);
 export type ReadingOfTable = z.infer<typeof readingOfTableSchema>;
 
 const lineSchema = z.object({
   id: z.enum([
-    'maximum-yield', 'keep-table-share', 'keep-gap-loss-share', 'keep-uneven-loss-share', 'keep-yield', 'replant-table-share',
-    'poor-second-stand-chance', 'poor-second-stand-yield-share', 'replant-yield', 'yield-change', 'yield-change-value',
-    'replant-cost', 'extra-drying', 'insurance-payment', 'gain',
+    'maximum-yield',
+    'keep-table-share',
+    'keep-gap-loss-share',
+    'keep-uneven-loss-share',
+    'keep-yield',
+    'replant-table-share',
+    'poor-second-stand-chance',
+    'poor-second-stand-yield-share',
+    'replant-yield',
+    'yield-change',
+    'yield-change-value',
+    'replant-cost',
+    'extra-drying',
+    'insurance-payment',
+    'gain',
   ]),
   label: z.string().nullable(),
   unit: z.enum(['bushels-per-acre', 'share', 'dollars-per-acre']),
@@ -73,17 +109,31 @@ const valueSchema = z.object({
       standUpper: z.number(),
       gainAtLowerDollarsPerAcre: spanSchema,
       gainAtUpperDollarsPerAcre: spanSchema,
-      draws: z.object({ draws: z.number(), seed: z.number(), keepWinsShare: z.number(), replantWinsShare: z.number(), openShare: z.number() }),
+      draws: z.object({
+        draws: z.number(),
+        seed: z.number(),
+        keepWinsShare: z.number(),
+        replantWinsShare: z.number(),
+        openShare: z.number(),
+      }),
       anotherCountCouldTurnIt: z.boolean(),
     })
     .nullable(),
   breakEven: z.discriminatedUnion('kind', [
-    z.object({ kind: z.literal('stand'), plantsPerAcre: z.number(), bound: z.enum(['exact', 'at-most', 'at-least']) }),
+    z.object({
+      kind: z.literal('stand'),
+      plantsPerAcre: z.number(),
+      bound: z.enum(['exact', 'at-most', 'at-least']),
+    }),
     z.object({ kind: z.literal('below-table'), plantsPerAcre: z.number() }),
     z.object({ kind: z.literal('none-in-table') }),
     z.object({ kind: z.literal('cannot-tell') }),
   ]),
-  terms: z.object({ maximumYieldBushelsPerAcre: z.number(), priceDollarsPerBushel: z.number(), replantPlantsPerAcre: z.number() }),
+  terms: z.object({
+    maximumYieldBushelsPerAcre: z.number(),
+    priceDollarsPerBushel: z.number(),
+    replantPlantsPerAcre: z.number(),
+  }),
 });
 export type ReplantValue = z.infer<typeof valueSchema>;
 
@@ -125,7 +175,14 @@ export const replantBasisSchema = z.object({
   stand: z
     .object({
       plantsPerAcre: z.number(),
-      interval: z.object({ lower: z.number(), upper: z.number(), standardErrorPlantsPerAcre: z.number(), degreesOfFreedom: z.number() }).nullable(),
+      interval: z
+        .object({
+          lower: z.number(),
+          upper: z.number(),
+          standardErrorPlantsPerAcre: z.number(),
+          degreesOfFreedom: z.number(),
+        })
+        .nullable(),
       places: z.enum(['row-samples', 'strips', 'zones']),
     })
     .nullable(),
@@ -133,7 +190,13 @@ export const replantBasisSchema = z.object({
   fullYield: z.object({ bushelsPerAcre: z.number(), from: z.enum(['sheet', 'planting']) }).nullable(),
   answer: z.discriminatedUnion('kind', [valueSchema, insufficientSchema]),
   zoneAnswers: z.array(
-    z.object({ zoneId: z.string(), name: z.string(), acres: z.number(), recommendation: z.enum(replantRecommendations).nullable(), gainDollarsPerAcre: spanSchema.nullable() }),
+    z.object({
+      zoneId: z.string(),
+      name: z.string(),
+      acres: z.number(),
+      recommendation: z.enum(replantRecommendations).nullable(),
+      gainDollarsPerAcre: spanSchema.nullable(),
+    }),
   ),
   sentences: z.object({ us: sentencesSchema, metric: sentencesSchema }).nullable(),
   /** The formulas and the table the answer came from, by their id and version in the register. */
@@ -142,7 +205,11 @@ export const replantBasisSchema = z.object({
 export type ReplantBasis = z.output<typeof replantBasisSchema>;
 
 /** What a decision freezes. The version says how to read it, as long as there are decisions that carry it. */
-export const frozenDecisionSchema = z.object({ version: z.literal(1), signedOn: z.string(), basis: replantBasisSchema });
+export const frozenDecisionSchema = z.object({
+  version: z.literal(1),
+  signedOn: z.string(),
+  basis: replantBasisSchema,
+});
 export type FrozenDecision = z.output<typeof frozenDecisionSchema>;
 
 const decisionSchema = z.object({

@@ -21,10 +21,12 @@ export const decisionTexts = {
   awaits: 'This awaits the grower’s signature',
   awaitsHelp: 'The grower of this farm signs it, or the owner of the account.',
   dialogTitle: { keep: 'Keep this stand', replant: 'Replant' } satisfies Record<DecisionChoice, string>,
-  againstAnswer: 'That is not what the figures say. It is yours to decide; the answer you read is kept beside your signature.',
+  againstAnswer:
+    'That is not what the figures say. It is yours to decide; the answer you read is kept beside your signature.',
   otherPart: (part: string) => `This is about ${part}.`,
   answerRead: 'The answer you read:',
-  freezes: 'Your signature keeps the figures, counts and sentences of this page as they stand. A later change of mind is a new decision.',
+  freezes:
+    'Your signature keeps the figures, counts and sentences of this page as they stand. A later change of mind is a new decision.',
   name: 'Your name',
   nameHint: 'Type it to sign.',
   sign: { keep: 'Sign: keep', replant: 'Sign: replant' } satisfies Record<DecisionChoice, string>,
@@ -46,7 +48,8 @@ export const decisionTexts = {
   decideAnew: 'Decide anew',
   decideAnewHelp: 'A later change is a new decision. What was signed before stays below.',
   others: 'Signed decisions',
-  otherLine: (part: string, choice: string, name: string, day: string) => `${part}: ${choice}, signed by ${name} on ${day}`,
+  otherLine: (part: string, choice: string, name: string, day: string) =>
+    `${part}: ${choice}, signed by ${name} on ${day}`,
 
   was: (label: string, before: string, after: string) => `${label} was ${before}, is ${after} now.`,
   isNew: (label: string, after: string) => `${label} is new: ${after}.`,

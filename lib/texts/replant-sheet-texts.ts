@@ -23,7 +23,10 @@ export const replantSheetTexts = {
   costs: 'Costs of replanting',
   costsHint: 'Under your own names. 0 where it costs nothing; take out the lines you do not need.',
   costName: (number: number) => `Cost ${number}, name`,
-  costAmount: { us: (number: number) => `Cost ${number}, $ an acre`, metric: (number: number) => `Cost ${number}, $ a hectare` },
+  costAmount: {
+    us: (number: number) => `Cost ${number}, $ an acre`,
+    metric: (number: number) => `Cost ${number}, $ a hectare`,
+  },
   amountHead: { us: '$ an acre', metric: '$ a hectare' },
   nameHead: 'What for',
   addCost: 'Add a cost',
@@ -31,11 +34,16 @@ export const replantSheetTexts = {
   removeCostNamed: (name: string) => `Take out ${name}`,
   suggestedCosts: ['Destroying the old stand', 'Planting', 'Seed'],
   extraDrying: { us: 'Extra drying, $ an acre', metric: 'Extra drying, $ a hectare' },
-  insurancePayment: { us: 'Insurance replant payment, $ an acre', metric: 'Insurance replant payment, $ a hectare' },
-  insuranceHint: 'What your agent names for your county and year. A part of a field is often paid only from a certain size on: ask.',
+  insurancePayment: {
+    us: 'Insurance replant payment, $ an acre',
+    metric: 'Insurance replant payment, $ a hectare',
+  },
+  insuranceHint:
+    'What your agent names for your county and year. A part of a field is often paid only from a certain size on: ask.',
   present: 'The stand that is there',
   gapLoss: 'Loss from gaps, %',
-  gapLossHint: 'Iowa 1996 to 2006: small gaps of 1 to 3 ft (0.3 to 0.9 m) 2 %, many of 4 to 6 ft (1.2 to 1.8 m) 4 to 6 %. 0 leaves it out.',
+  gapLossHint:
+    'Iowa 1996 to 2006: small gaps of 1 to 3 ft (0.3 to 0.9 m) 2 %, many of 4 to 6 ft (1.2 to 1.8 m) 4 to 6 %. 0 leaves it out.',
   unevenLoss: 'Loss from late plants, %',
   unevenLossHint: 'See the penalties under Scores. 0 leaves it out.',
   save: 'Save and answer',

@@ -9,32 +9,48 @@ export const replantTexts = {
   scope: (name: string, area: string | null) => (area === null ? name : `${name}, ${area}`),
   forArea: (dollars: string, area: string) => `${dollars} for the ${area}`,
   zoneSays: {
-    keep: (zone: string, change: string) => `In ${zone} the answer is another: keep, since replanting there would lose ${change}.`,
-    replant: (zone: string, change: string) => `In ${zone} the answer is another: replanting there would gain ${change}.`,
+    keep: (zone: string, change: string) =>
+      `In ${zone} the answer is another: keep, since replanting there would lose ${change}.`,
+    replant: (zone: string, change: string) =>
+      `In ${zone} the answer is another: replanting there would gain ${change}.`,
     'too-close': (zone: string) => `In ${zone} the answer is another: there it is too close to call.`,
-    'cannot-tell': (zone: string) => `In ${zone} the answer is another: the yield table cannot settle it there.`,
+    'cannot-tell': (zone: string) =>
+      `In ${zone} the answer is another: the yield table cannot settle it there.`,
   },
   about: (amount: string) => `about ${amount}`,
   atLeast: (amount: string) => `at least ${amount}`,
   atMost: (amount: string) => `at most ${amount}`,
   between: (lower: string, upper: string) => `${lower} to ${upper}`,
-  notInIt: 'The price, the yield table and the second stand are not in that: they are taken as typed and as printed, and each can be off by more than the count.',
-  notInItWithoutCount: 'The price, the yield table and the second stand are taken as typed and as printed; each can be off by more than the count.',
+  notInIt:
+    'The price, the yield table and the second stand are not in that: they are taken as typed and as printed, and each can be off by more than the count.',
+  notInItWithoutCount:
+    'The price, the yield table and the second stand are taken as typed and as printed; each can be off by more than the count.',
   countingCanStop: 'No stand inside that interval turns the answer, so counting can stop.',
-  countingCouldTurn: 'Another stand inside that interval would turn the answer, so more row samples are worth their time.',
-  closeToRounding: (amount: string) => `One printed percent of the table is worth ${amount} here; a smaller difference could be its rounding.`,
+  countingCouldTurn:
+    'Another stand inside that interval would turn the answer, so more row samples are worth their time.',
+  closeToRounding: (amount: string) =>
+    `One printed percent of the table is worth ${amount} here; a smaller difference could be its rounding.`,
 
   noAnswer: 'No answer yet',
   noAnswerForCrop: 'There is no answer for this crop',
   gaps: {
-    'crop-without-table': () => 'The yield table behind keep or replant is of corn. For other crops Rowrise scores the stand and leaves this decision without a number.',
-    'no-row-samples': ([zone]) => (zone === undefined ? 'Nothing has been counted here. Set out row samples, at least two, and count them first.' : `Nothing has been counted in ${zone}. Set out row samples there, at least two, and count them first.`),
-    'zone-not-counted': (zones) => `Nothing has been counted in ${zones.join(' and ')}. The whole field is answered when every zone has a counted row sample.`,
-    'rest-not-counted': () => 'Nothing has been counted outside the zones. The whole field is answered when that part has a counted row sample as well; a zone can be answered alone.',
-    'rest-without-area': () => 'Some row samples lie outside the zones, and the field has no area to weigh them by. Type the area of the field in the plan.',
-    'rest-without-room': () => 'Some row samples lie in no zone, though the zones cover the whole field. Put each of them into its zone.',
+    'crop-without-table': () =>
+      'The yield table behind keep or replant is of corn. For other crops Rowrise scores the stand and leaves this decision without a number.',
+    'no-row-samples': ([zone]) =>
+      zone === undefined
+        ? 'Nothing has been counted here. Set out row samples, at least two, and count them first.'
+        : `Nothing has been counted in ${zone}. Set out row samples there, at least two, and count them first.`,
+    'zone-not-counted': (zones) =>
+      `Nothing has been counted in ${zones.join(' and ')}. The whole field is answered when every zone has a counted row sample.`,
+    'rest-not-counted': () =>
+      'Nothing has been counted outside the zones. The whole field is answered when that part has a counted row sample as well; a zone can be answered alone.',
+    'rest-without-area': () =>
+      'Some row samples lie outside the zones, and the field has no area to weigh them by. Type the area of the field in the plan.',
+    'rest-without-room': () =>
+      'Some row samples lie in no zone, though the zones cover the whole field. Put each of them into its zone.',
     'figures-missing': () => '',
-    'replant-not-after-planting': () => 'The replant day typed before is no longer after the planting date. Type the day you could replant.',
+    'replant-not-after-planting': () =>
+      'The replant day typed before is no longer after the planting date. Type the day you could replant.',
   } satisfies Record<ReplantGap['reason'], (names: readonly string[]) => string>,
   type: 'Type',
   and: ' and ',
@@ -62,7 +78,8 @@ export const replantTexts = {
     keep: (stand: string) => `Keep, ${stand} plants`,
     replant: (day: string, stand: string) => `Replant ${day}, ${stand} plants`,
     sample: (rows: string) => `Keeping rests on ${rows}`,
-    uncertainty: 'The line on a bar runs from the low to the high end: of the count for keeping, of a poor and a good second stand for replanting',
+    uncertainty:
+      'The line on a bar runs from the low to the high end: of the count for keeping, of a poor and a good second stand for replanting',
     bounded: 'A dashed bar is at most that long: the table ends before it',
     noRange: 'no range known',
     orLess: (lower: string, upper: string) => `${lower} or less to ${upper}`,
@@ -84,7 +101,8 @@ export const replantTexts = {
     ofFullYield: 'of the yield at full stand',
     keepYield: 'Keeping makes',
     replantYield: 'Replanting makes',
-    yieldChange: (more: boolean, bushels: string, price: string) => `${bushels} ${more ? 'more' : 'less'}, at ${price}`,
+    yieldChange: (more: boolean, bushels: string, price: string) =>
+      `${bushels} ${more ? 'more' : 'less'}, at ${price}`,
     yieldChangeBounded: (price: string) => `The difference in yield, at ${price}`,
     extraDrying: 'Extra drying',
     insurancePayment: 'Insurance payment',
@@ -137,7 +155,8 @@ export const replantTexts = {
     tableOrigin: (age: string) =>
       `Nafziger 1994, Journal of Production Agriculture 7:59, as printed by Purdue: ${age} old, averages over hybrids of the 1980s and 1990s in the central Corn Belt. Published tables of this kind differ by 5 to 10 points at one and the same stand and date.`,
     tableExtrapolated: 'Its rows after 25 May were extrapolated by its author.',
-    lowYield: (yields: string, stand: string) => `Fields under about ${yields} do not respond to stands above about ${stand}; the table does not know that.`,
+    lowYield: (yields: string, stand: string) =>
+      `Fields under about ${yields} do not respond to stands above about ${stand}; the table does not know that.`,
     counts: 'The counts',
     uncounted: (labels: string) => `Not counted yet, so not in it: ${labels}.`,
     noRows: 'No row sample is counted yet.',

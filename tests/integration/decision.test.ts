@@ -27,7 +27,13 @@ describe('signing a decision', () => {
     expect((await scene.sign('grower', planting, basisHash)).outcome).toBe('applied');
     const before = (await scene.read('grower', planting)).decisions;
     expect(before).toHaveLength(1);
-    expect(before[0]).toMatchObject({ decided: 'keep', recommended: 'keep', signedName: 'Test Grower', personName: 'Test grower', signedOn: '2026-05-20' });
+    expect(before[0]).toMatchObject({
+      decided: 'keep',
+      recommended: 'keep',
+      signedName: 'Test Grower',
+      personName: 'Test grower',
+      signedOn: '2026-05-20',
+    });
     expect(contentHash(before[0]?.basis)).toBe(basisHash);
     await scene.countAgain(rows[0] ?? '', 25, '2026-05-19');
     const after = await scene.read('grower', planting);
@@ -41,7 +47,10 @@ describe('signing a decision', () => {
   it('signs nothing when figures or counts moved between reading and signing', async () => {
     const { planting, rows, basisHash } = await awaiting();
     await scene.save('agronomist', planting, { ...purdueInputs, pricePerBushel: '4.10' });
-    expect(await scene.sign('grower', planting, basisHash)).toMatchObject({ outcome: 'refused', code: 'basis-changed' });
+    expect(await scene.sign('grower', planting, basisHash)).toMatchObject({
+      outcome: 'refused',
+      code: 'basis-changed',
+    });
     const { basisHash: next } = await scene.read('grower', planting);
     await scene.countAgain(rows[0] ?? '', 20, '2026-05-19');
     expect((await scene.sign('grower', planting, next)).code).toBe('basis-changed');
@@ -56,7 +65,10 @@ describe('signing a decision', () => {
 
   it('is signed once on the same numbers; another choice is a new decision', async () => {
     const { planting, basisHash } = await awaiting();
-    const twins = await Promise.all([scene.sign('grower', planting, basisHash), scene.sign('owner', planting, basisHash)]);
+    const twins = await Promise.all([
+      scene.sign('grower', planting, basisHash),
+      scene.sign('owner', planting, basisHash),
+    ]);
     expect(twins.map(({ outcome }) => outcome).sort()).toEqual(['applied', 'refused']);
     expect(twins.find(({ outcome }) => outcome === 'refused')).toMatchObject({ code: 'already-there' });
     expect((await scene.sign('grower', planting, basisHash, { decided: 'replant' })).outcome).toBe('applied');
@@ -68,7 +80,13 @@ describe('signing a decision', () => {
     const { planting, basisHash } = await awaiting();
     const id = v7();
     const again = { operationId: v7(), deviceSequence: 1 };
-    const body = { plantingId: planting, zoneId: null, decided: 'keep', signedName: 'Test Grower', basisHash };
+    const body = {
+      plantingId: planting,
+      zoneId: null,
+      decided: 'keep',
+      signedName: 'Test Grower',
+      basisHash,
+    };
     expect((await scene.send('grower', 'decision.sign', id, body, again)).outcome).toBe('applied');
     expect((await scene.send('grower', 'decision.sign', id, body, again)).outcome).toBe('duplicate');
     expect((await scene.read('grower', planting)).decisions).toHaveLength(1);
@@ -85,8 +103,12 @@ describe('signing a decision', () => {
 
   it('wants a name, a known choice and an answer to sign', async () => {
     const { planting, basisHash } = await awaiting();
-    expect((await scene.sign('grower', planting, basisHash, { signedName: '  ' })).fields).toEqual([{ path: 'signedName', message: 'Type your name to sign.' }]);
-    expect((await scene.sign('grower', planting, basisHash, { decided: 'hoe' })).fields?.[0]?.path).toBe('decided');
+    expect((await scene.sign('grower', planting, basisHash, { signedName: '  ' })).fields).toEqual([
+      { path: 'signedName', message: 'Type your name to sign.' },
+    ]);
+    expect((await scene.sign('grower', planting, basisHash, { decided: 'hoe' })).fields?.[0]?.path).toBe(
+      'decided',
+    );
     const bare = await scene.plant();
     const { basisHash: nothing } = await scene.read('grower', bare);
     expect((await scene.sign('grower', bare, nothing)).code).toBe('bad-input');
@@ -95,7 +117,10 @@ describe('signing a decision', () => {
   it('signs a bounded answer that the table leaves open', async () => {
     const planting = await scene.plant();
     await scene.count(planting, [8, 8, 8]);
-    await scene.save('grower', planting, { ...purdueInputs, costs: [{ label: 'All', dollarsPerAcre: '200' }] });
+    await scene.save('grower', planting, {
+      ...purdueInputs,
+      costs: [{ label: 'All', dollarsPerAcre: '200' }],
+    });
     const { basisHash } = await scene.read('grower', planting);
     expect((await scene.sign('grower', planting, basisHash)).outcome).toBe('applied');
     expect((await scene.read('grower', planting)).decisions[0]?.recommended).toBe('cannot-tell');

@@ -39,7 +39,9 @@ describe('keep or replant', () => {
     expect(answer.recommendation).toBe('keep');
     // 10 bu × $4 + $40 = $80 an acre, × 62 acres = $4,960.
     expect(answer.gainDollarsPerAcre.upper).toBeCloseTo(-80, 4);
-    expect(read.basis.sentences?.us.first).toBe('Keep this stand. Replanting would lose about $80 an acre ($5,000 for the 62 acres).');
+    expect(read.basis.sentences?.us.first).toBe(
+      'Keep this stand. Replanting would lose about $80 an acre ($5,000 for the 62 acres).',
+    );
     // t(0.975; 3) = 3.182 × SD 0.8165 / √4 × 1,000 = 1,299 either side (printed t table).
     expect(read.basis.stand?.interval?.lower).toBeCloseTo(20_000 - 1_299, -1);
   });
@@ -50,7 +52,9 @@ describe('keep or replant', () => {
     await scene.save('grower', planting, purdueInputs);
     const { sentences } = (await scene.read('grower', planting)).basis;
     // $80 an acre / 0.40469 = $198 a hectare; 62 acres are 25.1 ha.
-    expect(sentences?.metric.first).toBe('Keep this stand. Replanting would lose about $198 a hectare ($5,000 for the 25.1 ha).');
+    expect(sentences?.metric.first).toBe(
+      'Keep this stand. Replanting would lose about $198 a hectare ($5,000 for the 25.1 ha).',
+    );
     expect(sentences?.metric.sureness[0]).toContain('plants per hectare');
     expect(sentences?.metric.sureness.join(' ')).not.toContain('acre');
   });
@@ -59,7 +63,11 @@ describe('keep or replant', () => {
     const planting = await scene.plant();
     await scene.count(planting, [19, 21, 20, 20]);
     const saved = await scene.save('grower', planting, {
-      ...purdueInputs, typedIn: 'metric', pricePerTonne: '157,46', extraDryingPerHectare: '0', insurancePaymentPerHectare: '0',
+      ...purdueInputs,
+      typedIn: 'metric',
+      pricePerTonne: '157,46',
+      extraDryingPerHectare: '0',
+      insurancePaymentPerHectare: '0',
       costs: [{ label: 'All', dollarsPerHectare: '98.84' }],
     });
     expect(saved.outcome).toBe('applied');
@@ -80,18 +88,36 @@ describe('keep or replant', () => {
     expect(answer.keepYieldBushelsPerAcre.upper).toBeCloseTo(136, 9);
     expect(answer.recommendation).toBe('replant');
     expect(basis.sentences?.us.first).toContain('at least $112 an acre');
-    expect(basis.sentences?.us.bound).toContain('10,000 plants per acre, so keeping makes at most what is shown');
+    expect(basis.sentences?.us.bound).toContain(
+      '10,000 plants per acre, so keeping makes at most what is shown',
+    );
     expect(basis.sentences?.metric.bound).toContain('24,700 plants per hectare');
   });
 
   it('names every figure that is missing and guesses none', async () => {
     const planting = await scene.plant();
     await scene.count(planting, [20, 20]);
-    expect(gapsOf(await scene.read('grower', planting))[0]).toMatchObject({ reason: 'figures-missing', names: ['fullYield', 'price', 'replantOn', 'replantStand', 'costs', 'extraDrying', 'insurancePayment', 'poorSecondStandChance'] });
+    expect(gapsOf(await scene.read('grower', planting))[0]).toMatchObject({
+      reason: 'figures-missing',
+      names: [
+        'fullYield',
+        'price',
+        'replantOn',
+        'replantStand',
+        'costs',
+        'extraDrying',
+        'insurancePayment',
+        'poorSecondStandChance',
+      ],
+    });
     await scene.save('grower', planting, { ...purdueInputs, pricePerBushel: null });
-    expect(gapsOf(await scene.read('grower', planting))).toEqual([{ reason: 'figures-missing', names: ['price'] }]);
+    expect(gapsOf(await scene.read('grower', planting))).toEqual([
+      { reason: 'figures-missing', names: ['price'] },
+    ]);
     await scene.save('grower', planting, { ...purdueInputs, poorSecondStandChancePercent: 20 });
-    expect(gapsOf(await scene.read('grower', planting))).toEqual([{ reason: 'figures-missing', names: ['poorSecondStandYield'] }]);
+    expect(gapsOf(await scene.read('grower', planting))).toEqual([
+      { reason: 'figures-missing', names: ['poorSecondStandYield'] },
+    ]);
   });
 
   it('takes the full yield of the plan when the sheet has none, and costs of nothing', async () => {
@@ -118,21 +144,27 @@ describe('keep or replant', () => {
     const planting = await scene.plant({ plantedOn: '2026-04-28', zones: [low, rest] });
     await scene.count(planting, [10, 11, 9, 10], low.id);
     await scene.save('grower', planting, purdueInputs);
-    expect(gapsOf(await scene.read('grower', planting))).toEqual([{ reason: 'zone-not-counted', names: ['High ground'] }]);
+    expect(gapsOf(await scene.read('grower', planting))).toEqual([
+      { reason: 'zone-not-counted', names: ['High ground'] },
+    ]);
     await scene.count(planting, [24, 25, 26, 25], rest.id);
     const whole = await scene.read('grower', planting);
     // (18 × 10,000 + 44 × 25,000) / 62 = 20,645.
     expect(whole.basis.stand?.plantsPerAcre).toBeCloseTo(20_645.16, 1);
     expect(valueOf(whole).recommendation).toBe('keep');
     expect(whole.basis.sentences?.us.zones).toHaveLength(1);
-    expect(whole.basis.sentences?.us.zones[0]).toMatch(/^In Low corner \(18 acres\) the answer is another: replanting there would gain about \$\d+ an acre\.$/);
+    expect(whole.basis.sentences?.us.zones[0]).toMatch(
+      /^In Low corner \(18 acres\) the answer is another: replanting there would gain about \$\d+ an acre\.$/,
+    );
     const corner = await scene.read('grower', planting, low.id);
     expect(corner.basis).toMatchObject({ acres: 18, zone: { name: 'Low corner' } });
     expect(valueOf(corner).recommendation).toBe('replant');
     expect(corner.basis.countedRows).toHaveLength(4);
     await scene.save('grower', planting, { ...purdueInputs, pricePerBushel: '5' }, low.id);
     expect((await scene.read('grower', planting, low.id)).basis.sheet?.ofWholeField).toBe(false);
-    expect((await scene.read('grower', planting)).basis.sheet?.inputs).toMatchObject({ pricePerBushel: '4.00' });
+    expect((await scene.read('grower', planting)).basis.sheet?.inputs).toMatchObject({
+      pricePerBushel: '4.00',
+    });
   });
 
   it('does not answer for ground outside the zones that nobody counted', async () => {
@@ -155,7 +187,11 @@ describe('keep or replant', () => {
     ['a price in letters', { pricePerBushel: 'four' }, 'inputs.pricePerBushel'],
     ['a price of nothing', { pricePerBushel: '0' }, 'inputs.pricePerBushel'],
     ['an absurd price', { pricePerBushel: '4000' }, 'inputs.pricePerBushel'],
-    ['a cost without an amount', { costs: [{ label: 'Seed', dollarsPerAcre: '' }] }, 'inputs.costs.0.dollarsPerAcre'],
+    [
+      'a cost without an amount',
+      { costs: [{ label: 'Seed', dollarsPerAcre: '' }] },
+      'inputs.costs.0.dollarsPerAcre',
+    ],
     ['a cost without a name', { costs: [{ label: ' ', dollarsPerAcre: '30' }] }, 'inputs.costs.0.label'],
     ['a loss above the whole', { gapLossPercent: 120 }, 'inputs.gapLossPercent'],
     ['a loss in letters', { unevenLossPercent: 'some' }, 'inputs.unevenLossPercent'],
@@ -170,8 +206,15 @@ describe('keep or replant', () => {
 
   it('takes cents, commas and a dollar sign as they are typed', async () => {
     const planting = await scene.plant();
-    await scene.save('grower', planting, { ...purdueInputs, pricePerBushel: '$4,25', costs: [{ label: 'Land', dollarsPerAcre: '1,250.50' }] });
-    expect((await scene.read('grower', planting)).basis.sheet?.inputs).toMatchObject({ pricePerBushel: '4.25', costs: [{ label: 'Land', dollarsPerAcre: '1250.50' }] });
+    await scene.save('grower', planting, {
+      ...purdueInputs,
+      pricePerBushel: '$4,25',
+      costs: [{ label: 'Land', dollarsPerAcre: '1,250.50' }],
+    });
+    expect((await scene.read('grower', planting)).basis.sheet?.inputs).toMatchObject({
+      pricePerBushel: '4.25',
+      costs: [{ label: 'Land', dollarsPerAcre: '1250.50' }],
+    });
   });
 
   it('asks for the replant day again when the planting date was moved past it', async () => {
@@ -179,7 +222,9 @@ describe('keep or replant', () => {
     await scene.count(planting, [20, 20]);
     await scene.save('grower', planting, { ...purdueInputs, replantOn: '2026-05-02' });
     await movePlanting(planting, '2026-05-04');
-    expect(gapsOf(await scene.read('grower', planting))).toEqual([{ reason: 'replant-not-after-planting', names: [] }]);
+    expect(gapsOf(await scene.read('grower', planting))).toEqual([
+      { reason: 'replant-not-after-planting', names: [] },
+    ]);
   });
 
   it('keeps scouts, neighbors and other organisations out', async () => {
@@ -197,5 +242,7 @@ describe('keep or replant', () => {
 /** The planting day as somebody would correct it later; the plan's own operation is not what is tested here. */
 async function movePlanting(plantingId: string, plantedOn: string) {
   const { organisationId } = scene;
-  await inOrganisation(scene.db, { organisationId }, (tx) => updatePlanting(tx, { organisationId, plantingId, version: 1, values: { plantedOn } }));
+  await inOrganisation(scene.db, { organisationId }, (tx) =>
+    updatePlanting(tx, { organisationId, plantingId, version: 1, values: { plantedOn } }),
+  );
 }

@@ -20,7 +20,10 @@ export const purdueInputs: ReplantInputsSent = {
   pricePerBushel: '4.00',
   replantOn: '2026-05-25',
   replantStand: { typed: '30,000' },
-  costs: [{ label: 'Seed', dollarsPerAcre: '30' }, { label: 'Planting', dollarsPerAcre: '10' }],
+  costs: [
+    { label: 'Seed', dollarsPerAcre: '30' },
+    { label: 'Planting', dollarsPerAcre: '10' },
+  ],
   extraDryingPerAcre: '0',
   insurancePaymentPerAcre: '0',
   gapLossPercent: 0,
@@ -48,24 +51,42 @@ export class DecideScene {
   async settle(): Promise<this> {
     const { organisationId, people } = this;
     await inOrganisation(this.db, { organisationId }, async (tx) => {
-      await tx.execute(sql`insert into organisation (id, name, time_zone) values (${organisationId}, 'Test account', 'America/Chicago')`);
+      await tx.execute(
+        sql`insert into organisation (id, name, time_zone) values (${organisationId}, 'Test account', 'America/Chicago')`,
+      );
       for (const { id, role } of Object.values(people)) {
-        await tx.execute(sql`insert into person (id, email, name, password_hash) values (${id}, ${`${id}@example.test`}, ${`Test ${role}`}, 'none')`);
-        await tx.execute(sql`insert into membership (organisation_id, person_id, role) values (${organisationId}, ${id}, ${role})`);
+        await tx.execute(
+          sql`insert into person (id, email, name, password_hash) values (${id}, ${`${id}@example.test`}, ${`Test ${role}`}, 'none')`,
+        );
+        await tx.execute(
+          sql`insert into membership (organisation_id, person_id, role) values (${organisationId}, ${id}, ${role})`,
+        );
       }
     });
     await this.must('owner', 'farm.add', this.farmId, { name: 'Test farm', timeZone: 'America/Chicago' });
     const otherFarm = v7();
     await this.must('owner', 'farm.add', otherFarm, { name: 'Next farm', timeZone: 'America/Chicago' });
     await inOrganisation(this.db, { organisationId }, async (tx) => {
-      for (const [personId, farmId] of [[people.grower.id, this.farmId], [people.scout.id, this.farmId], [people.neighbor.id, otherFarm]]) {
-        await tx.execute(sql`insert into farm_person (organisation_id, farm_id, person_id) values (${organisationId}, ${farmId}, ${personId})`);
+      for (const [personId, farmId] of [
+        [people.grower.id, this.farmId],
+        [people.scout.id, this.farmId],
+        [people.neighbor.id, otherFarm],
+      ]) {
+        await tx.execute(
+          sql`insert into farm_person (organisation_id, farm_id, person_id) values (${organisationId}, ${farmId}, ${personId})`,
+        );
       }
     });
     return this;
   }
 
-  async send(who: Role | 'neighbor', kind: string, thingId: string, body: Record<string, unknown>, more: Record<string, unknown> = {}): Promise<Answer> {
+  async send(
+    who: Role | 'neighbor',
+    kind: string,
+    thingId: string,
+    body: Record<string, unknown>,
+    more: Record<string, unknown> = {},
+  ): Promise<Answer> {
     this.sequence += 1;
     const { id: personId } = this.people[who];
     const { organisationId } = this;
@@ -74,11 +95,21 @@ export class DecideScene {
       {
         organisationId,
         sender: { personId, now: () => today, originKind: 'form' },
-        handlerOf: (each, version) => allOperations.find((handler) => handler.kind === each && handler.version === version),
+        handlerOf: (each, version) =>
+          allOperations.find((handler) => handler.kind === each && handler.version === version),
       },
       {
-        operationId: v7(), organisationId, personId, deviceId: organisationId, deviceSequence: this.sequence, kind, version: 1, thingId, body,
-        occurred: { date: '2026-05-20', time: null, zone: 'America/Chicago' }, ...more,
+        operationId: v7(),
+        organisationId,
+        personId,
+        deviceId: organisationId,
+        deviceSequence: this.sequence,
+        kind,
+        version: 1,
+        thingId,
+        body,
+        occurred: { date: '2026-05-20', time: null, zone: 'America/Chicago' },
+        ...more,
       },
     );
   }
@@ -90,14 +121,36 @@ export class DecideScene {
   }
 
   /** A field with its planting of 30 April, by default without zones. */
-  async plant({ plantedOn = '2026-04-30', crop = 'corn', acres = '62', fullYield = null as string | null, zones = [] as { id: string; name: string; area: { typed: string } }[] } = {}) {
+  async plant({
+    plantedOn = '2026-04-30',
+    crop = 'corn',
+    acres = '62',
+    fullYield = null as string | null,
+    zones = [] as { id: string; name: string; area: { typed: string } }[],
+  } = {}) {
     const fieldId = v7();
     const plantingId = v7();
-    await this.must('owner', 'field.add', fieldId, { farmId: this.farmId, name: `Field ${plantingId.slice(-4)}`, area: acres === '' ? null : { typed: acres } });
+    await this.must('owner', 'field.add', fieldId, {
+      farmId: this.farmId,
+      name: `Field ${plantingId.slice(-4)}`,
+      area: acres === '' ? null : { typed: acres },
+    });
     await this.must('owner', 'planting.add', plantingId, {
-      fieldId, plantedOn, plantedAt: null, crop, rowSpacing: { typed: '30' }, seedingRate: { typed: '34,000' }, tagGermination: null,
-      intendedStand: { typed: '32,000' }, fullYield: fullYield === null ? null : { typed: fullYield }, previousCrop: null, tillage: null,
-      slowAfterDays: 2, lateAfterDays: 7, veryLateAfterDays: 14, zones,
+      fieldId,
+      plantedOn,
+      plantedAt: null,
+      crop,
+      rowSpacing: { typed: '30' },
+      seedingRate: { typed: '34,000' },
+      tagGermination: null,
+      intendedStand: { typed: '32,000' },
+      fullYield: fullYield === null ? null : { typed: fullYield },
+      previousCrop: null,
+      tillage: null,
+      slowAfterDays: 2,
+      lateAfterDays: 7,
+      veryLateAfterDays: 14,
+      zones,
     });
     return plantingId;
   }
@@ -105,17 +158,28 @@ export class DecideScene {
   /** Row samples of exactly 1/1000 acre, 17.424 ft of a 30-inch row, each with one count of 18 May. */
   async count(plantingId: string, plants: readonly number[], zoneId: string | null = null) {
     const samples = plants.map((_, index) => ({
-      id: v7(), stripId: null, zoneId, label: `${zoneId ? zoneId.slice(-3) : 'R'}-${index + 1}`, planterRow: index + 1,
-      length: { typed: '17.424 ft' }, startEnd: 'mark', farEnd: 'mark',
+      id: v7(),
+      stripId: null,
+      zoneId,
+      label: `${zoneId ? zoneId.slice(-3) : 'R'}-${index + 1}`,
+      planterRow: index + 1,
+      length: { typed: '17.424 ft' },
+      startEnd: 'mark',
+      farEnd: 'mark',
     }));
     await this.must('agronomist', 'row-samples.add', plantingId, { plantingId, samples });
-    for (const [index, each] of plants.entries()) await this.countAgain(samples[index]?.id ?? '', each, '2026-05-18');
+    for (const [index, each] of plants.entries())
+      await this.countAgain(samples[index]?.id ?? '', each, '2026-05-18');
     return samples.map(({ id }) => id);
   }
 
   async countAgain(rowSampleId: string, plants: number, visitedOn: string) {
     return this.must('scout', 'count.record', v7(), {
-      rowSampleId, countedAs: 'so-far', plants, doubtful: 0, replacesId: null,
+      rowSampleId,
+      countedAs: 'so-far',
+      plants,
+      doubtful: 0,
+      replacesId: null,
       visit: { id: v7(), personId: null, visitedOn, visitedAt: null, marker: null },
     });
   }
@@ -125,12 +189,23 @@ export class DecideScene {
   }
 
   sign(who: Role | 'neighbor', plantingId: string, basisHash: string, more: Record<string, unknown> = {}) {
-    return this.send(who, 'decision.sign', v7(), { plantingId, zoneId: null, decided: 'keep', signedName: 'Test Grower', basisHash, ...more });
+    return this.send(who, 'decision.sign', v7(), {
+      plantingId,
+      zoneId: null,
+      decided: 'keep',
+      signedName: 'Test Grower',
+      basisHash,
+      ...more,
+    });
   }
 
   read(who: Role | 'neighbor', plantingId: string, zone?: string) {
     const { organisationId } = this;
-    return withActor(this.db, { organisationId, personId: this.people[who].id, now: () => today }, (context) => readReplant(context, { planting: plantingId, zone }));
+    return withActor(
+      this.db,
+      { organisationId, personId: this.people[who].id, now: () => today },
+      (context) => readReplant(context, { planting: plantingId, zone }),
+    );
   }
 }
 

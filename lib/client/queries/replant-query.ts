@@ -11,7 +11,8 @@ export function replantQuery(org: string, planting: string, zone: string | null)
   const path = apiPaths.replant(org, planting);
   return queryOptions({
     queryKey: ['replant', org, planting, zone],
-    queryFn: async ({ signal }) => replantSchema.parse(await getJson(zone === null ? path : `${path}?zone=${zone}`, signal)),
+    queryFn: async ({ signal }) =>
+      replantSchema.parse(await getJson(zone === null ? path : `${path}?zone=${zone}`, signal)),
     refetchOnWindowFocus: true,
   });
 }

@@ -21,11 +21,17 @@ export async function listDecisions(tx: Transaction, params: { organisationId: s
     })
     .from(decision)
     .innerJoin(person, eq(person.id, decision.createdBy))
-    .where(and(eq(decision.organisationId, params.organisationId), eq(decision.plantingId, params.plantingId)))
+    .where(
+      and(eq(decision.organisationId, params.organisationId), eq(decision.plantingId, params.plantingId)),
+    )
     .orderBy(desc(decision.signedAt), desc(decision.id));
 }
 
 export async function insertDecision(tx: Transaction, values: typeof decision.$inferInsert) {
-  const inserted = await tx.insert(decision).values(values).onConflictDoNothing().returning({ id: decision.id });
+  const inserted = await tx
+    .insert(decision)
+    .values(values)
+    .onConflictDoNothing()
+    .returning({ id: decision.id });
   return inserted.length === 1;
 }

@@ -7,7 +7,10 @@ import { replantSheet } from '@/db/schema/replant-sheet';
 export type ReplantSheetRow = Awaited<ReturnType<typeof listReplantSheets>>[number];
 
 /** All versions of a planting's sums, those of its zones among them, newest first. */
-export async function listReplantSheets(tx: Transaction, params: { organisationId: string; plantingId: string }) {
+export async function listReplantSheets(
+  tx: Transaction,
+  params: { organisationId: string; plantingId: string },
+) {
   return tx
     .select({
       id: replantSheet.id,
@@ -18,11 +21,20 @@ export async function listReplantSheets(tx: Transaction, params: { organisationI
     })
     .from(replantSheet)
     .innerJoin(person, eq(person.id, replantSheet.createdBy))
-    .where(and(eq(replantSheet.organisationId, params.organisationId), eq(replantSheet.plantingId, params.plantingId)))
+    .where(
+      and(
+        eq(replantSheet.organisationId, params.organisationId),
+        eq(replantSheet.plantingId, params.plantingId),
+      ),
+    )
     .orderBy(desc(replantSheet.createdAt), desc(replantSheet.id));
 }
 
 export async function insertReplantSheet(tx: Transaction, values: typeof replantSheet.$inferInsert) {
-  const inserted = await tx.insert(replantSheet).values(values).onConflictDoNothing().returning({ id: replantSheet.id });
+  const inserted = await tx
+    .insert(replantSheet)
+    .values(values)
+    .onConflictDoNothing()
+    .returning({ id: replantSheet.id });
   return inserted.length === 1;
 }

@@ -15,7 +15,10 @@ import { basisInPlanting, readReplantRecords } from '../replant/read-replant';
  * Signs what stood on the screen and freezes it. The basis is worked out anew; when it is no longer what the person read,
  * nothing is signed. The same choice on the same basis is signed once; another choice, or another basis, is a new decision.
  */
-async function service(context: WriteContext, { plantingId, zoneId, decided, signedName, basisHash }: SignDecisionInput): Promise<Written> {
+async function service(
+  context: WriteContext,
+  { plantingId, zoneId, decided, signedName, basisHash }: SignDecisionInput,
+): Promise<Written> {
   const { tx, actor, clock, operation } = context;
   const { organisationId } = actor;
   const { farm } = await findSeenPlanting(context, plantingId);
@@ -24,11 +27,17 @@ async function service(context: WriteContext, { plantingId, zoneId, decided, sig
   const basis = basisInPlanting(await readReplantRecords(context, plantingId), zoneId);
   if (contentHash(basis) !== basisHash) throw new AppError('basis-changed');
   if (basis.answer.kind !== 'value') {
-    throw new AppError('bad-input', { sentence: 'There is no answer to sign yet. Type the figures that are named as missing first.' });
+    throw new AppError('bad-input', {
+      sentence: 'There is no answer to sign yet. Type the figures that are named as missing first.',
+    });
   }
-  const [standing] = (await listDecisions(tx, { organisationId, plantingId })).filter((each) => each.zoneId === zoneId);
+  const [standing] = (await listDecisions(tx, { organisationId, plantingId })).filter(
+    (each) => each.zoneId === zoneId,
+  );
   if (standing && standing.basisHash === basisHash && standing.decided === decided) {
-    throw new AppError('already-there', { sentence: `${standing.signedName} has signed this on these very numbers. Nothing was signed twice.` });
+    throw new AppError('already-there', {
+      sentence: `${standing.signedName} has signed this on these very numbers. Nothing was signed twice.`,
+    });
   }
   const frozen = frozenDecisionSchema.parse({ version: 1, signedOn: clock.today(farm.timeZone), basis });
   const added = await insertDecision(tx, {
@@ -47,4 +56,10 @@ async function service(context: WriteContext, { plantingId, zoneId, decided, sig
   return { version: 1 };
 }
 
-export const signDecision = defineOperation({ kind: 'decision.sign', version: 1, action: 'decision.sign', body: signDecisionSchema, service });
+export const signDecision = defineOperation({
+  kind: 'decision.sign',
+  version: 1,
+  action: 'decision.sign',
+  body: signDecisionSchema,
+  service,
+});

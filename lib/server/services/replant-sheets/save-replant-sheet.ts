@@ -10,7 +10,10 @@ import { originColumns } from '../../operations/origin-columns';
 import { findSeenPlanting } from '../plantings/find-seen-planting';
 import { isAfterPlanting } from '../replant/replant-terms';
 
-async function service(context: WriteContext, { plantingId, zoneId, inputs }: SaveReplantSheetInput): Promise<Written> {
+async function service(
+  context: WriteContext,
+  { plantingId, zoneId, inputs }: SaveReplantSheetInput,
+): Promise<Written> {
   const { tx, actor, operation } = context;
   const { organisationId } = actor;
   const { planting } = await findSeenPlanting(context, plantingId);
@@ -21,7 +24,13 @@ async function service(context: WriteContext, { plantingId, zoneId, inputs }: Sa
   if (inputs.replantOn !== null && !isAfterPlanting(inputs.replantOn, planting.plantedOn)) {
     throw badField('inputs.replantOn', replantDaySentence(planting.plantedOn));
   }
-  const added = await insertReplantSheet(tx, { id: operation.thingId, plantingId, zoneId, inputs, ...originColumns(context) });
+  const added = await insertReplantSheet(tx, {
+    id: operation.thingId,
+    plantingId,
+    zoneId,
+    inputs,
+    ...originColumns(context),
+  });
   if (!added) throw new AppError('operation-reused');
   return { version: 1 };
 }
@@ -30,4 +39,10 @@ function replantDaySentence(plantedOn: string): string {
   return `This was planted on ${dateText(plantedOn)}. Give a later day of the same year.`;
 }
 
-export const saveReplantSheet = defineOperation({ kind: 'replant-sheet.save', version: 1, action: 'replant.write', body: saveReplantSheetSchema, service });
+export const saveReplantSheet = defineOperation({
+  kind: 'replant-sheet.save',
+  version: 1,
+  action: 'replant.write',
+  body: saveReplantSheetSchema,
+  service,
+});

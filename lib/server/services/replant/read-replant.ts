@@ -9,7 +9,10 @@ import { readCoreSamples } from '../scores/core-samples';
 import { fieldAcresOf, replantBasis, sheetOfScope, zonesOf, type ReplantRecords } from './replant-basis';
 
 /** Keep or replant for a planting, or for one zone of it: the answer with all it rests on, and what was signed before. */
-export async function readReplant(context: ReadContext, { planting: plantingId, zone }: { planting: string; zone?: string | undefined }): Promise<ReplantAnswer> {
+export async function readReplant(
+  context: ReadContext,
+  { planting: plantingId, zone }: { planting: string; zone?: string | undefined },
+): Promise<ReplantAnswer> {
   const { tx, actor } = context;
   const records = await readReplantRecords(context, plantingId);
   const { core, sheets } = records;
@@ -25,15 +28,23 @@ export async function readReplant(context: ReadContext, { planting: plantingId, 
     zones: zonesOf(core),
     fieldAcres: fieldAcresOf(core),
     sheetSavedBy: sheet?.personName ?? null,
-    plannedFullYield: fullYieldTyped !== null && fullYieldUnit !== null ? { typed: fullYieldTyped, unit: fullYieldUnit } : null,
-    uncountedLabels: core.rowSamples.filter((row) => !counted.has(row.id) && (zoneId === null || row.zoneId === zoneId)).map(({ label }) => label),
+    plannedFullYield:
+      fullYieldTyped !== null && fullYieldUnit !== null
+        ? { typed: fullYieldTyped, unit: fullYieldUnit }
+        : null,
+    uncountedLabels: core.rowSamples
+      .filter((row) => !counted.has(row.id) && (zoneId === null || row.zoneId === zoneId))
+      .map(({ label }) => label),
     decisions: decisions.map(shownDecision),
   };
 }
 
 export async function readReplantRecords(context: ReadContext, plantingId: string): Promise<ReplantRecords> {
   const core = await readCoreSamples(context, plantingId);
-  const sheets = await listReplantSheets(context.tx, { organisationId: context.actor.organisationId, plantingId });
+  const sheets = await listReplantSheets(context.tx, {
+    organisationId: context.actor.organisationId,
+    plantingId,
+  });
   return { core, sheets };
 }
 

@@ -25,10 +25,15 @@ export function replantBasis(records: ReplantRecords, zoneId: string | null): Re
   const sheet = sheetOfScope(sheets, zoneId);
   const inputs = sheet ? replantInputsSchema.parse(sheet.inputs) : null;
   const scoped = samplesWithZone(core).filter((each) => zoneId === null || each.zoneId === zoneId);
-  const { stand, gaps: standGaps, acres } = standOfScope({ zone, zones, fieldAcres: fieldAcresOf(core), samples: samplesWithZone(core) });
+  const {
+    stand,
+    gaps: standGaps,
+    acres,
+  } = standOfScope({ zone, zones, fieldAcres: fieldAcresOf(core), samples: samplesWithZone(core) });
   const fullYield = fullYieldOf(inputs, plannedFullYieldOf(core));
   const answer = answerOf(core.planting, stand, standGaps, inputs, fullYield, acres);
-  const zoneAnswers = zoneId === null && answer.kind === 'value' ? zones.map((each) => zoneAnswer(records, each)) : [];
+  const zoneAnswers =
+    zoneId === null && answer.kind === 'value' ? zones.map((each) => zoneAnswer(records, each)) : [];
   return {
     plantingId: core.planting.id,
     fieldName: core.field.name,
@@ -44,19 +49,31 @@ export function replantBasis(records: ReplantRecords, zoneId: string | null): Re
     zoneAnswers,
     sentences:
       answer.kind === 'value'
-        ? { us: replantSentences({ answer, acres, zoneAnswers }, 'us'), metric: replantSentences({ answer, acres, zoneAnswers }, 'metric') }
+        ? {
+            us: replantSentences({ answer, acres, zoneAnswers }, 'us'),
+            metric: replantSentences({ answer, acres, zoneAnswers }, 'metric'),
+          }
         : null,
     versions: formulaVersions(),
   };
 }
 
 /** The newest figures typed for the zone; a zone without its own uses those of the whole field. */
-export function sheetOfScope(sheets: readonly ReplantSheetRow[], zoneId: string | null): ReplantSheetRow | null {
-  return sheets.find((sheet) => sheet.zoneId === zoneId) ?? sheets.find((sheet) => sheet.zoneId === null) ?? null;
+export function sheetOfScope(
+  sheets: readonly ReplantSheetRow[],
+  zoneId: string | null,
+): ReplantSheetRow | null {
+  return (
+    sheets.find((sheet) => sheet.zoneId === zoneId) ?? sheets.find((sheet) => sheet.zoneId === null) ?? null
+  );
 }
 
 export function zonesOf(core: CoreSamples): ZoneOfField[] {
-  return core.zones.map(({ id, name, areaUnit, areaThousandths }) => ({ id, name, acres: readingIn({ unit: areaUnit, thousandths: areaThousandths }, 'acres') }));
+  return core.zones.map(({ id, name, areaUnit, areaThousandths }) => ({
+    id,
+    name,
+    acres: readingIn({ unit: areaUnit, thousandths: areaThousandths }, 'acres'),
+  }));
 }
 
 export function fieldAcresOf({ field }: CoreSamples): number | null {
@@ -72,7 +89,12 @@ export function plannedFullYieldOf({ planting }: CoreSamples): number | null {
 /** A row sample whose zone was taken out of the plan lies in none. */
 function samplesWithZone(core: CoreSamples) {
   const zoneIds = new Set(core.zones.map(({ id }) => id));
-  const zoneByRow = new Map(core.rowSamples.map((row) => [row.id, row.zoneId !== null && zoneIds.has(row.zoneId) ? row.zoneId : null]));
+  const zoneByRow = new Map(
+    core.rowSamples.map((row) => [
+      row.id,
+      row.zoneId !== null && zoneIds.has(row.zoneId) ? row.zoneId : null,
+    ]),
+  );
   return core.samples.map((sample) => ({ sample, zoneId: zoneByRow.get(sample.rowSampleId) ?? null }));
 }
 
@@ -84,28 +106,44 @@ function answerOf(
   fullYield: ReplantBasis['fullYield'],
   acres: number | null,
 ): ReplantBasis['answer'] {
-  if (planting.crop !== 'corn') return { kind: 'insufficient', gaps: [{ reason: 'crop-without-table', names: [] }] };
+  if (planting.crop !== 'corn')
+    return { kind: 'insufficient', gaps: [{ reason: 'crop-without-table', names: [] }] };
   const gaps = [...standGaps];
   const terms = replantTerms(inputs, { plantedOn: planting.plantedOn, fullYield });
   if (terms.kind === 'missing') gaps.push({ reason: 'figures-missing', names: terms.figures });
   // The planting day may have been corrected after the sheet was saved.
-  if (inputs?.replantOn && !isAfterPlanting(inputs.replantOn, planting.plantedOn)) gaps.push({ reason: 'replant-not-after-planting', names: [] });
+  if (inputs?.replantOn && !isAfterPlanting(inputs.replantOn, planting.plantedOn))
+    gaps.push({ reason: 'replant-not-after-planting', names: [] });
   if (gaps.length > 0 || terms.kind === 'missing' || !stand) return { kind: 'insufficient', gaps };
   return replantValue(terms.terms, stand, acres);
 }
 
 function zoneAnswer(records: ReplantRecords, zone: ZoneOfField): ReplantBasis['zoneAnswers'][number] {
   const { answer } = replantBasis(records, zone.id);
-  const said: Pick<ReplantValue, 'recommendation' | 'gainDollarsPerAcre'> | null = answer.kind === 'value' ? answer : null;
-  return { zoneId: zone.id, name: zone.name, acres: zone.acres, recommendation: said?.recommendation ?? null, gainDollarsPerAcre: said?.gainDollarsPerAcre ?? null };
+  const said: Pick<ReplantValue, 'recommendation' | 'gainDollarsPerAcre'> | null =
+    answer.kind === 'value' ? answer : null;
+  return {
+    zoneId: zone.id,
+    name: zone.name,
+    acres: zone.acres,
+    recommendation: said?.recommendation ?? null,
+    gainDollarsPerAcre: said?.gainDollarsPerAcre ?? null,
+  };
 }
 
 function countedRow(core: CoreSamples, zones: readonly ZoneOfField[], sample: RowSample): CountedRow {
   const row = core.rowSamples.find(({ id }) => id === sample.rowSampleId);
-  const counts = core.observations.counts.filter((each) => each.used && each.rowSampleId === sample.rowSampleId);
-  const last = counts.reduce<string>((latest, each) => (momentOf(each) > latest ? momentOf(each) : latest), '');
+  const counts = core.observations.counts.filter(
+    (each) => each.used && each.rowSampleId === sample.rowSampleId,
+  );
+  const last = counts.reduce<string>(
+    (latest, each) => (momentOf(each) > latest ? momentOf(each) : latest),
+    '',
+  );
   const lastCounts = counts.filter((each) => momentOf(each) === last);
-  const sheet = core.observations.tapeSheets.find((each) => each.used && each.rowSampleId === sample.rowSampleId);
+  const sheet = core.observations.tapeSheets.find(
+    (each) => each.used && each.rowSampleId === sample.rowSampleId,
+  );
   const stand = rowStand(sample);
   if (!row || stand.kind === 'insufficient') throw new Error('a row sample was taken as counted and is not');
   const { plantsPerAcre, plantsHeld, areaAcres, source } = stand.value;
@@ -123,6 +161,10 @@ function countedRow(core: CoreSamples, zones: readonly ZoneOfField[], sample: Ro
 }
 
 function formulaVersions(): Record<string, string> {
-  const used = inferenceRegister.filter(({ id }) => ['nafziger-1994', 'keep-or-replant', 'break-even-stand'].includes(id));
-  return Object.fromEntries([register.plantsPerAcre, register.plantsPerAcreInterval, ...used].map(({ id, version }) => [id, version]));
+  const used = inferenceRegister.filter(({ id }) =>
+    ['nafziger-1994', 'keep-or-replant', 'break-even-stand'].includes(id),
+  );
+  return Object.fromEntries(
+    [register.plantsPerAcre, register.plantsPerAcreInterval, ...used].map(({ id, version }) => [id, version]),
+  );
 }

@@ -7,7 +7,8 @@ import type { ReplantBasis, ReplantFigure } from '@/lib/schemas/replant';
 import type { ReplantInputs } from '@/lib/schemas/replant-sheet';
 
 type Planting = { plantedOn: string; fullYield: { bushelsPerAcre: number } | null };
-export type TermsOrMissing = { kind: 'terms'; terms: ReplantTerms } | { kind: 'missing'; figures: ReplantFigure[] };
+export type TermsOrMissing =
+  { kind: 'terms'; terms: ReplantTerms } | { kind: 'missing'; figures: ReplantFigure[] };
 
 /** What each amount is a bushel and an acre, wherever it was typed; money becomes a number here, on its way into the core. */
 export function amountsOf(inputs: ReplantInputs) {
@@ -15,14 +16,20 @@ export function amountsOf(inputs: ReplantInputs) {
   if (inputs.typedIn === 'us') {
     return {
       dollarsPerBushel: amount(inputs.pricePerBushel, 1),
-      costs: inputs.costs.map(({ label, dollarsPerAcre }) => ({ label, dollarsPerAcre: Number(dollarsPerAcre) })),
+      costs: inputs.costs.map(({ label, dollarsPerAcre }) => ({
+        label,
+        dollarsPerAcre: Number(dollarsPerAcre),
+      })),
       extraDrying: amount(inputs.extraDryingPerAcre, 1),
       insurancePayment: amount(inputs.insurancePaymentPerAcre, 1),
     };
   }
   return {
     dollarsPerBushel: amount(inputs.pricePerTonne, 1 / bushelsPerTonne),
-    costs: inputs.costs.map(({ label, dollarsPerHectare }) => ({ label, dollarsPerAcre: Number(dollarsPerHectare) * hectaresPerAcre })),
+    costs: inputs.costs.map(({ label, dollarsPerHectare }) => ({
+      label,
+      dollarsPerAcre: Number(dollarsPerHectare) * hectaresPerAcre,
+    })),
     extraDrying: amount(inputs.extraDryingPerHectare, hectaresPerAcre),
     insurancePayment: amount(inputs.insurancePaymentPerHectare, hectaresPerAcre),
   };
@@ -38,7 +45,19 @@ export function fullYieldOf(inputs: ReplantInputs | null, planned: number | null
 export function replantTerms(inputs: ReplantInputs | null, planting: Planting): TermsOrMissing {
   const missing: ReplantFigure[] = planting.fullYield ? [] : ['fullYield'];
   if (!inputs) {
-    return { kind: 'missing', figures: [...missing, 'price', 'replantOn', 'replantStand', 'costs', 'extraDrying', 'insurancePayment', 'poorSecondStandChance'] };
+    return {
+      kind: 'missing',
+      figures: [
+        ...missing,
+        'price',
+        'replantOn',
+        'replantStand',
+        'costs',
+        'extraDrying',
+        'insurancePayment',
+        'poorSecondStandChance',
+      ],
+    };
   }
   const { dollarsPerBushel, costs, extraDrying, insurancePayment } = amountsOf(inputs);
   const { replantOn, replantStand, poorSecondStandYieldPercent } = inputs;
@@ -47,8 +66,17 @@ export function replantTerms(inputs: ReplantInputs | null, planting: Planting): 
   if (replantStand === null) missing.push('replantStand');
   if (extraDrying === null) missing.push('extraDrying');
   if (insurancePayment === null) missing.push('insurancePayment');
-  if (inputs.poorSecondStandChancePercent > 0 && poorSecondStandYieldPercent === null) missing.push('poorSecondStandYield');
-  if (missing.length > 0 || !planting.fullYield || dollarsPerBushel === null || replantOn === null || replantStand === null || extraDrying === null || insurancePayment === null) {
+  if (inputs.poorSecondStandChancePercent > 0 && poorSecondStandYieldPercent === null)
+    missing.push('poorSecondStandYield');
+  if (
+    missing.length > 0 ||
+    !planting.fullYield ||
+    dollarsPerBushel === null ||
+    replantOn === null ||
+    replantStand === null ||
+    extraDrying === null ||
+    insurancePayment === null
+  ) {
     return { kind: 'missing', figures: missing };
   }
   return {

@@ -29,33 +29,60 @@ const restShareIgnored = 0.02;
 export function standOfScope({ zone, zones, fieldAcres, samples }: ScopeInput): StandOfScope {
   if (zone) {
     const inside = samples.filter(({ zoneId }) => zoneId === zone.id);
-    return { acres: zone.acres, ...pooled(inside.map(({ sample }) => sample), [zone.name]) };
+    return {
+      acres: zone.acres,
+      ...pooled(
+        inside.map(({ sample }) => sample),
+        [zone.name],
+      ),
+    };
   }
-  if (zones.length === 0) return { acres: fieldAcres, ...pooled(samples.map(({ sample }) => sample), []) };
-  if (samples.length === 0) return { acres: fieldAcres, stand: null, gaps: [{ reason: 'no-row-samples', names: [] }] };
+  if (zones.length === 0)
+    return {
+      acres: fieldAcres,
+      ...pooled(
+        samples.map(({ sample }) => sample),
+        [],
+      ),
+    };
+  if (samples.length === 0)
+    return { acres: fieldAcres, stand: null, gaps: [{ reason: 'no-row-samples', names: [] }] };
   return weighted(zones, fieldAcres, samples);
 }
 
 function pooled(samples: readonly RowSample[], names: string[]): Pick<StandOfScope, 'stand' | 'gaps'> {
   const { plantsPerAcre, plantsPerAcreInterval, basis } = poolStand(samples);
-  if (plantsPerAcre.kind === 'insufficient') return { stand: null, gaps: [{ reason: 'no-row-samples', names }] };
+  if (plantsPerAcre.kind === 'insufficient')
+    return { stand: null, gaps: [{ reason: 'no-row-samples', names }] };
   // An interval of the counting alone says nothing of the rest of the field, so it is no error of the field's stand.
-  const interval = plantsPerAcreInterval.kind === 'value' && plantsPerAcreInterval.value.student ? plantsPerAcreInterval.value : null;
+  const interval =
+    plantsPerAcreInterval.kind === 'value' && plantsPerAcreInterval.value.student
+      ? plantsPerAcreInterval.value
+      : null;
   return {
     stand: {
       plantsPerAcre: plantsPerAcre.value.plantsPerAcre,
-      interval: interval?.student ? { lower: interval.plantsPerAcreLower, upper: interval.plantsPerAcreUpper, ...interval.student } : null,
+      interval: interval?.student
+        ? { lower: interval.plantsPerAcreLower, upper: interval.plantsPerAcreUpper, ...interval.student }
+        : null,
       places: basis === 'strips-as-places' ? 'strips' : 'row-samples',
     },
     gaps: [],
   };
 }
 
-function weighted(zones: readonly ZoneOfField[], fieldAcres: number | null, samples: ScopeInput['samples']): StandOfScope {
+function weighted(
+  zones: readonly ZoneOfField[],
+  fieldAcres: number | null,
+  samples: ScopeInput['samples'],
+): StandOfScope {
   const zonesAcres = zones.reduce((sum, each) => sum + each.acres, 0);
   const restAcres = fieldAcres === null ? null : fieldAcres - zonesAcres;
   const hasRest = restAcres !== null && fieldAcres !== null && restAcres > restShareIgnored * fieldAcres;
-  const strata = zones.map((each) => ({ ...each, samples: samples.filter(({ zoneId }) => zoneId === each.id) }));
+  const strata = zones.map((each) => ({
+    ...each,
+    samples: samples.filter(({ zoneId }) => zoneId === each.id),
+  }));
   const outside = samples.filter(({ zoneId }) => zoneId === null);
   const acres = fieldAcres ?? (outside.length === 0 ? zonesAcres : null);
   const gaps: ReplantGap[] = [];
@@ -63,17 +90,28 @@ function weighted(zones: readonly ZoneOfField[], fieldAcres: number | null, samp
   if (uncounted.length > 0) gaps.push({ reason: 'zone-not-counted', names: uncounted });
   if (outside.length === 0 && hasRest) gaps.push({ reason: 'rest-not-counted', names: [] });
   if (outside.length > 0 && restAcres === null) gaps.push({ reason: 'rest-without-area', names: [] });
-  if (outside.length > 0 && restAcres !== null && !hasRest) gaps.push({ reason: 'rest-without-room', names: [] });
+  if (outside.length > 0 && restAcres !== null && !hasRest)
+    gaps.push({ reason: 'rest-without-room', names: [] });
   if (gaps.length > 0) return { stand: null, gaps, acres };
-  const all = outside.length > 0 && restAcres !== null ? [...strata, { acres: restAcres, samples: outside }] : strata;
-  const estimate = standZones(all.map((each) => ({ acres: each.acres, rowSamples: placesOf(each.samples.map(({ sample }) => sample)) })));
-  if (estimate.kind === 'insufficient') return { stand: null, gaps: [{ reason: 'no-row-samples', names: [] }], acres };
+  const all =
+    outside.length > 0 && restAcres !== null ? [...strata, { acres: restAcres, samples: outside }] : strata;
+  const estimate = standZones(
+    all.map((each) => ({
+      acres: each.acres,
+      rowSamples: placesOf(each.samples.map(({ sample }) => sample)),
+    })),
+  );
+  if (estimate.kind === 'insufficient')
+    return { stand: null, gaps: [{ reason: 'no-row-samples', names: [] }], acres };
   const { plantsPerAcre, interval } = estimate.value;
   const student = interval.kind === 'value' ? interval.value.student : null;
   return {
     stand: {
       plantsPerAcre,
-      interval: interval.kind === 'value' && student ? { lower: interval.value.plantsPerAcreLower, upper: interval.value.plantsPerAcreUpper, ...student } : null,
+      interval:
+        interval.kind === 'value' && student
+          ? { lower: interval.value.plantsPerAcreLower, upper: interval.value.plantsPerAcreUpper, ...student }
+          : null,
       places: 'zones',
     },
     gaps,

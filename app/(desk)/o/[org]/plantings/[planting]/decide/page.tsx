@@ -23,7 +23,9 @@ export default async function DecidePage({ params, searchParams }: DecidePagePro
   const { zone = null } = await searchParams;
   const address = addressSchema.safeParse({ planting, zone });
   if (!address.success) notFound();
-  const { actor, data } = await readPage(org, 'replant.read', (context) => readReplant(context, { planting, zone: address.data.zone ?? undefined }));
+  const { actor, data } = await readPage(org, 'replant.read', (context) =>
+    readReplant(context, { planting, zone: address.data.zone ?? undefined }),
+  );
   const queries = new QueryClient();
   queries.setQueryData(replantQuery(org, planting, address.data.zone).queryKey, data);
   return (
