@@ -26,13 +26,13 @@ export function AlsoSeenSection({ comparison }: { comparison: TrialComparison })
       const differences = differencesFromReference(comparedBy(comparison, figure), trial.referenceSettingId);
       return {
         figure,
-        words,
+        head: `${words.head}, ${words.unit}`,
         cells: others.map((setting) => {
           const found = differences.find((each) => each.settingId === setting.settingId);
           return {
             setting,
             sort: found?.difference ?? null,
-            text: found ? words.signed(found.difference) : comparisonTexts.table.missing,
+            text: found ? words.signedAlone(found.difference) : comparisonTexts.table.missing,
             interval: found ? words.signedRange(found.lower, found.upper) : '',
           };
         }),
@@ -49,10 +49,10 @@ export function AlsoSeenSection({ comparison }: { comparison: TrialComparison })
             { key: 'figure', head: texts.figure, sortable: false },
             ...others.map((setting) => ({ key: setting.settingId, head: setting.name, align: 'number' as const, sortable: false })),
           ]}
-          rows={shown.map(({ figure, words, cells }) => ({
+          rows={shown.map(({ figure, head, cells }) => ({
             id: figure,
             cells: {
-              figure: { text: words.head },
+              figure: { text: head },
               ...Object.fromEntries(
                 cells.map((cell) => [
                   cell.setting.settingId,
@@ -64,9 +64,9 @@ export function AlsoSeenSection({ comparison }: { comparison: TrialComparison })
         />
       </div>
       <ul className="border-t border-rule md:hidden">
-        {shown.map(({ figure, words, cells }) => (
+        {shown.map(({ figure, head, cells }) => (
           <li key={figure} className="border-b border-rule py-2">
-            <h3 className="text-15">{words.head}</h3>
+            <h3 className="text-15">{head}</h3>
             <dl>
               {cells.map((cell) => (
                 <div key={cell.setting.settingId} className="flex flex-wrap items-baseline justify-between gap-x-3 py-0.5">

@@ -24,6 +24,8 @@ export type FigureWords = {
   amount: (difference: number) => string;
   /** A difference with its sign and unit. */
   signed: (difference: number) => string;
+  /** The same without its unit, where a head holds it. */
+  signedAlone: (difference: number) => string;
   /** Both ends of an interval, the unit once. */
   range: (lower: number, upper: number) => string;
   /** Both ends with their signs and no unit, beside a difference that has it. */
@@ -34,55 +36,72 @@ type Plain = {
   unit: string;
   columnUnit?: string;
   mean: (value: number) => string;
-  difference: (value: number, signed: boolean) => string;
+  difference: (value: number, style: { signed: boolean; finer: boolean }) => string;
 };
 
 /** Writes one compared figure; the same words serve the headline, the table and the pictures. */
 export function figureWords(figure: ComparedFigure, units: UnitSystem): FigureWords {
   const { unit, columnUnit = '', mean, difference } = plain(figure, units);
   const withUnit = (text: string) => `${text} ${unit === 'days' && /^[+−]?1(\.0)?$/.test(text) ? 'day' : unit}`.trim();
+  const ends = (lower: number, upper: number, signed: boolean, endUnit?: string) => {
+    // An interval that leaves zero out must not be rounded onto it.
+    const finer = [lower, upper].some((end) => end !== 0 && /^0([.]0*)?$/.test(difference(Math.abs(end), { signed: false, finer: false })));
+    return intervalText(lower, upper, (value) => difference(value, { signed, finer }), endUnit);
+  };
   return {
     ...comparedFigureNames[figure],
     unit,
     columnUnit,
     mean,
-    amount: (value) => withUnit(difference(Math.abs(value), false)),
-    signed: (value) => withUnit(difference(value, true)),
-    range: (lower, upper) => intervalText(lower, upper, (value) => difference(value, false), unit),
-    signedRange: (lower, upper) => intervalText(lower, upper, (value) => difference(value, true)),
+    amount: (value) => withUnit(difference(Math.abs(value), { signed: false, finer: false })),
+    signed: (value) => withUnit(difference(value, { signed: true, finer: false })),
+    signedAlone: (value) => difference(value, { signed: true, finer: false }),
+    range: (lower, upper) => ends(lower, upper, false, unit),
+    signedRange: (lower, upper) => ends(lower, upper, true),
   };
 }
 
 function plain(figure: ComparedFigure, units: UnitSystem): Plain {
   switch (figure) {
     case 'spread-days':
-    case 'half-up-days': {
-      const days = (value: number, signed = false) => daysText(value, { withUnit: false, signed });
-      return { unit: 'days', columnUnit: figure === 'spread-days' ? 'days' : '', mean: days, difference: days };
-    }
-    case 'plants-per-acre': {
-      const plants = (value: number, signed = false) => plantsPerAreaText(value, units, { nearest: 100, withUnit: false, signed });
-      return { unit: unitName('plants-per-area', units), columnUnit: unitName('plants-per-area', units), mean: plants, difference: plants };
-    }
-    case 'spacing-sd': {
-      const inches = (value: number, signed = false) => spacingText(value, units, { withUnit: false, signed });
-      return { unit: unitName('spacing', units), columnUnit: unitName('spacing', units), mean: inches, difference: inches };
-    }
+    case 'half-up-days':
+      return {
+        unit: 'days',
+        columnUnit: figure === 'spread-days' ? 'days' : '',
+        mean: (value) => daysText(value, { withUnit: false }),
+        difference: (value, { signed, finer }) => daysText(value, { withUnit: false, signed, decimals: finer ? 2 : 1 }),
+      };
+    case 'plants-per-acre':
+      return {
+        unit: unitName('plants-per-area', units),
+        columnUnit: unitName('plants-per-area', units),
+        mean: (value) => plantsPerAreaText(value, units, { nearest: 100, withUnit: false }),
+        difference: (value, { signed, finer }) => plantsPerAreaText(value, units, { nearest: finer ? 1 : 100, withUnit: false, signed }),
+      };
+    case 'spacing-sd':
+      return {
+        unit: unitName('spacing', units),
+        columnUnit: unitName('spacing', units),
+        mean: (value) => spacingText(value, units, { withUnit: false }),
+        difference: (value, { signed, finer }) => spacingText(value, units, { withUnit: false, signed, decimals: finer ? 2 : 1 }),
+      };
     case 'score':
       return {
         unit: comparisonTexts.pointsUnit,
         mean: (value) => decimalText(value, 0),
-        difference: (value, signed) => decimalText(value, 0, { signed }),
+        difference: (value, { signed, finer }) => decimalText(value, finer ? 1 : 0, { signed }),
       };
     case 'late-share':
     case 'share-of-seed':
     case 'spacing-cv':
-    case 'in-row-cover':
+    case 'in-row-cover': {
+      const decimals = figure === 'late-share' ? 1 : 0;
       return {
         unit: comparisonTexts.percentagePointsUnit,
-        mean: (value) => percentText(value, { decimals: figure === 'late-share' ? 1 : 0 }),
-        difference: (value, signed) => percentText(value, { decimals: figure === 'late-share' ? 1 : 0, withUnit: false, signed }),
+        mean: (value) => percentText(value, { decimals }),
+        difference: (value, { signed, finer }) => percentText(value, { decimals: finer ? decimals + 1 : decimals, withUnit: false, signed }),
       };
+    }
   }
 }
 

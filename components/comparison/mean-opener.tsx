@@ -23,6 +23,16 @@ export function meanText({ comparison, figure, setting }: MeanOpenerProps, words
   return { text: reason ?? texts.missing, sort: null };
 }
 
+/** The word to stand under a mean while counting goes on in one of its strips: its value is then only a bound. */
+export function meanBound({ comparison, figure, setting }: MeanOpenerProps): string | null {
+  const isBound = comparedBy(comparison, figure).strips.some(
+    (strip) => strip.settingId === setting.settingId && strip.value.kind === 'value' && strip.value.value.isBound,
+  );
+  if (!isBound) return null;
+  if (figure === 'score') return texts.bounds.atMost;
+  return figure === 'half-up-days' ? texts.bounds.atLatest : texts.bounds.atLeast;
+}
+
 /** A setting's mean that opens to the strips it was taken from, the figure's formula and its source. */
 export function MeanOpener({ comparison, figure, setting }: MeanOpenerProps) {
   const { units } = useWho();

@@ -3,8 +3,11 @@
 import { SeriesSample } from '@/components/charts/series-name';
 import { FigureOpener } from '@/components/scores/figure-opener';
 import type { FigureSubject } from '@/components/scores/figure-subject';
+import { penaltyText } from '@/components/scores/penalty-text';
 import { Section } from '@/components/ui/section';
 import type { PenaltyStudy } from '@/lib/agronomy/penalty/penalty';
+import { useWho } from '@/lib/client/who';
+import { unitName } from '@/lib/format/unit-name';
 import type { ComparedSetting, TrialComparison } from '@/lib/schemas/comparison';
 import type { PlantingFacts } from '@/lib/schemas/planting-facts';
 import { comparisonTexts } from '@/lib/texts/comparison-texts';
@@ -51,6 +54,7 @@ type GroupProps = {
 };
 
 function Group({ title, studies, settings, planting, columns }: GroupProps) {
+  const { units } = useWho();
   const said = studies.filter((study) => settings.some((setting) => setting.scored.penalties[study].kind === 'value'));
   return (
     <>
@@ -58,13 +62,19 @@ function Group({ title, studies, settings, planting, columns }: GroupProps) {
       {said.map((study) => (
         <div role="row" key={study} className="grid items-baseline gap-x-4 border-b border-rule py-1.5 md:grid-cols-[13rem_1fr]">
           <span role="rowheader" className="text-15">
-            {figureNames[study]}
+            {isInYield(study, settings) ? texts.perArea(figureNames[study], unitName('yield', units)) : figureNames[study]}
           </span>
           <div className="grid gap-x-3" style={columns} role="presentation">
             {settings.map((setting) => {
+              const penalty = setting.scored.penalties[study];
               return (
-                <span role="cell" key={setting.settingId} className="font-mono text-13 md:text-right md:text-15">
-                  <FigureOpener id={study} of={setting.name} subject={subjectOf(setting, planting)} />
+                <span role="cell" key={setting.settingId} className="font-mono text-13 md:text-right xl:text-15">
+                  <FigureOpener
+                    id={study}
+                    of={setting.name}
+                    subject={subjectOf(setting, planting)}
+                    text={penalty.kind === 'value' ? penaltyText(penalty.value, units, false) : undefined}
+                  />
                 </span>
               );
             })}
@@ -82,6 +92,14 @@ function Group({ title, studies, settings, planting, columns }: GroupProps) {
 
 function subjectOf({ scored }: ComparedSetting, planting: PlantingFacts): FigureSubject {
   return { planting, ...scored, row: null };
+}
+
+/** Whether a study counts bushels; its unit then stands once, at its name. */
+function isInYield(study: PenaltyStudy, settings: readonly ComparedSetting[]): boolean {
+  return settings.some(({ scored }) => {
+    const penalty = scored.penalties[study];
+    return penalty.kind === 'value' && penalty.value.unit === 'bushels-per-acre';
+  });
 }
 
 /** Studies that can be read of no setting, gathered by what they lack. */

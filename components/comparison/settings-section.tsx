@@ -8,7 +8,7 @@ import type { ComparedFigure, ComparedSetting, TrialComparison } from '@/lib/sch
 import { comparedFigureNames, comparisonTexts } from '@/lib/texts/comparison-texts';
 import { figureWords } from './figure-words';
 import { comparedBy } from './main-figure';
-import { MeanOpener, meanText } from './mean-opener';
+import { MeanOpener, meanBound, meanText } from './mean-opener';
 
 const texts = comparisonTexts.table;
 
@@ -68,7 +68,12 @@ export function SettingsSection({ comparison }: { comparison: TrialComparison })
                 columns.map((figure) => {
                   const shown = meanText({ comparison, figure, setting }, figureWords(figure, units));
                   const letters = figure === trial.mainFigure ? lettersOf(setting) : null;
-                  return [figure, { ...shown, text: letters ? `${shown.text} ${letters}` : shown.text, node: value(figure, setting) }];
+                  return [figure, {
+                    ...shown,
+                    text: letters ? `${shown.text} ${letters}` : shown.text,
+                    node: value(figure, setting),
+                    detail: meanBound({ comparison, figure, setting }) ?? '',
+                  }];
                 }),
               ),
             },
@@ -84,9 +89,12 @@ export function SettingsSection({ comparison }: { comparison: TrialComparison })
             <p className={`text-13 ${setting.settingId === spokenOf ? 'text-ink' : 'text-ink-soft'}`}>{about(setting)}</p>
             <dl className="grid grid-cols-3 gap-x-4 gap-y-2 pt-2 sm:grid-cols-5">
               {columns.map((figure) => (
-                <div key={figure} className="flex flex-col justify-between">
+                <div key={figure}>
                   <dt className={`text-13 ${figure === trial.mainFigure ? 'font-bold' : ''}`}>{head(figure)}</dt>
-                  <dd className="font-mono text-15">{value(figure, setting)}</dd>
+                  <dd className="font-mono text-15">
+                    {value(figure, setting)}
+                    <span className="block font-sans text-13">{meanBound({ comparison, figure, setting })}</span>
+                  </dd>
                 </div>
               ))}
             </dl>

@@ -18,7 +18,7 @@ type FigureOpenerProps = {
   of?: string;
 };
 
-/** A figure that opens to what it was made from, its formula, its source and what it does not tell. */
+/** A figure that opens to what it was made from, its formula, its source, and what it does not tell. */
 export function FigureOpener({ id, subject, text, of }: FigureOpenerProps) {
   const { units } = useWho();
   const shown = shownFigure(id, subject, units);

@@ -4,12 +4,12 @@ import { decimalText } from '@/lib/format/decimal-text';
 import { yieldText } from '@/lib/format/yield-text';
 
 /** A loss as it is said, with its own unit: the studies do not share one. "0.9 to 3.0 %", "8.3 bu/ac". */
-export function penaltyText({ lossLow, lossHigh, unit }: SaidPenalty, units: UnitSystem): string {
+export function penaltyText({ lossLow, lossHigh, unit }: SaidPenalty, units: UnitSystem, withYieldUnit = true): string {
   const inYield = unit === 'bushels-per-acre';
   const decimals = inYield && units === 'metric' ? 2 : 1;
   const plain = (loss: number) =>
     inYield ? yieldText(loss, units, { decimals, withUnit: false }) : decimalText(loss, decimals);
-  const high = inYield ? yieldText(lossHigh, units, { decimals }) : `${plain(lossHigh)} %`;
+  const high = inYield ? yieldText(lossHigh, units, { decimals, withUnit: withYieldUnit }) : `${plain(lossHigh)} %`;
   return plain(lossLow) === plain(lossHigh) ? high : `${plain(lossLow)} to ${high}`;
 }
 

@@ -36,8 +36,8 @@ export const comparisonTexts = {
   lockedAfter: (date: string) => `locked only on ${date}, after planting`,
   notLockedYet: 'not locked',
   randomizationExact: (p: string, asExtreme: string, arrangements: string) =>
-    `Counting out chance itself gives ${p}: ${asExtreme} of ${arrangements} layouts would differ as much.`,
-  randomizationSampled: (p: string, sampled: string) => `A sample of ${sampled} chance layouts gives ${p}.`,
+    `The exact randomization test beside it: ${p} (${asExtreme} of ${arrangements} layouts of chance differ as much).`,
+  randomizationSampled: (p: string, sampled: string) => `The randomization test beside it, from a sample of ${sampled} layouts of chance: ${p}.`,
   randomizationNone: (needed: string, had: string) => `No randomization test: it needs ${needed} and has ${had}.`,
   notes: {
     title: 'What to know beside it',
@@ -62,7 +62,7 @@ export const comparisonTexts = {
     title: 'How each setting came up',
     lead: 'All row samples of a setting added, counted plants over the ground they stand on.',
     sample: (settings: string, rows: string) => `${settings}, ${rows}`,
-    uncertainty: 'Bars beside the ends are 95 % intervals of the stand, from how strips differ',
+    uncertainty: 'Bars beside the ends are 95\u00a0% intervals of the stand, from how strips differ',
     moreThanLines: (count: number) => `${count} lines can be told apart; the other settings stand in the table.`,
     none: 'No curve yet: nothing has come up at a count.',
   },
@@ -74,8 +74,8 @@ export const comparisonTexts = {
     notCompared: 'a single strip: described, not compared',
     sample: (blocks: string, strips: string) => `${blocks}, ${strips}`,
     rules: {
-      tukey: 'Bars are 95 % intervals from the block analysis that hold for all pairs at once (Tukey)',
-      holm: 'Bars are 95 % intervals from the block analysis, each its own; Holm decides what is told apart',
+      tukey: 'Bars are 95\u00a0% intervals from the block analysis that hold for all pairs at once (Tukey)',
+      holm: 'Bars are 95\u00a0% intervals from the block analysis, each its own; Holm decides what is told apart',
     } satisfies Record<ComparisonRule, string>,
   },
   table: {
@@ -92,6 +92,7 @@ export const comparisonTexts = {
     standardError: 'Standard error',
     range: 'Least and most',
     missing: 'too little',
+    bounds: { atLeast: 'at least', atMost: 'at most', atLatest: 'at the latest' },
     stripBound: (text: string) => `${text}, a bound`,
   },
   blocks: {
@@ -114,6 +115,7 @@ export const comparisonTexts = {
     noneAtAll: 'No tape sheet has been read in these strips yet.',
   },
   penalties: {
+    perArea: (study: string, unit: string) => `${study}, ${unit}`,
     title: 'What the unevenness may cost',
     lead: 'Yield below an even stand by each published response. Units are each study’s own; they are not added up.',
     late: 'From late plants',
@@ -124,7 +126,7 @@ export const comparisonTexts = {
   alsoSeen: {
     title: 'Also seen',
     lead: (reference: string) =>
-      `Differences from ${reference} in the other figures, with 95 % intervals. Nothing is claimed of them: among many figures one differs by chance.`,
+      `Differences from ${reference} in the other figures, with 95\u00a0% intervals. Nothing is claimed of them: among many figures one differs by chance.`,
     figure: 'Figure',
   },
   working: {
@@ -135,7 +137,7 @@ export const comparisonTexts = {
     first: 'Setting',
     second: 'less',
     p: 'p, adjusted',
-    interval: '95 % interval',
+    interval: '95\u00a0% interval',
     told: 'Told apart',
     notClaimed: 'not claimed',
     methods: 'All methods',

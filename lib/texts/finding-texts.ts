@@ -3,7 +3,7 @@ export const findingTexts = {
   stand: (plants: string, unit: string) => `${plants} ${unit} stand`,
   ofSeed: (share: string) => `, ${share} of the seed`,
   spread: (days: string, isAtLeast: boolean) => ` They took ${isAtLeast ? 'at least ' : ''}${days} to come up, from 10 to 90 %.`,
-  interval: (interval: string, from: string, weighted: string) => `The 95 % interval is ${interval}, from ${from}${weighted}.`,
+  interval: (interval: string, from: string, weighted: string) => `The 95\u00a0% interval is ${interval}, from ${from}${weighted}.`,
   byArea: (zones: number) => `, weighted by the area of ${zones} zones`,
   countingOnly: (interval: string) =>
     `One row sample: counting alone leaves ${interval}, and it says nothing about the rest of the field.`,

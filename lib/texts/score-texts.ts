@@ -106,7 +106,7 @@ export const scoreTexts = {
   },
   short: {
     'corn-only': 'corn only',
-    'beyond-study': 'beyond the study',
+    'beyond-study': 'beyond study',
     'no-tape-sheet': 'no tape sheet',
     'no-counts': 'not counted',
     'not-counted': 'not counted',
@@ -127,7 +127,7 @@ export const scoreTexts = {
   multiplesAndMisses: (multiples: string, misses: string) => `${multiples} and ${misses}`,
   ofPlaces: (multiples: string, misses: string) => `of spacings; over places, as ISO 7256-1 counts: ${multiples} and ${misses}`,
   gaps: (longest: string, total: string) => `longest gap ${longest}, all gaps ${total}`,
-  interval: (interval: string) => `95 % interval ${interval}`,
+  interval: (interval: string) => `95\u00a0% interval ${interval}`,
   noInterval: (needed: string, had: string) => `no interval: needs ${needed}, has ${had}`,
   intervalBasis: {
     'counting-only': ', counting only',
