@@ -38,6 +38,8 @@ export function Decide({ org, planting, zone, maySign, mayWrite }: DecideProps) 
   const { basis, basisHash, decisions } = replant;
   const signed = decisions.find((each) => (each.zone?.id ?? null) === zone);
   const hasChanged = signed !== undefined && signed.basisHash !== basisHash;
+  // Then the frozen evidence is the standing one, and is shown once.
+  const isAsSigned = signed !== undefined && !hasChanged;
   // What was pressed stands far below the sentence that it changed.
   const showAnswer = () => {
     answer.current?.focus({ preventScroll: true });
@@ -54,17 +56,17 @@ export function Decide({ org, planting, zone, maySign, mayWrite }: DecideProps) 
           ) : (
             <Finding {...finding} />
           )}
-          {signed && hasChanged ? (
-            <>
-              <Disclosure label={decisionTexts.restedOn}>
-                <FrozenDecision decision={signed} units={units} />
-              </Disclosure>
-              <Section title={decisionTexts.now}>
-                <Finding {...finding} second />
-              </Section>
-            </>
+          {signed ? (
+            <Disclosure label={decisionTexts.restedOn} openAtFirst={isAsSigned}>
+              <FrozenDecision decision={signed} units={units} />
+            </Disclosure>
           ) : null}
-          <Evidence basis={basis} units={units} />
+          {signed && hasChanged ? (
+            <Section title={decisionTexts.now}>
+              <Finding {...finding} second />
+            </Section>
+          ) : null}
+          {isAsSigned ? null : <Evidence basis={basis} units={units} />}
           {basis.answer.kind === 'value' ? (
             <Section
               title={signed ? decisionTexts.decideAnew : decisionTexts.title}
@@ -82,9 +84,11 @@ export function Decide({ org, planting, zone, maySign, mayWrite }: DecideProps) 
           ) : null}
         </div>
         <div className="min-w-0">
-          <Section title={replantTexts.rests.title}>
-            <RestsOn basis={basis} units={units} today={today} uncountedLabels={replant.uncountedLabels} />
-          </Section>
+          {isAsSigned ? null : (
+            <Section title={replantTexts.rests.title}>
+              <RestsOn basis={basis} units={units} today={today} uncountedLabels={replant.uncountedLabels} />
+            </Section>
+          )}
           <OtherDecisions decisions={decisions.filter((each) => each !== signed)} units={units} />
         </div>
       </div>

@@ -54,6 +54,6 @@ export const decisionTexts = {
   was: (label: string, before: string, after: string) => `${label} was ${before}, is ${after} now.`,
   isNew: (label: string, after: string) => `${label} is new: ${after}.`,
   isGone: (label: string, before: string) => `${label} is gone; it was ${before}.`,
-  sameNumbers: 'A count or a figure was recorded again with the same number.',
+  sameNumbers: 'Something it rests on was made anew with the same numbers.',
   more: (count: string) => `And ${count} more.`,
 } as const;

@@ -72,6 +72,6 @@ describe('what changed between two bases', () => {
         { ...basis, countedRows: [row('R-1', 19_000, 'c9'), row('R-2', 21_000, 'c2')] },
         'metric',
       ),
-    ).toEqual(['A count or a figure was recorded again with the same number.']);
+    ).toEqual(['Something it rests on was made anew with the same numbers.']);
   });
 });

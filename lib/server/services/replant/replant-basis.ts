@@ -69,11 +69,13 @@ export function sheetOfScope(
 }
 
 export function zonesOf(core: CoreSamples): ZoneOfField[] {
-  return core.zones.map(({ id, name, areaUnit, areaThousandths }) => ({
+  const zones = core.zones.map(({ id, name, areaUnit, areaThousandths }) => ({
     id,
     name,
     acres: readingIn({ unit: areaUnit, thousandths: areaThousandths }, 'acres'),
   }));
+  // In one order always, also where two carry one name: the basis is hashed as it stands.
+  return zones.sort((a, b) => (`${a.name} ${a.id}` < `${b.name} ${b.id}` ? -1 : 1));
 }
 
 export function fieldAcresOf({ field }: CoreSamples): number | null {
