@@ -65,7 +65,7 @@ function TryDefined({ definition }: { definition: TryDefinition }) {
       <div role="status" className="flex flex-col gap-1">
         {answer.kind === 'answer' ? (
           <>
-            <p className="font-mono text-21 font-bold">{answer.text}</p>
+            <p className="text-21 font-bold">{answer.text}</p>
             {answer.facts ? (
               <dl className="border-t border-rule">
                 {answer.facts.map((fact) => (

@@ -51,7 +51,7 @@ export const comparisonTexts = {
       `Strip ${number} ran ${ran} where ${planned} was planned${reason}; it counts as what it ran.`,
     reason: (reason: string) => ` (${reason})`,
     asPlannedOnly: (strips: string) => `Nobody has said what was really run in ${strips}; the plan is taken.`,
-    lost: (number: number, reason: string, rows: string) => `Strip ${number} was lost${reason}; ${rows} in it are left out.`,
+    lost: (number: number, reason: string, rows: string) => `Strip ${number} was lost${reason}; left out with it: ${rows}.`,
     rowsNotCounted: (rows: string, labels: string) => `${rows} of the strips not counted: ${labels}.`,
     impossible: (rows: string, labels: string) => `${rows} left out, the readings contradict each other: ${labels}.`,
     outside: (rows: string) => `${rows} in no strip are left out of the comparison.`,

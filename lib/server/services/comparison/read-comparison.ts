@@ -2,7 +2,7 @@ import 'server-only';
 import { comparisonFinding, type HeadlineComparison } from '@/lib/agronomy/comparison-finding';
 import { randomisationTest } from '@/lib/agronomy/inference/randomisation-test';
 import { mapOutcome, type Outcome } from '@/lib/agronomy/outcome';
-import { comparedFigures, type Comparison } from '@/lib/schemas/comparison';
+import { comparedFigures, comparisonSchema, type Comparison } from '@/lib/schemas/comparison';
 import type { ReadContext } from '../../operations/context';
 import { readCoreSamples } from '../scores/core-samples';
 import { plantingFacts } from '../scores/planting-facts';
@@ -29,7 +29,8 @@ export async function readComparison(context: ReadContext, { planting }: { plant
   const dealt = new Set(
     core.strips.filter((strip) => !notes.blocksNotAsDealt.includes(strip.blockNumber)).map((strip) => strip.blockId),
   );
-  return {
+  // What leaves is what the schema names: a field added to the core later does not slip out with it.
+  return comparisonSchema.parse({
     kind: 'trial',
     planting: plantingFacts(core),
     trial: {
@@ -50,7 +51,7 @@ export async function readComparison(context: ReadContext, { planting }: { plant
       trial.randomSeed,
     ),
     notes,
-  };
+  } satisfies Comparison);
 }
 
 function headlineComparison(main: ComparedFigureResult, { rule }: ComparisonPlan): Outcome<HeadlineComparison> {

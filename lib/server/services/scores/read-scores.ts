@@ -1,7 +1,7 @@
 import 'server-only';
 import { can } from '@/lib/access/can';
 import type { RowSample } from '@/lib/agronomy/row-sample';
-import type { ScoreLevel, ScoredSetting, ScoredStrip, Scores } from '@/lib/schemas/scores';
+import { scoresSchema, type ScoreLevel, type ScoredSetting, type ScoredStrip, type Scores } from '@/lib/schemas/scores';
 import type { ReadContext } from '../../operations/context';
 import { readCoreSamples, type CoreSamples } from './core-samples';
 import { fieldZones, standOfParts } from './field-zones';
@@ -27,7 +27,8 @@ export async function readScores(
   const { parts, acresNotSampled, rowSamplesOutside } = fieldZones(core, sound.samples);
   const stand = parts.length > 0 ? standOfParts(parts) : null;
   const acresTotal = parts.reduce((sum, part) => sum + part.acres, 0);
-  return {
+  // What leaves is what the schema names: a field added to the core later does not slip out with it.
+  return scoresSchema.parse({
     planting: plantingFacts(core),
     level,
     things: {
@@ -50,7 +51,7 @@ export async function readScores(
     rowSamples:
       level === 'row-sample' ? inFieldOrder(core).map((rowSample) => scoredRow(core, sound, rowSample, seesSettings)) : [],
     notes: scoreNotes(core, sound),
-  };
+  } satisfies Scores);
 }
 
 const byLabel = new Intl.Collator('en-US', { numeric: true });
