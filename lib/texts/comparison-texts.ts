@@ -54,9 +54,9 @@ export const comparisonTexts = {
     lost: (number: number, reason: string, rows: string) => `Strip ${number} was lost${reason}; left out with it: ${rows}.`,
     rowsNotCounted: (rows: string, labels: string) => `${rows} of the strips not counted: ${labels}.`,
     impossible: (rows: string, labels: string) => `${rows} left out, the readings contradict each other: ${labels}.`,
-    outside: (rows: string) => `${rows} in no strip are left out of the comparison.`,
+    outside: (rows: string) => `Left out of the comparison, in no strip: ${rows}.`,
     notAsDealt: (blocks: string) => `The randomization test leaves out block ${blocks}, which was not run as chance dealt it.`,
-    withoutFigure: (strips: string, name: string) => `${strips} without a ${name} are not in the comparison.`,
+    withoutFigure: (strips: string, name: string) => `Not in the comparison for want of the ${name}: ${strips}.`,
   },
   curves: {
     title: 'How each setting came up',
