@@ -2,7 +2,6 @@
 
 import { useQuery } from '@tanstack/react-query';
 import { PageHead } from '@/components/shell/page-head';
-import { EmptyState } from '@/components/ui/empty-state';
 import { LinkButton } from '@/components/ui/link-button';
 import { Notice } from '@/components/ui/notice';
 import { Skeleton } from '@/components/ui/skeleton';
@@ -30,9 +29,11 @@ export function ComparisonView({ plantingId }: { plantingId: string }) {
   if (!comparison) return error ? <Notice title={error.message}>{scoreTexts.tryAgain}</Notice> : <Skeleton label={texts.reading} lines={6} />;
   if (comparison.kind === 'no-trial') {
     return (
-      <EmptyState title={texts.noTrial} action={<LinkButton href={paths.plan(organisationId, plantingId)}>{texts.toPlan}</LinkButton>}>
-        {texts.noTrialHint}
-      </EmptyState>
+      <PageHead
+        title={texts.noTrial}
+        sub={texts.noTrialHint}
+        actions={<LinkButton href={paths.plan(organisationId, plantingId)}>{texts.toPlan}</LinkButton>}
+      />
     );
   }
   return (
@@ -52,17 +53,21 @@ function TrialFinding({ comparison }: { comparison: TrialComparison }) {
   const { units } = useWho();
   const { headline, sub, more } = comparisonWords(comparison, units);
   const notes = [...more, ...noteSentences(comparison, units)];
+  if (notes.length === 0) return <PageHead title={headline} sub={<p>{sub.join(' ')}</p>} />;
   return (
-    <>
+    <div className="grid gap-x-10 lg:grid-cols-[minmax(0,1.55fr)_minmax(0,1fr)]">
       <PageHead title={headline} sub={<p>{sub.join(' ')}</p>} />
-      {notes.length > 0 ? (
-        <ul className="-mt-4 flex max-w-reading flex-col gap-1 pb-8 text-15">
+      <aside aria-labelledby="beside" className="-mt-2 pb-8 lg:mt-1 lg:border-l-2 lg:border-rule lg:pl-6">
+        <h2 id="beside" className="text-15">
+          {texts.notes.title}
+        </h2>
+        <ul className="flex max-w-reading flex-col gap-1.5 pt-1 text-15">
           {notes.map((sentence) => (
             <li key={sentence}>{sentence}</li>
           ))}
         </ul>
-      ) : null}
-    </>
+      </aside>
+    </div>
   );
 }
 

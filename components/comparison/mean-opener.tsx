@@ -51,7 +51,7 @@ export function MeanOpener({ comparison, figure, setting }: MeanOpenerProps) {
     : [];
   return (
     <NumberSource
-      label={`${setting.name}: ${words.name}`}
+      label={[`${setting.name}: ${words.name}`, words.columnUnit].filter(Boolean).join(', ')}
       text={meanText({ comparison, figure, setting }, words).text}
       inputs={[...strips, ...spread]}
       {...(id ? { entry: register[id] } : {})}

@@ -58,7 +58,11 @@ function Group({ title, studies, settings, planting, columns }: GroupProps) {
   const said = studies.filter((study) => settings.some((setting) => setting.scored.penalties[study].kind === 'value'));
   return (
     <>
-      <h3 className="pt-4 pb-1 text-15">{title}</h3>
+      <div role="row" className="pt-4 pb-1">
+        <span role="rowheader" className="text-15 font-bold">
+          {title}
+        </span>
+      </div>
       {said.map((study) => (
         <div role="row" key={study} className="grid items-baseline gap-x-4 border-b border-rule py-1.5 md:grid-cols-[13rem_1fr]">
           <span role="rowheader" className="text-15">
@@ -82,9 +86,11 @@ function Group({ title, studies, settings, planting, columns }: GroupProps) {
         </div>
       ))}
       {unsaid(studies, settings).map((sentence) => (
-        <p key={sentence} className="pt-2 text-13 text-ink-soft">
-          {sentence}
-        </p>
+        <div role="row" key={sentence} className="pt-2">
+          <span role="cell" className="text-13 text-ink-soft">
+            {sentence}
+          </span>
+        </div>
       ))}
     </>
   );

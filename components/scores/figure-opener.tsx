@@ -24,7 +24,9 @@ export function FigureOpener({ id, subject, text, of }: FigureOpenerProps) {
   const shown = shownFigure(id, subject, units);
   const pooled = subject.pooled;
   const taken = pooled && !isPenalty(id) ? scoreTexts.pooled[isTiming(id) ? pooled.definition.timing : pooled.definition.stand] : null;
-  const note = [shown.detail, isTiming(id) || id === 'plantsPerAcre' ? taken : null].filter(Boolean).join(' ');
+  // A column head holds the unit; opened, the number stands by itself.
+  const whole = text !== undefined && text !== shown.text && shown.sort !== null ? `${shown.text}.` : null;
+  const note = [whole, shown.detail, isTiming(id) || id === 'plantsPerAcre' ? taken : null].filter(Boolean).join(' ');
   return (
     <NumberSource
       label={of ? `${of}: ${shown.label}` : shown.label}
