@@ -16,7 +16,7 @@ export function FigureList({ ids, subject }: FigureListProps) {
       {ids.map((id) => {
         const shown = shownFigure(id, subject, units);
         return (
-          <div key={id} className="grid grid-cols-[1fr_auto] items-baseline gap-x-4 border-b border-rule py-2">
+          <div key={id} className="grid grid-cols-[minmax(0,1fr)_auto] items-baseline gap-x-4 border-b border-rule py-2">
             <dt className="text-15">{shown.label}</dt>
             <dd className="text-right font-mono text-15">
               <FigureOpener id={id} subject={subject} />
