@@ -20,12 +20,12 @@ export function ScoreParts({ subject }: { subject: FigureSubject }) {
   const whole = score.kind === 'value' ? score.value : null;
   return (
     <div className="flex flex-col gap-3">
-      <ul className="flex flex-col gap-2">
+      <ul className="grid grid-cols-[auto_minmax(0,1fr)_auto] items-center gap-x-3 gap-y-2">
         {parts.map(({ name, id }) => {
           const part = subject.figures[id];
           const leftOut = whole === null || whole.leftOut.includes(name);
           return (
-            <li key={name} className="grid grid-cols-[5.5rem_minmax(0,1fr)_auto] items-center gap-x-3">
+            <li key={name} className="contents">
               <span className="text-15">
                 {scoreTexts.parts[name]}
                 <span className="block text-13 text-ink-soft">
@@ -39,7 +39,7 @@ export function ScoreParts({ subject }: { subject: FigureSubject }) {
                 ))}
                 {part.kind === 'value' ? <rect x={0} y={3} width={`${part.value.points}%`} height={9} className="fill-ink" /> : null}
               </svg>
-              <span className="min-w-22 text-right font-mono text-15 whitespace-nowrap">
+              <span className="text-right font-mono text-15 whitespace-nowrap">
                 <FigureOpener id={id} subject={subject} text={part.kind === 'value' ? shownFigure(id, subject, units).text : undefined} />
               </span>
             </li>
