@@ -1,6 +1,5 @@
 'use client';
 
-import { useRouter } from 'next/navigation';
 import { Button } from '@/components/ui/button';
 import type { AskedOperation } from '@/lib/client/use-asked-operation';
 import { formTexts } from '@/lib/texts/form-texts';
@@ -11,11 +10,12 @@ type RefusalProps = {
   operation: AskedOperation;
   /** How this form says yes to what is asked. */
   yes?: string;
+  /** Fetches what stands now, after somebody else's edit came first. */
+  onShowStanding?: () => void;
 };
 
 /** Why a form was not taken: questions to answer, somebody else's edit to look at, or fields to mend. What was typed stays. */
-export function Refusal({ operation, yes }: RefusalProps) {
-  const router = useRouter();
+export function Refusal({ operation, yes, onShowStanding }: RefusalProps) {
   const { error, attempt, isPending } = operation;
   if (!error) return null;
   if (error.problem.code === 'needs-confirmation') {
@@ -31,10 +31,10 @@ export function Refusal({ operation, yes }: RefusalProps) {
   return (
     <div className="flex flex-col gap-2">
       <ProblemSummary error={error} attempt={attempt} />
-      {error.problem.code === 'conflict' ? (
+      {error.problem.code === 'conflict' && onShowStanding ? (
         <div className="flex max-w-reading flex-col items-start gap-2 pl-6">
           <p>{formTexts.standingShown}</p>
-          <Button look="secondary" onClick={() => router.refresh()}>
+          <Button look="secondary" onClick={onShowStanding}>
             {formTexts.showStanding}
           </Button>
         </div>

@@ -14,7 +14,7 @@ export const fullYieldRule: ReadingRule = { unit: 'bu/ac', otherUnits: ['t/ha'],
 
 /** A planting date outside these years is a slip of the finger. */
 export const earliestYear = 1990;
-const daysAfterPlanting = (what: string) => z.number().int().min(1, `Give ${what} in whole days.`).max(60, `Give ${what} in days, at most 60.`);
+const daysAfterPlanting = (what: string) => z.number(`Give ${what} in whole days.`).int(`Give ${what} in whole days.`).min(1, `Give ${what} in whole days.`).max(60, `Give ${what} in days, at most 60.`);
 
 export const plantingSchema = z
   .object({

@@ -15,6 +15,10 @@ export async function findTrialOfPlanting(tx: Transaction, params: { organisatio
   return rows[0];
 }
 
+export async function listTrials(tx: Transaction, params: { organisationId: string }) {
+  return tx.select().from(trial).where(and(eq(trial.organisationId, params.organisationId), isNull(trial.removedAt)));
+}
+
 export async function findTrial(tx: Transaction, params: { organisationId: string; trialId: string }) {
   const rows = await tx
     .select()
@@ -23,7 +27,14 @@ export async function findTrial(tx: Transaction, params: { organisationId: strin
   return rows[0];
 }
 
-/** The trials, standing ones only, in which a setting is the reference or was drawn for a strip is asked of data/strip. */
+export async function findStudy(tx: Transaction, params: { organisationId: string; studyId: string }) {
+  const rows = await tx
+    .select({ id: study.id, name: study.name })
+    .from(study)
+    .where(and(eq(study.organisationId, params.organisationId), eq(study.id, params.studyId)));
+  return rows[0];
+}
+
 export async function insertTrial(tx: Transaction, values: typeof trial.$inferInsert) {
   await tx.insert(trial).values(values);
 }
