@@ -33,5 +33,6 @@ export async function applyGrants(client: Client): Promise<void> {
   await client.query(`GRANT SELECT, INSERT, UPDATE ON ${list(changeable)} TO rowrise_app`);
   await client.query(`GRANT SELECT, INSERT, UPDATE, DELETE ON ${list(free)} TO rowrise_app`);
   await client.query('GRANT EXECUTE ON FUNCTION organisations_with_unsealed_events() TO rowrise_app');
+  await client.query('GRANT EXECUTE ON FUNCTION organisations_of_person(uuid) TO rowrise_app');
   await client.query(`GRANT SELECT, DELETE ON ${list(erasableTables)} TO rowrise_eraser`);
 }

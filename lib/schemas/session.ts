@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { timeZoneSchema } from './operation';
 import { emailSchema, newPasswordSchema } from './password';
 import { unitSystems } from './vocabulary';
 
@@ -19,7 +20,7 @@ export const openLinkSchema = z.object({
   name: z.string().trim().min(1, 'Type your name.').max(100).optional(),
   email: emailSchema.optional(),
   organisationName: z.string().trim().min(1, 'Name the account, such as the crop service or farm.').max(100).optional(),
-  timeZone: z.string().max(60).optional(),
+  timeZone: timeZoneSchema.optional(),
   password: newPasswordSchema,
 });
 export type OpenLinkInput = z.infer<typeof openLinkSchema>;

@@ -28,3 +28,9 @@ export async function updatePassword(tx: Transaction, params: { personId: string
 export async function updateUnits(db: Database, params: { personId: string; units: UnitSystem }) {
   await db.update(person).set({ units: params.units }).where(eq(person.id, params.personId));
 }
+
+/** Whether anybody has an account here at all. */
+export async function hasPeople(db: Database): Promise<boolean> {
+  const rows = await db.select({ id: person.id }).from(person).limit(1);
+  return rows.length > 0;
+}

@@ -7,7 +7,7 @@ import { hashPassword, passwordMatches } from '../../session/password';
 import type { SignedIn } from '../../session/current-person';
 import type { Caller } from '../../http/person-route';
 import { assertNotThrottled, noteFailure } from '../../session/throttle';
-import { startSession } from './sign-in';
+import { startSession } from './start-session';
 
 /** Changes a password. Every session of the person ends at once; this browser starts a new one. */
 export async function changePassword(person: SignedIn, input: { current: string; next: string }, caller: Caller): Promise<void> {
