@@ -28,7 +28,7 @@ export async function findOpenLink(db: Database | Transaction, params: { secretH
 }
 
 /** Uses a link up. The first of several that open it at once wins; the others are told that it did not. */
-export async function useLink(tx: Transaction, params: { linkId: string; now: string }) {
+export async function claimLink(tx: Transaction, params: { linkId: string; now: string }) {
   const used = await tx
     .update(oneTimeLink)
     .set({ usedAt: params.now })

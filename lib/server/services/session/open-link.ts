@@ -6,7 +6,7 @@ import { AppError, badField } from '@/lib/errors/app-error';
 import type { OpenLinkInput } from '@/lib/schemas/session';
 import { wallClock } from '../../clock';
 import { joinOrganisation, setFarmsOfPerson } from '../../data/membership';
-import { findOpenLink, useLink, type OneTimeLinkRow } from '../../data/one-time-link';
+import { findOpenLink, claimLink, type OneTimeLinkRow } from '../../data/one-time-link';
 import { insertOrganisation } from '../../data/organisation';
 import { findPersonByEmail, insertPerson, updatePassword } from '../../data/person';
 import { revokeSessionsOfPerson } from '../../data/session';
@@ -33,7 +33,7 @@ export async function openLink(input: OpenLinkInput, caller: Caller): Promise<st
 }
 
 async function takeLink(tx: Transaction, link: OneTimeLinkRow, now: string) {
-  if (!(await useLink(tx, { linkId: link.id, now }))) throw new AppError('link-used');
+  if (!(await claimLink(tx, { linkId: link.id, now }))) throw new AppError('link-used');
 }
 
 async function makeFirstOwner(link: OneTimeLinkRow, input: OpenLinkInput, _caller: Caller, now: string): Promise<string> {

@@ -1,0 +1,37 @@
+/** The words of the pages that a one-time link opens. */
+export const linkTexts = {
+  firstOwnerTitle: 'Make your account',
+  firstOwnerLead: 'You are the first here. You become the owner and invite the others.',
+  invitationTitle: (name: string) => `Welcome, ${name}`,
+  invitationLead: (email: string) => `You sign in as ${email}. Choose a password.`,
+  joinLead: (email: string) => `There is an account for ${email} already. Type its password to join with it.`,
+  resetTitle: 'Choose a new password',
+  resetLead: 'Every browser that is signed in with the old one is signed out.',
+  goneTitle: 'This link does not open anything',
+  goneLead: 'It was used, taken back, or is too old. Ask for a new one.',
+  organisationName: 'Name of the account',
+  organisationHint: 'Such as the crop service or the farm.',
+  timeZone: 'Time zone',
+  yourName: 'Your name',
+  password: 'Password',
+  newPassword: 'New password',
+  presentPassword: 'Your password',
+  passwordHint: 'At least 15 characters. A short sentence is easy to remember.',
+  open: 'Go on',
+} as const;
+
+export const preferencesTexts = {
+  title: 'Preferences',
+  lead: 'Your own choices. They hold in every account you belong to.',
+  units: 'Units',
+  us: 'US: inches, feet, acres, bushels',
+  metric: 'Metric: centimeters, meters, hectares, tonnes',
+  saveUnits: 'Save units',
+  unitsSaved: 'Saved. Readings stay as they were typed.',
+  passwordTitle: 'Password',
+  present: 'Present password',
+  next: 'New password',
+  changePassword: 'Change password',
+  passwordChanged: 'Changed. Every other browser is signed out.',
+  back: 'Back to the start page',
+} as const;
