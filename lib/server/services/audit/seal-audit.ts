@@ -1,5 +1,5 @@
 import 'server-only';
-import { inOrganisation, type Database } from '@/db/connection';
+import { inOrganisation, type Database, type Transaction } from '@/db/connection';
 import { findLastSeal, insertSeals, listOrganisationsToSeal, listSealedEvents, listUnsealedEvents, lockSeals } from '../../data/audit-seal';
 import { chainHash, chainStart } from './chain-hash';
 
@@ -29,15 +29,13 @@ export async function sealAudit(db: Database): Promise<number> {
 }
 
 /** The place of the first link that does not follow from the one before, or undefined where the chain is whole. */
-export function findBrokenSeal(db: Database, organisationId: string): Promise<number | undefined> {
-  return inOrganisation(db, { organisationId }, async (tx) => {
-    let before = chainStart;
-    let expectedPlace = 1;
-    for (const { place, chainHash: sealed, ...event } of await listSealedEvents(tx, { organisationId })) {
-      before = chainHash(before, event);
-      if (place !== expectedPlace || sealed !== before) return expectedPlace;
-      expectedPlace += 1;
-    }
-    return undefined;
-  });
+export async function findBrokenSeal(tx: Transaction, organisationId: string): Promise<number | undefined> {
+  let before = chainStart;
+  let expectedPlace = 1;
+  for (const { place, chainHash: sealed, ...event } of await listSealedEvents(tx, { organisationId })) {
+    before = chainHash(before, event);
+    if (place !== expectedPlace || sealed !== before) return expectedPlace;
+    expectedPlace += 1;
+  }
+  return undefined;
 }
