@@ -24,7 +24,9 @@ export default async function PreferencesPage() {
       <PageHead title={preferencesTexts.title} sub={preferencesTexts.lead} kicker={person.name} />
       <Section title={preferencesTexts.units}>
         <UnitsForm units={person.units} />
-        <ThemeChoice />
+        <div className="max-w-form">
+          <ThemeChoice />
+        </div>
       </Section>
       <Section title={preferencesTexts.passwordTitle}>
         <PasswordForm email={person.email} />
