@@ -25,7 +25,7 @@ export function RowsToCount({ org, plantings }: RowsToCountProps) {
             </h2>
             <p className="pb-2">
               <Link className="flex min-h-press items-center font-bold" href={paths.count(org, planting.plantingId)}>
-                {startTexts.open.count}
+                {startTexts.allCounts}
               </Link>
             </p>
             <ul className="grid grid-cols-3 gap-2 sm:grid-cols-6 lg:grid-cols-8">

@@ -10,8 +10,8 @@ export const startTexts = {
   noFarmSeen: 'You are attached to no farm yet. Ask the owner of the account.',
   waiting: (count: string) => `${count} ${count === '1' ? 'planting awaits' : 'plantings await'} a decision`,
   counting: (count: string) => `${count} ${count === '1' ? 'planting' : 'plantings'} this season`,
-  rowsToCount: (count: string) => `${count} row ${count === '1' ? 'sample' : 'samples'} to type in`,
-  nothingToCount: 'There are no row samples to type in yet',
+  rowsToCount: (count: string) => `${count} row ${count === '1' ? 'sample' : 'samples'} on your farms`,
+  nothingToCount: 'There are no row samples on your farms yet',
   growerNone: 'No decision waits for you',
   scoutLead: 'Choose the row whose paper sheet is in your hand.',
   thisSeason: 'This season',
@@ -24,5 +24,6 @@ export const startTexts = {
   awaits: 'Awaits a decision',
   signed: { keep: 'Keep, signed', replant: 'Replant, signed' } satisfies Record<DecisionChoice, string>,
   open: { plan: 'Plan', count: 'Count', scores: 'Scores', compare: 'Compare', decide: 'Decide' },
+  allCounts: 'All counts of this planting',
   notCounted: 'not counted yet',
 } as const;

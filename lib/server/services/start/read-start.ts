@@ -41,7 +41,10 @@ export async function readStart({ tx, actor, clock, organisation }: ReadContext)
       trial: trial ? { locked: trial.lockedAt !== null } : null,
       summedUp: decision?.summedUp ?? false,
       decided: decision?.newestDecision ? { choice: decision.newestDecision.decided, at: decision.newestDecision.signedAt } : null,
-      rows: samples.map((sample) => ({ id: sample.id, label: sample.label, visited: visited.has(sample.id) })),
+      rows: samples
+        .map((sample) => ({ id: sample.id, label: sample.label, visited: visited.has(sample.id) }))
+        // S2-1 stands before S10-1, as the pegs do in the field.
+        .sort((a, b) => a.label.localeCompare(b.label, 'en', { numeric: true })),
     });
   }
   return { farms: farms.length, fields: fields.length, plantings: seasons };

@@ -1,0 +1,38 @@
+import type { AdjustedFrom, CleanerKind, PressureDirection, WheelKind } from '@/lib/schemas/vocabulary';
+
+/** The words of residue settings, in the trade's terms. */
+export const settingTexts = {
+  title: 'Settings of the row cleaners',
+  lead: 'What trials compare. They belong to the account, so that seasons and fields can be put together.',
+  none: 'No setting yet',
+  noneHint: 'Add the settings you want to compare, the present one among them.',
+  addTitle: 'Add a setting',
+  add: 'Add setting',
+  save: 'Save setting',
+  change: (name: string) => `Change ${name}`,
+  remove: (name: string) => `Remove ${name}`,
+  removeExplanation: 'It goes from the list. A setting that a trial compares stays.',
+  name: 'Name',
+  nameHint: 'Short, as it stands in tables: Floating, light down.',
+  phrase: 'After "with"',
+  phraseHint: 'How a sentence says it: the cleaners floating and light down.',
+  preview: (phrase: string) => `With ${phrase}, the stand came up 1 day tighter.`,
+  previewLead: 'A finding would read, for instance:',
+  cleaner: 'Row cleaner',
+  cleaners: { none: 'None, or raised', fixed: 'Fixed', floating: 'Floating' } satisfies Record<CleanerKind, string>,
+  wheels: 'Wheels',
+  wheelKinds: { smooth: 'Smooth-edged', toothed: 'Toothed' } satisfies Record<WheelKind, string>,
+  pressureDirection: 'Pressure on the cleaner',
+  directions: { 'own-weight': 'Own weight', down: 'Down', lift: 'Lift' } satisfies Record<PressureDirection, string>,
+  pressure: 'How much pressure',
+  pressureHint: 'lbf, psi, N or kPa, as the planter says it. Not the row unit’s downforce.',
+  workingDepth: 'Working depth',
+  workingDepthHint: 'Of the cleaner, not of the seed.',
+  adjustedFrom: 'Adjusted from',
+  places: { cab: 'The cab', wrench: 'The row unit, with a wrench' } satisfies Record<AdjustedFrom, string>,
+  note: 'Note',
+  notGiven: 'Not given',
+  trials: (count: string) => `compared in ${count}`,
+  caution:
+    'Before reaching into a row unit: stop the engine, lower or block the planter, and relieve the air pressure. Follow the operator’s manual.',
+} as const;
