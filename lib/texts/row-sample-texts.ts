@@ -1,0 +1,45 @@
+import type { RowEnd } from '@/lib/schemas/vocabulary';
+
+/** The words of row samples: the measured lengths that are counted. */
+export const rowSampleTexts = {
+  title: 'Row samples',
+  lead: 'Measured lengths of planter row, pegged and labeled; the same places are counted day after day.',
+  none: 'No row sample yet',
+  noneHint: 'Lay them out here; the scout types counts in under their labels.',
+  suggestion: (length: string, spacing: string) =>
+    `${length} of a ${spacing} row is 1/1000 of an acre. Any measured length will do; plants per area are figured from the length that was measured.`,
+  suggestionMetric: (length: string, spacing: string) =>
+    `${length} of a ${spacing} row is 1/1000 of a hectare. Any measured length will do; plants per area are figured from the length that was measured.`,
+  perStrip: 'Row samples in every strip',
+  planterRows: 'Planter rows',
+  planterRowsHint: 'One number for each, such as 3, 5, 6: the same units in every strip, no end, guess or wheel rows.',
+  howMany: 'How many',
+  prefix: 'Label begins with',
+  length: 'Length',
+  ends: 'The tape runs',
+  endKinds: {
+    'mark-mark': 'from a mark to a mark',
+    'plant-plant': 'from a plant to a plant',
+    'mark-plant': 'from a mark to a plant',
+    'plant-mark': 'from a plant to a mark',
+  },
+  endsHint: 'Between two marks all plants belong to the length; from plant to plant it holds one fewer.',
+  end: { mark: 'mark', plant: 'plant' } satisfies Record<RowEnd, string>,
+  zone: 'Zone',
+  noZone: 'No zone',
+  label: 'Label on the peg',
+  planterRow: 'Planter row',
+  addToStrips: 'Lay them out',
+  addFree: 'Add row samples',
+  inStrips: 'In the strips',
+  free: 'Free in the field',
+  line: (label: string, length: string) => `${label}: ${length}`,
+  strip: (number: string) => `strip ${number}`,
+  row: (number: string) => `planter row ${number}`,
+  counted: 'counted',
+  change: (label: string) => `Change ${label}`,
+  remove: (label: string) => `Remove ${label}`,
+  removeExplanation: 'The place goes from the plan. A counted one stays.',
+  save: 'Save row sample',
+  badRows: (count: number) => `Give ${count} planter rows, such as 3, 5, 6, or leave it empty.`,
+} as const;
