@@ -14,7 +14,7 @@ import { RadioGroup } from '@/components/ui/radio-group';
 import { Select } from '@/components/ui/select';
 import { TextInput } from '@/components/ui/text-input';
 import { useAskedOperation } from '@/lib/client/use-asked-operation';
-import { pValueText } from '@/lib/format/p-value-text';
+import { oneInText } from '@/lib/format/one-in-text';
 import { blocksMost } from '@/lib/schemas/trial';
 import { comparisonRules, mainFigures } from '@/lib/schemas/vocabulary';
 import { trialTexts } from '@/lib/texts/trial-texts';
@@ -147,7 +147,7 @@ export function TrialForm({ plantingId, settings, standing, onDone }: TrialFormP
 export function Reach({ p }: { p: number }) {
   return (
     <p className="max-w-reading">
-      {trialTexts.reach(pValueText(p))} {p > 0.05 ? <span className="font-bold text-flag-text">{trialTexts.reachWeak}</span> : null}
+      {trialTexts.reach(oneInText(p))} {p > 0.05 ? <span className="font-bold text-flag-text">{trialTexts.reachWeak}</span> : null}
     </p>
   );
 }

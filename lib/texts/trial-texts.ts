@@ -34,8 +34,9 @@ export const trialTexts = {
   drawAgain: 'Draw with another seed',
   strip: (number: string) => `Strip ${number}`,
   block: (number: string) => `Block ${number}`,
-  reach: (p: string) => `However large the difference, the exact test of this layout can reach no less than ${p}.`,
-  reachWeak: 'That is more than 0.05: this layout alone cannot show a difference by the exact test. Add blocks.',
+  reach: (chance: string) =>
+    `However large the difference, chance alone would do as well in at least ${chance} of the layouts that could have been drawn; the exact test can say no more than that.`,
+  reachWeak: 'That is more than 1 in 20: this layout cannot show a difference by the exact test. Add blocks.',
   caution:
     'Before changing a setting at the planter: stop the engine, lower or block the planter, and relieve the air pressure before reaching into a row unit. Follow the operator’s manual.',
   save: 'Keep this layout',
