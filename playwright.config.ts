@@ -28,7 +28,12 @@ export default defineConfig({
     },
   },
   projects: [
-    { name: 'phone', use: { viewport: { width: 390, height: 844 }, hasTouch: true } },
+    {
+      name: 'phone',
+      use: { viewport: { width: 390, height: 844 }, hasTouch: true },
+      // The first owner comes in once, and who may do what does not depend on the screen.
+      testIgnore: ['new-owner.spec.ts', 'access.spec.ts'],
+    },
     { name: 'desk', use: { viewport: { width: 1440, height: 900 } } },
   ],
 });
