@@ -40,7 +40,7 @@ test('a bad line of a file is named, and nothing of the file is taken', async ({
   await signInAs(page, 'scout', 'Pell');
   await page.getByRole('link', { name: 'All counts of this planting' }).first().click();
   await page.getByRole('link', { name: 'Take counts in by file' }).click();
-  await page.getByLabel(/paste/i).first().fill('row_sample,date,time,so_far,new,doubtful,marker\nS1-1,2026-05-25,,31,,,\nNOWHERE,2026-05-25,,30,,,\n');
-  await expect(page.getByText(/NOWHERE/).first()).toBeVisible();
+  await page.getByLabel(/paste/i).first().fill('row_sample,date,time,so_far,doubtful,marker\nS1-1,2026-05-25,09:00,31,,\nNOWHERE,2026-05-25,09:00,30,,\n');
+  await expect(page.getByRole('main').getByText(/NOWHERE/).last()).toBeVisible();
   await expectReadable(page);
 });

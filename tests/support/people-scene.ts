@@ -1,6 +1,6 @@
 import { sql } from 'drizzle-orm';
 import { v7 } from 'uuid';
-import type { Database } from '@/db/connection';
+import { inTransaction, type Database } from '@/db/connection';
 import { allOperations } from '@/lib/server/operations/all-operations';
 import { applyOperation } from '@/lib/server/operations/apply-operation';
 import { withActor } from '@/lib/server/operations/actor-context';
@@ -19,7 +19,7 @@ export async function firstOwner(db: Database, email = `${v7()}@example.test`) {
   const secret = newSecret();
   await insertLink(db, { id: v7(), secretHash: hashOfSecret(secret), purpose: 'first-owner', expiresAt: new Date(Date.now() + 60_000).toISOString() });
   const personId = await openLink({ secret, name: 'Test Owner', email, organisationName: 'Test account', timeZone: 'America/Chicago', password }, caller);
-  const found = await db.transaction(async (tx) => {
+  const found = await inTransaction(db, async (tx) => {
     await tx.execute(sql`select set_config('app.person_id', ${personId}, true)`);
     return tx.execute<{ organisation_id: string }>(sql`select organisation_id from membership where person_id = ${personId}`);
   });

@@ -1,4 +1,5 @@
 import 'server-only';
+import { inTransaction } from '@/db/connection';
 import { badField } from '@/lib/errors/app-error';
 import { findPasswordHash, updatePassword } from '../../data/person';
 import { revokeSessionsOfPerson } from '../../data/session';
@@ -22,7 +23,7 @@ export async function changePassword(person: SignedIn, input: { current: string;
     throw badField('current', 'This is not your present password.');
   }
   const passwordHash = await hashPassword(input.next);
-  await database().transaction(async (tx) => {
+  await inTransaction(database(), async (tx) => {
     await updatePassword(tx, { personId: person.personId, passwordHash });
     await revokeSessionsOfPerson(tx, { personId: person.personId });
   });

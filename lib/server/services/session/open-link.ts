@@ -1,6 +1,6 @@
 import 'server-only';
 import type { Transaction } from '@/db/connection';
-import { inOrganisation } from '@/db/connection';
+import { inOrganisation, inTransaction } from '@/db/connection';
 import { v7 } from 'uuid';
 import { AppError, badField } from '@/lib/errors/app-error';
 import type { OpenLinkInput } from '@/lib/schemas/session';
@@ -77,7 +77,7 @@ async function resetPassword(link: OneTimeLinkRow, input: OpenLinkInput, _caller
   const { personId } = link;
   if (!personId) throw new AppError('link-used');
   const passwordHash = await hashPassword(input.password);
-  await database().transaction(async (tx) => {
+  await inTransaction(database(), async (tx) => {
     await takeLink(tx, link, now);
     await updatePassword(tx, { personId, passwordHash });
     await revokeSessionsOfPerson(tx, { personId });
