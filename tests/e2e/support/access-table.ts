@@ -3,9 +3,10 @@ import type { Things } from './demo-things';
 /**
  * Who gets what, reviewed by hand: for every page and route the status that each person is answered with, for
  * a thing [of their own | on a farm they are not attached to | of another organisation | that never existed].
- * Owners and agronomists see every farm of their organisation. A dash says that the noun does not hang on a farm.
+ * Owners and agronomists see every farm of their organisation. A dash says that there is no such thing to ask about.
  */
-export type Statuses = readonly [own: number, notAssigned: number | '-', another: number, never: number];
+export type Status = number | '-';
+export type Statuses = readonly [own: Status, notAssigned: Status, another: Status, never: Status];
 export type Insider = 'scout' | 'agronomist' | 'grower' | 'owner';
 export const insiders = ['scout', 'agronomist', 'grower', 'owner'] as const;
 

@@ -1,5 +1,5 @@
 import { insiders, type Insider, type Statuses } from './access-table';
-import type { Things } from './demo-things';
+import { things, type Things } from './demo-things';
 
 type Sent = { thingId: string; body: Record<string, unknown> };
 
@@ -23,6 +23,7 @@ const row = (kind: string, statuses: readonly [Statuses, Statuses, Statuses, Sta
 });
 
 const planners = [barred, everyFarm, barred, everyFarm] as const;
+const adds = [[403, '-', '-', '-'], [422, '-', '-', '-'], [403, '-', '-', '-'], [422, '-', '-', '-']] as const;
 const fresh = () => crypto.randomUUID();
 const beforePlanting = () => ({ id: fresh(), personId: null, visitedOn: '2026-01-05', visitedAt: null, marker: null });
 const noFarm = { name: 'Sent by a test', timeZone: 'America/Chicago' };
@@ -47,15 +48,17 @@ const layout = () => ({
 // prettier-ignore
 export const writesOfOrganisation: Record<string, readonly WriteRow[]> = {
   'POST /api/o/[org]/farms': [
+    row('farm.add', adds, () => ({ thingId: fresh(), body: { ...noFarm, name: '' } })),
     row('farm.change', planners, (it) => ({ thingId: it.farm, body: noFarm })),
     row('farm.remove', planners, (it) => ({ thingId: it.farm, body: {} })),
   ],
   'POST /api/o/[org]/fields': [
-    row('field.add', [barred, [422, 422, 422, 422], barred, [422, 422, 422, 422]], (it) => ({ thingId: fresh(), body: { farmId: it.farm, name: '', area: null } })),
+    row('field.add', planners, (it, expected) => ({ thingId: fresh(), body: { farmId: it.farm, name: expected === 404 ? noFarm.name : '', area: null } })),
     row('field.change', planners, (it) => ({ thingId: it.field, body: { name: 'Sent by a test', area: null } })),
     row('field.remove', planners, (it) => ({ thingId: it.field, body: {} })),
   ],
   'POST /api/o/[org]/settings': [
+    row('setting.add', adds, () => ({ thingId: fresh(), body: { ...setting, name: '' } })),
     row('setting.change', [barredAnywhere, anywhere, barredAnywhere, anywhere], (it) => ({ thingId: it.setting, body: setting })),
     row('setting.remove', [barredAnywhere, anywhere, barredAnywhere, anywhere], (it) => ({ thingId: it.setting, body: {} })),
   ],
@@ -98,10 +101,10 @@ export const writesOfOrganisation: Record<string, readonly WriteRow[]> = {
     row('decision.sign', [barred, barred, [409, 404, 404, 404], [409, 409, 404, 404]], (it) => ({ thingId: fresh(), body: { plantingId: it.planting, zoneId: null, decided: 'keep', signedName: 'A test', basisHash: '0'.repeat(64) } })),
   ],
   'POST /api/o/[org]/people': [
-    row('person.invite', [barredAnywhere, barredAnywhere, barredAnywhere, [422, '-', 422, 422]], (it) => ({ thingId: fresh(), body: { email: 'nobody', name: '', role: 'scout', farmIds: [it.farm] } })),
+    row('person.invite', [barredAnywhere, barredAnywhere, barredAnywhere, [422, '-', 422, 422]], (it) => ({ thingId: fresh(), body: { email: 'nobody@quillfern.example', name: it === things.own ? '' : 'Sent by a test', role: 'scout', farmIds: [it.farm] } })),
     row('person.change-role', [barredAnywhere, barredAnywhere, barredAnywhere, anywhere], (it) => ({ thingId: it.person, body: { role: 'owner', farmIds: [] } })),
     row('person.remove', [barredAnywhere, barredAnywhere, barredAnywhere, anywhere], (it) => ({ thingId: it.person, body: {} })),
-    row('person.reset-link', [barredAnywhere, barredAnywhere, barredAnywhere, [422, '-', 404, 404]], (it, expected) => ({ thingId: expected === 404 ? it.person : 'no id', body: {} })),
+    row('person.reset-link', [barredAnywhere, barredAnywhere, barredAnywhere, [422, '-', 404, 404]], (it, expected) => ({ thingId: expected === 422 ? 'no id' : it.person, body: {} })),
     row('link.revoke', [barredAnywhere, barredAnywhere, barredAnywhere, [404, '-', 404, 404]], () => ({ thingId: fresh(), body: {} })),
   ],
 };
