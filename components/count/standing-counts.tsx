@@ -36,7 +36,7 @@ export function StandingCounts({ counts, plantedOn, fallingOn, mayWrite, onCorre
               <p className="text-18 font-bold">
                 {[dateText(count.visitedOn, 'day-and-month'), countTexts.day(String(daysAfter(plantedOn, count.visitedOn))), ...(count.visitedAt ? [count.visitedAt] : [])].join(', ')}
               </p>
-              <p className="text-15">{detailsOf(count).join(' · ')}</p>
+              <p className="text-15">{detailsOf(count).join(', ')}</p>
               {notesOf(count, fallingOn).map((note) => (
                 <p key={note} className="text-15 font-bold text-flag-text">
                   {note}

@@ -81,7 +81,7 @@ function SheetLines({ sheets }: { sheets: Extract<ImportReading['read'], { kind:
           date: { text: unbroken(dateText(sheet.date)) },
           tape: { text: sheet.tapeUnit },
           places: { text: String(sheet.places.length) },
-          readings: { text: sheet.places.slice(0, linesShown).map((place) => place.typed).join(' · ') },
+          readings: { text: sheet.places.slice(0, linesShown).map((place) => place.typed).join('; ') },
         },
       }))}
     />

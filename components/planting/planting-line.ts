@@ -13,7 +13,7 @@ export type PlantingLineFacts = {
   seedingRate: { typed: string; unit: ReadingUnit };
 };
 
-/** "Corn after corn, no-till · planted 7 May 2026 · 30 in rows · 34,000 seeds per acre", from what was typed. */
+/** "Corn after corn, no-till, planted 7 May 2026, 30 in rows, 34,000 seeds per acre", from what was typed. */
 export function plantingLine(planting: PlantingLineFacts): string {
   const crop = plantingTexts.crop[planting.crop];
   const what = planting.previousCrop ? plantingTexts.after(crop, planting.previousCrop) : crop;
@@ -23,5 +23,5 @@ export function plantingLine(planting: PlantingLineFacts): string {
     plantingTexts.planted(dateText(planting.plantedOn)),
     plantingTexts.rows(readingText(planting.rowSpacing)),
     namesItsUnit(typed) ? plantingTexts.seeds(typed) : plantingTexts.seedsPerArea(typed, readingUnitText(unit)),
-  ].join(' · ');
+  ].join(', ');
 }

@@ -36,7 +36,7 @@ export function PlantingSeason({ org, season }: PlantingSeasonProps) {
         <Link href={paths.farm(org, head.farmId)}>{head.farmName}</Link>
         {', '}
         <Link href={paths.field(org, head.fieldId)}>{head.fieldName}</Link>
-        <span className="text-ink-soft">{` · ${plantingLine(head)}`}</span>
+        <span className="text-ink-soft">{`. ${plantingLine(head)}`}</span>
       </p>
       <SeasonSteps steps={steps} />
     </div>

@@ -35,8 +35,8 @@ export function RowSampleSection({ plantingId, rowSpacing, samples, strips, zone
       {samples.length === 0 ? <EmptyState title={rowSampleTexts.none}>{rowSampleTexts.noneHint}</EmptyState> : null}
       <ul className="grid gap-x-8 md:grid-cols-2">
         {sorted.map((sample) => (
-          <li key={sample.id} className="flex flex-col border-b border-rule py-1">
-            <div className="flex flex-wrap items-center justify-between gap-x-3">
+          <li key={sample.id} className="flex flex-wrap items-center justify-between gap-x-3 border-b border-rule py-1">
+            <div className="flex min-w-0 flex-1 flex-wrap items-center justify-between gap-x-3">
               <p className="text-15">
                 <Link className="font-mono font-bold" href={paths.rowSample(organisationId, plantingId, sample.id)}>
                   {sample.label}
@@ -58,7 +58,11 @@ export function RowSampleSection({ plantingId, rowSpacing, samples, strips, zone
                 label={formTexts.change}
                 accessibleLabel={rowSampleTexts.change(sample.label)}
                 look="quiet"
-                form={(close) => <RowSampleForm sample={sample} zones={zones} onDone={close} />}
+                form={(close) => (
+                  <div className="w-full">
+                    <RowSampleForm sample={sample} zones={zones} onDone={close} />
+                  </div>
+                )}
               />
             ) : null}
           </li>

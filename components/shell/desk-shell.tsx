@@ -13,7 +13,7 @@ type DeskShellProps = {
   organisationName: string;
   /** A form with the button that ends the session. */
   signOut: ReactNode;
-  /** "Demo: invented farms and people. Today is 18 May 2026." */
+  /** "Demo, all invented. Today is 18 May 2026 here." */
   demoNotice?: string | undefined;
   /** The season of a planting, right under the header. */
   season?: ReactNode;
@@ -74,7 +74,7 @@ export function DeskShell({
               <span className="block font-bold">{personName}</span>
               <span className="block text-ink-soft">{organisationName}</span>
             </p>
-            <div data-print="leave-out">{signOut}</div>
+            <div className="whitespace-nowrap" data-print="leave-out">{signOut}</div>
           </div>
         </div>
         {season ? <div className="mx-auto max-w-page border-t border-rule px-4 md:px-6">{season}</div> : null}

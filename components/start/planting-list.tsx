@@ -32,10 +32,10 @@ export function PlantingList({ org, role, plantings }: PlantingListProps) {
           <p>
             {progressText(planting)}
             {role !== 'scout' && awaitsDecision(planting) ? (
-              <span className="font-bold text-flag-text">{` · ${startTexts.awaits}`}</span>
+              <span className="font-bold text-flag-text">{`. ${startTexts.awaits}`}</span>
             ) : null}
-            {planting.decided ? ` · ${startTexts.signed[planting.decided.choice]}` : ''}
-            {planting.trial && !planting.trial.locked ? ` · ${startTexts.layOut}` : ''}
+            {planting.decided ? `. ${startTexts.signed[planting.decided.choice]}` : ''}
+            {planting.trial && !planting.trial.locked ? `. ${startTexts.layOut}` : ''}
           </p>
           <ul className="flex flex-wrap gap-x-6">
             {waysInto(org, role, planting).map((way) => (

@@ -14,5 +14,5 @@ export const sessionTexts = {
   chooseOrganisation: 'Where do you want to go?',
   noOrganisation: 'You belong to no account any more',
   noOrganisationHelp: 'Ask the owner of the account for a new one-time link.',
-  demoNotice: (today: string) => `Demo: invented farms and people. Today is ${today} here.`,
+  demoNotice: (today: string) => `Demo, all invented. Today is ${today} here.`,
 } as const;

@@ -4,7 +4,7 @@ import { collectComplaints, expectReadable, signInAs } from './support/walk';
 test('the agronomist reads the trial from its plan to what it may claim', async ({ page }) => {
   const complaints = collectComplaints(page);
   await signInAs(page, 'agronomist');
-  await expect(page.getByText('Demo: invented farms and people.')).toBeVisible();
+  await expect(page.getByText('Demo, all invented.')).toBeVisible();
   await expectReadable(page);
 
   await page.getByRole('listitem').filter({ hasText: 'Larkspur Bottom' }).getByRole('link', { name: 'Plan' }).click();
