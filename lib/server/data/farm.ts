@@ -21,6 +21,16 @@ export async function findFarm(tx: Transaction, params: { organisationId: string
   return rows[0];
 }
 
+/** Holds a farm against removal while a field is added to it, and the other way round; false where it is gone. */
+export async function lockFarm(tx: Transaction, params: { organisationId: string; farmId: string }) {
+  const rows = await tx
+    .select({ id: farm.id })
+    .from(farm)
+    .where(and(eq(farm.organisationId, params.organisationId), eq(farm.id, params.farmId), isNull(farm.removedAt)))
+    .for('no key update');
+  return rows.length === 1;
+}
+
 export async function insertFarm(tx: Transaction, values: typeof farm.$inferInsert) {
   const inserted = await tx.insert(farm).values(values).onConflictDoNothing().returning({ id: farm.id });
   return inserted.length === 1;

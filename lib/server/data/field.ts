@@ -21,6 +21,16 @@ export async function findField(tx: Transaction, params: { organisationId: strin
   return rows[0];
 }
 
+/** Holds a field against removal while it is planted, and the other way round; false where it is gone. */
+export async function lockField(tx: Transaction, params: { organisationId: string; fieldId: string }) {
+  const rows = await tx
+    .select({ id: field.id })
+    .from(field)
+    .where(and(eq(field.organisationId, params.organisationId), eq(field.id, params.fieldId), isNull(field.removedAt)))
+    .for('no key update');
+  return rows.length === 1;
+}
+
 export async function insertField(tx: Transaction, values: typeof field.$inferInsert) {
   const inserted = await tx.insert(field).values(values).onConflictDoNothing().returning({ id: field.id });
   return inserted.length === 1;

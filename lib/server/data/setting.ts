@@ -42,6 +42,11 @@ export async function lockSetting(tx: Transaction, params: { organisationId: str
   return rows[0];
 }
 
+/** Lets one transaction at a time give a setting its name, so that two people cannot take the same one at once. */
+export async function lockSettingNames(tx: Transaction, params: { organisationId: string }) {
+  await tx.execute(sql`select pg_advisory_xact_lock(hashtextextended('setting-names:' || ${params.organisationId}, 0))`);
+}
+
 export async function insertSetting(tx: Transaction, values: typeof setting.$inferInsert) {
   const inserted = await tx.insert(setting).values(values).onConflictDoNothing().returning({ id: setting.id });
   return inserted.length === 1;

@@ -6,12 +6,12 @@ import { listFields } from '../../data/field';
 import { assertVersion } from '../../operations/assert-version';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
-import { findSeenFarm } from './find-seen-farm';
+import { holdFarm } from './hold-farm';
 
 async function service(context: WriteContext): Promise<Written> {
   const { tx, actor, operation } = context;
   const { organisationId } = actor;
-  const farm = await findSeenFarm(context, operation.thingId);
+  const farm = await holdFarm(context, operation.thingId);
   assertVersion(farm.version, operation.baseVersion);
   const fields = await listFields(tx, { organisationId });
   if (fields.some((each) => each.farmId === farm.id)) {

@@ -6,10 +6,10 @@ import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
 import { originColumns } from '../../operations/origin-columns';
 import { readingColumns } from '../../operations/reading-columns';
-import { findSeenFarm } from '../farms/find-seen-farm';
+import { holdFarm } from '../farms/hold-farm';
 
 async function service(context: WriteContext, body: AddFieldInput): Promise<Written> {
-  const farm = await findSeenFarm(context, body.farmId);
+  const farm = await holdFarm(context, body.farmId);
   const added = await insertField(context.tx, {
     id: context.operation.thingId,
     farmId: farm.id,

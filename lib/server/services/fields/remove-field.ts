@@ -6,12 +6,12 @@ import { listPlantings } from '../../data/planting';
 import { assertVersion } from '../../operations/assert-version';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
-import { findSeenField } from './find-seen-field';
+import { holdField } from './hold-field';
 
 async function service(context: WriteContext): Promise<Written> {
   const { tx, actor, operation } = context;
   const { organisationId } = actor;
-  const { field } = await findSeenField(context, operation.thingId);
+  const { field } = await holdField(context, operation.thingId);
   assertVersion(field.version, operation.baseVersion);
   const plantings = await listPlantings(tx, { organisationId });
   if (plantings.some((each) => each.fieldId === field.id)) {

@@ -8,14 +8,14 @@ import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
 import { originColumns } from '../../operations/origin-columns';
 import { readingColumns, readingOf } from '../../operations/reading-columns';
-import { findSeenField } from '../fields/find-seen-field';
+import { holdField } from '../fields/hold-field';
 import { latestPlantingDay } from './latest-planting-day';
 import { plantingColumns } from './planting-columns';
 import { zoneQuestions } from './zone-questions';
 
 async function service(context: WriteContext, body: AddPlantingInput): Promise<Written> {
   const { tx, operation, clock } = context;
-  const { field, farm } = await findSeenField(context, body.fieldId);
+  const { field, farm } = await holdField(context, body.fieldId);
   if (body.plantedOn > latestPlantingDay(clock.today(farm.timeZone))) {
     throw badField('plantedOn', 'This planting date is more than a year ahead. Check the year.');
   }

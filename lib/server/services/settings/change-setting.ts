@@ -1,7 +1,7 @@
 import 'server-only';
 import { AppError } from '@/lib/errors/app-error';
 import { settingSchema, type SettingInput } from '@/lib/schemas/setting';
-import { listSettings, lockSetting, updateSetting, type SettingRow } from '../../data/setting';
+import { listSettings, lockSetting, lockSettingNames, updateSetting, type SettingRow } from '../../data/setting';
 import { listSettingsInUse } from '../../data/strip';
 import { assertVersion } from '../../operations/assert-version';
 import type { WriteContext, Written } from '../../operations/context';
@@ -14,6 +14,7 @@ async function service({ tx, actor, operation }: WriteContext, body: SettingInpu
   const standing = await lockSetting(tx, { organisationId, settingId: operation.thingId });
   if (!standing) throw new AppError('not-found');
   assertVersion(standing.version, operation.baseVersion);
+  await lockSettingNames(tx, { organisationId });
   assertNameFree(body.name, await listSettings(tx, { organisationId }), standing.id);
   const used = (await listSettingsInUse(tx, { organisationId })).get(standing.id);
   if (used?.locked && isOtherOnThePlanter(standing, body)) {

@@ -1,7 +1,7 @@
 import 'server-only';
 import { AppError, badField } from '@/lib/errors/app-error';
 import { asPlantedSchema, type AsPlantedInput } from '@/lib/schemas/trial';
-import { listSettings } from '../../data/setting';
+import { lockSettings } from '../../data/setting';
 import { insertStripsAsPlanted, listStrips } from '../../data/strip';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
@@ -14,7 +14,8 @@ async function service(context: WriteContext, body: AsPlantedInput): Promise<Wri
   const { trial } = await holdSeenTrial(context, operation.thingId);
   if (!trial.lockedAt) throw new AppError('bad-input', { sentence: 'Lock the plan first; what was planted is held against it.' });
   const strips = await listStrips(tx, { organisationId, trialId: trial.id });
-  const known = new Set((await listSettings(tx, { organisationId })).map((each) => each.id));
+  const settingIds = body.strips.flatMap((planted) => (planted.settingId === null ? [] : [planted.settingId]));
+  const known = await lockSettings(tx, { organisationId, settingIds });
   if (new Set(body.strips.map((planted) => planted.stripId)).size !== body.strips.length) throw badField('strips', 'Name each strip once.');
   body.strips.forEach((planted, index) => {
     const strip = strips.find((each) => each.id === planted.stripId);
