@@ -1,4 +1,5 @@
 import { readingUnitText } from '@/lib/format/reading-unit-text';
+import { plainTyping } from './plain-typing';
 import type { ReadingUnit } from './vocabulary';
 
 /** A reading as it is kept: what was typed, its unit, and the number as whole thousandths of that unit. */
@@ -21,7 +22,7 @@ export type ReadingRule = {
 export type ParsedReading = { ok: true; reading: Reading } | { ok: false; message: string };
 
 const spellings: Record<string, ReadingUnit> = {
-  in: 'in', inch: 'in', inches: 'in', '"': 'in', '″': 'in', ft: 'ft', foot: 'ft', feet: 'ft', "'": 'ft', '′': 'ft',
+  in: 'in', inch: 'in', inches: 'in', '"': 'in', ft: 'ft', foot: 'ft', feet: 'ft', "'": 'ft',
   cm: 'cm', m: 'm', mm: 'mm', ac: 'acres', acre: 'acres', acres: 'acres', ha: 'ha',
   '/ac': 'per-acre', 'per acre': 'per-acre', '/ha': 'per-ha', 'per ha': 'per-ha', '%': 'percent', percent: 'percent',
   'bu/ac': 'bu/ac', bu: 'bu/ac', 't/ha': 't/ha', lb: 'lb', lbs: 'lb', kg: 'kg', lbf: 'lbf', psi: 'psi', kpa: 'kPa', n: 'N',
@@ -52,21 +53,20 @@ export function readingIn(reading: { unit: ReadingUnit; thousandths: number }, u
   return ((reading.thousandths / 1000) * from.factor) / to.factor;
 }
 
-const feetInches = /^(\d+)\s*(?:ft|feet|foot|'|′)\s*(?:(\S.*?)\s*(?:in|inch|inches|"|″)?)?$/i;
+const feetInches = /^(\d+)\s*(?:ft|feet|foot|')\s*(?:(\S.*?)\s*(?:in|inch|inches|")?)?$/i;
 // A slash belongs to the number only before a digit, as in 5 1/4; in 84,000/ha it begins the unit.
-const numberAndUnit = /^([-+−]?(?:[\d.,½¼¾\s]|\/(?=\d))+)\s*([^\d\s.,½¼¾].*)?$/;
+const numberAndUnit = /^([-+]?(?:[\d.,\s]|\/(?=\d))+)\s*([^\d\s.,].*)?$/;
 
 type TypedNumber = number | 'two-ways' | undefined;
 
-/** One number as people write it: 17.5, 17,5, 5 1/4, 5¼, 34,000. Undefined where it is none; 'two-ways' where it could be two. */
+/** One number as people write it: 17.5, 17,5, 5 1/4, 34,000. Undefined where it is none; 'two-ways' where it could be two. */
 function numberOf(text: string, thousandsComma: boolean): TypedNumber {
-  let rest = text.trim().replace('−', '-');
-  const glyph = { '½': ' 1/2', '¼': ' 1/4', '¾': ' 3/4' };
-  rest = rest.replace(/[½¼¾]/g, (each) => glyph[each as keyof typeof glyph]).trim();
+  const rest = text.trim();
   const fraction = /^(-)?(?:(\d+)\s+)?(\d+)\/(\d+)$/.exec(rest);
   if (fraction) {
     const [, minus, whole, top, bottom] = fraction;
-    if (Number(bottom) === 0) return undefined;
+    // 5 5/4 is a slip of the pen.
+    if (Number(bottom) === 0 || (whole !== undefined && Number(top) >= Number(bottom))) return undefined;
     return (minus ? -1 : 1) * (Number(whole ?? 0) + Number(top) / Number(bottom));
   }
   if (thousandsComma && /^[-+]?\d{1,3}([, ]\d{3})+(\.\d+)?$/.test(rest)) return Number(rest.replace(/[, ]/g, ''));
@@ -85,7 +85,7 @@ export function parseReading(text: string, rule: ReadingRule): ParsedReading {
   if (typed === '') return wrong(`Type the ${rule.name}.`);
   if (typed.length > typedMost) return wrong(`That is too long for a ${rule.name}. Write it such as ${example}.`);
   const allowed = [rule.unit, ...(rule.otherUnits ?? [])];
-  const parts = splitReading(typed, rule, allowed);
+  const parts = splitReading(plainTyping(typed), rule, allowed);
   if (!parts) return wrong(`Write the ${rule.name} as a number such as ${example}.`);
   if (!allowed.includes(parts.unit)) return wrong(`The ${rule.name} is given in ${allowed.map(readingUnitText).join(' or ')}.`);
   if (parts.value === 'two-ways') {
@@ -113,17 +113,17 @@ function exampleOf(rule: ReadingRule): string {
 }
 
 function splitReading(
-  typed: string,
+  text: string,
   rule: ReadingRule,
   allowed: readonly ReadingUnit[],
 ): { value: number | 'two-ways'; unit: ReadingUnit } | undefined {
-  const mixed = allowed.includes('ft') || allowed.includes('in') ? feetInches.exec(typed) : null;
+  const mixed = allowed.includes('ft') || allowed.includes('in') ? feetInches.exec(text) : null;
   if (mixed) {
     const inches = mixed[2] === undefined ? 0 : numberOf(mixed[2], false);
     if (inches === undefined || inches === 'two-ways' || inches < 0 || inches >= 12) return undefined;
     return { value: Number(mixed[1]) * 12 + inches, unit: 'in' };
   }
-  const simple = numberAndUnit.exec(typed);
+  const simple = numberAndUnit.exec(text);
   if (!simple) return undefined;
   const value = numberOf(simple[1] ?? '', rule.thousandsComma ?? false);
   const unit = simple[2] === undefined ? rule.unit : spellings[simple[2].trim().toLowerCase().replace(/\.$/, '')];

@@ -1,3 +1,4 @@
+import { plainTyping } from './plain-typing';
 import type { TapeUnit } from './vocabulary';
 
 /** A place on the tape as it is kept: thousandths of an inch, or of a centimeter where the tape is in centimeters. */
@@ -9,10 +10,9 @@ const centimetersPerInch = 2.54;
 /** 1,000 feet, the longest row that can be sampled. */
 const inchesMost = 12_000;
 
-/** One number as people write it on paper: 68, 68.5, 68,5, 68 1/2, 68½. Undefined for what is none, or could be two. */
+/** One number as people write it on paper: 68, 68.5, 68,5, 68 1/2. Undefined for what is none, or could be two. */
 function numberOf(text: string): number | undefined {
-  const glyphs: Record<string, string> = { '½': ' 1/2', '¼': ' 1/4', '¾': ' 3/4' };
-  const plain = text.replace(/[½¼¾]/g, (glyph) => glyphs[glyph] ?? '').trim();
+  const plain = text.trim();
   const fraction = /^(?:(\d+)\s+)?(\d+)\/(\d+)$/.exec(plain);
   if (fraction) {
     const [, whole = '0', top, bottom] = fraction;
@@ -35,7 +35,7 @@ function feetAndInches(feet: string, rest: string | undefined): Read {
 
 /** A place that says its own unit. */
 function withUnit(text: string): Read {
-  const feet = /^(\d+)\s*(?:ft\.?|feet|foot|')\s*(?:([\d.,½¼¾].*?)\s*(?:in\.?|inch|inches|")?)?$/i.exec(text);
+  const feet = /^(\d+)\s*(?:ft\.?|feet|foot|')\s*(?:([\d.,].*?)\s*(?:in\.?|inch|inches|")?)?$/i.exec(text);
   if (feet) return feetAndInches(feet[1] ?? '', feet[2]);
   const suffixed = /^(.+?)\s*(ft\.?|feet|foot|'|in\.?|inch|inches|"|cm\.?)$/i.exec(text);
   const amount = suffixed ? numberOf(suffixed[1] ?? '') : undefined;
@@ -48,7 +48,7 @@ function withUnit(text: string): Read {
 /** A bare number, read as the tape in hand says it. */
 function bare(text: string, unit: TapeUnit): Read {
   if (unit === 'ft-in') {
-    const both = /^(\d+)(?:\s+|\s*-\s*)(\d+(?:[.,]\d+)?(?:\s+\d+\/\d+)?[½¼¾]?)$/.exec(text);
+    const both = /^(\d+)(?:\s+|\s*-\s*)(\d+(?:[.,]\d+)?(?:\s+\d+\/\d+)?)$/.exec(text);
     if (both) return feetAndInches(both[1] ?? '', both[2]);
     // A whole number alone is that many feet; 5.5 or 5 1/2 could be feet or inches and is asked for again.
     return /^\d+$/.test(text) ? inches(Number(text) * inchesPerFoot) : undefined;
@@ -61,7 +61,7 @@ function bare(text: string, unit: TapeUnit): Read {
 
 /** Reads one place by the tape in hand. The text as typed is stored beside the number by whoever keeps it. */
 export function parseTapePlace(typed: string, unit: TapeUnit): ParsedTapePlace {
-  const text = typed.trim().replace(/[’′]/g, "'").replace(/[”″]|''/g, '"');
+  const text = plainTyping(typed);
   const read = withUnit(text) ?? bare(text, unit);
   if (read === undefined) return { ok: false, message: `Write the place as the tape says it, such as ${examples[unit]}.` };
   if ((read.in === 'centimeters') !== (unit === 'cm')) {

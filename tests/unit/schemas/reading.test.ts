@@ -33,6 +33,20 @@ describe('what is typed as a row length', () => {
     ['531cm', 'cm', 531_000],
     [' 17.5 ', 'ft', 17_500],
     ['17.5 Ft.', 'ft', 17_500],
+    ['17’5”', 'in', 209_000],
+    ['17’ 5 1/2”', 'in', 209_500],
+    ["17'5''", 'in', 209_000],
+    ["17 1/2'", 'ft', 17_500],
+    ['209"', 'in', 209_000],
+    ['17 ft 5,5 in', 'in', 209_500],
+    ['17 ft 5⅜', 'in', 209_375],
+    ['17\u00a0ft\u00a05\u00a0in', 'in', 209_000],
+    ['17\u202f1/2', 'ft', 17_500],
+    ['17 1\u20442', 'ft', 17_500],
+    ['17⅞', 'ft', 17_875],
+    ['17⅓ ft', 'ft', 17_333],
+    ['\u00a017.5\u00a0', 'ft', 17_500],
+    ['+17', 'ft', 17_000],
   ])('takes %j as it was typed, in %s', (typed, unit, thousandths) => {
     expect(parseReading(typed, rowLengthRule)).toEqual({ ok: true, reading: { typed: typed.trim(), unit, thousandths } });
   });
@@ -45,6 +59,21 @@ describe('what is typed as a row length', () => {
     ['NaN', 'Write the row length as a number such as 17 ft 5 in.'],
     ['Infinity', 'Write the row length as a number such as 17 ft 5 in.'],
     ['1/0', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['1e3', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['0x10', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['１７', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['٣', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['=1+1', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['17-5', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['17½5', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['17½¼', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['17 5/4', 'Write the row length as a number such as 17 ft 5 in.'],
+    ["17.5'5", 'Write the row length as a number such as 17 ft 5 in.'],
+    ["17'-5", 'Write the row length as a number such as 17 ft 5 in.'],
+    ["-17'5", 'Write the row length as a number such as 17 ft 5 in.'],
+    ['17 ft 5 ft', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['1.234,5', 'Write the row length as a number such as 17 ft 5 in.'],
+    ['\u00a0', 'Type the row length.'],
     ['17 ft 13 in', 'Write the row length as a number such as 17 ft 5 in.'],
     ['17 5', 'Write the row length as a number such as 17 ft 5 in.'],
     ['17..5', 'Write the row length as a number such as 17 ft 5 in.'],
@@ -52,6 +81,10 @@ describe('what is typed as a row length', () => {
     ['-5', 'The row length cannot be below zero.'],
     ['−5', 'The row length cannot be below zero.'],
     ['-1/2', 'The row length cannot be below zero.'],
+    ['–5', 'The row length cannot be below zero.'],
+    ['-5 1/4', 'The row length cannot be below zero.'],
+    ['-17,5', 'The row length cannot be below zero.'],
+    ['999999 ft 5 in', 'The row length is expected between 0.5 and 1,000 ft; this says 999999 ft 5 in.'],
     ['5 acres', 'The row length is given in ft or in or m or cm.'],
     ['17 furlongs', 'Write the row length as a number such as 17 ft 5 in.'],
     ['0', 'The row length is expected between 0.5 and 1,000 ft; this says 0.'],
@@ -71,6 +104,8 @@ describe('what is typed as a seeding rate', () => {
   it.each([
     ['34,000', 'per-acre', 34_000_000],
     ['34 000', 'per-acre', 34_000_000],
+    ['34\u00a0000', 'per-acre', 34_000_000],
+    ['34\u202f000', 'per-acre', 34_000_000],
     ['34000', 'per-acre', 34_000_000],
     ['84,000 /ha', 'per-ha', 84_000_000],
     ['84,000 per ha', 'per-ha', 84_000_000],
@@ -79,7 +114,7 @@ describe('what is typed as a seeding rate', () => {
     expect(parseReading(typed, seedingRateRule)).toEqual({ ok: true, reading: { typed, unit, thousandths } });
   });
 
-  it.each(['34.000', '34', '3,4,0', '34,00,000', '9,999,999', '-34,000', '34k'])('refuses %j', (typed) => {
+  it.each(['', 'letters', '34.000', '17,5', '1e5', "17'5", '5 1/4', '34\n000', '34', '3,4,0', '34,00,000', '9,999,999', '-34,000', '34k'])('refuses %j', (typed) => {
     expect(parseReading(typed, seedingRateRule).ok).toBe(false);
   });
 });
@@ -89,6 +124,10 @@ describe('what is typed as a row spacing', () => {
     ['30', 'in', 30_000],
     ['7 1/2', 'in', 7_500],
     ['5 1/4', 'in', 5_250],
+    ['5\u00a01/4', 'in', 5_250],
+    ['5¼', 'in', 5_250],
+    ['5⅛', 'in', 5_125],
+    ['17,5', 'in', 17_500],
     ['76 cm', 'cm', 76_000],
     ['0.75 m', 'm', 750],
     ["2'6", 'in', 30_000],

@@ -16,6 +16,10 @@ describe('a place on the tape', () => {
     ['68 1/2', 'in', 68.5],
     ['68½', 'in', 68.5],
     ['68 ½', 'in', 68.5],
+    ['68⅜', 'in', 68.375],
+    ['68\u00a01/2', 'in', 68.5],
+    ['5–3', 'ft-in', 63],
+    ['5 3½', 'ft-in', 63.5],
     ['1/4', 'in', 0.25],
     ['.5', 'in', 0.5],
     ['0', 'in', 0],
@@ -51,7 +55,7 @@ describe('a place on the tape', () => {
 
   it.each<[string, TapeUnit]>([
     ['', 'in'], ['sixty', 'in'], ['-3', 'in'], ['6..8', 'in'], ['1/0', 'in'], ['68 5/2', 'in'], ['1e3', 'in'], ['NaN', 'in'], ['68 68', 'in'],
-    ['5 ft 12', 'ft-in'], ['5 ft 3 ft', 'ft-in'], ['ft 3', 'ft-in'], ['5.5', 'ft-in'], ['5 1/2', 'ft-in'], ['٥', 'in'], ['=1+1', 'in'],
+    ['5 ft 12', 'ft-in'], ['5 ft 3 ft', 'ft-in'], ['ft 3', 'ft-in'], ['5.5', 'ft-in'], ['5 1/2', 'ft-in'], ['5½', 'ft-in'], ['68½¼', 'in'], ['68½5', 'in'], ['٥', 'in'], ['=1+1', 'in'],
   ])('refuses "%s" on a tape of %s with an example of how it is written', (typed, unit) => {
     expect(inchesOf(typed, unit)).toMatch(/^Write the place as the tape says it, such as /);
   });
