@@ -138,6 +138,7 @@ describe('a reading', () => {
     ['setting', 'workingDepth', { typed: '3/4' }, { typed: '3/4', unit: 'in', thousandths: 750 }],
     ['row-sample', 'length', { typed: "17'5" }, { typed: "17'5", unit: 'in', thousandths: 209_000 }],
     ['row-sample', 'length', { typed: '17 ft 5 1/2 in' }, { typed: '17 ft 5 1/2 in', unit: 'in', thousandths: 209_500 }],
+    ['row-sample', 'length', { typed: '17’5”' }, { typed: '17’5”', unit: 'in', thousandths: 209_000 }],
     ['row-sample', 'length', { typed: '17,5' }, { typed: '17,5', unit: 'ft', thousandths: 17_500 }],
     ['row-sample', 'length', { typed: '5.31 m' }, { typed: '5.31 m', unit: 'm', thousandths: 5_310 }],
   ])('of a %s, %s, is kept and read back exactly as typed: %j', async (kind, path, typed, reading) => {

@@ -1,6 +1,8 @@
+import { setTimeout as pause } from 'node:timers/promises';
 import { sql } from 'drizzle-orm';
 import { v7 } from 'uuid';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { inOrganisation } from '@/db/connection';
 import { makeDecideScenes, type DecideScene } from '../support/decide-scene';
 import { atField, PlanScene, refusedAt, type Body } from '../support/plan-scene';
 
@@ -94,14 +96,15 @@ describe('what was planted', () => {
   });
 
   it('never names a setting that is removed at the same moment', async () => {
-    for (let round = 0; round < 8; round += 1) {
-      const settingId = await own.addSetting();
-      const [planted] = await Promise.all([
-        asPlanted([{ stripId: strip(8).id, settingId, reason: 'Mixed up.' }]),
-        scene.send('owner', 'setting.remove', settingId, {}, { baseVersion: 1 }),
-      ]);
-      expect([planted.outcome, await own.stands('setting', settingId)]).not.toEqual(['applied', 'removed']);
-    }
+    const settingId = await own.addSetting();
+    const said = await inOrganisation(scene.db, { organisationId: scene.organisationId }, async (tx) => {
+      await tx.execute(sql`update setting set removed_at = now(), version = version + 1 where id = ${settingId}`);
+      const waiting = asPlanted([{ stripId: strip(8).id, settingId, reason: 'Mixed up.' }]);
+      await Promise.race([waiting, pause(500)]);
+      return { waiting };
+    });
+    expect(refusedAt(await said.waiting)).toEqual(atField('strips.0.settingId'));
+    expect((await stripNow(strip(8).id))?.asPlanted).toBeNull();
   });
 
   it('is held against a locked plan only', async () => {
