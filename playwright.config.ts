@@ -7,7 +7,8 @@ export default defineConfig({
   forbidOnly: true,
   retries: 0,
   workers: 2,
-  timeout: 60_000,
+  // A walk that opens many pages takes a minute on two busy cores.
+  timeout: 180_000,
   expect: { timeout: 10_000 },
   use: {
     baseURL: process.env.ROWRISE_URL,
