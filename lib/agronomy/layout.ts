@@ -76,7 +76,10 @@ function factorial(count: number): number {
 function refuseUnlayable(settings: readonly string[], blocks: number): void {
   if (settings.length < 2) throw new ImpossibleInput('A comparison needs at least two settings.', 'settings');
   if (settings.length > LAYOUT_SETTINGS_MAX) {
-    throw new ImpossibleInput(`A trial compares at most ${LAYOUT_SETTINGS_MAX} settings.`, 'settings');
+    throw new ImpossibleInput(
+      `A trial compares at most ${LAYOUT_SETTINGS_MAX} settings; there are ${settings.length}.`,
+      'settings',
+    );
   }
   if (new Set(settings).size !== settings.length) {
     throw new ImpossibleInput('Each setting stands once in a block.', 'settings');

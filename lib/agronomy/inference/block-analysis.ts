@@ -3,7 +3,8 @@ import type { Insufficient, Outcome } from '../outcome';
 import { requiredNumber } from '../required-number';
 import { blockConnection } from './block-connection';
 import { upperTailF } from './f-distribution';
-import { invertedPositive, symmetricForm } from './linear-algebra';
+import { blockLeastSquares } from './block-least-squares';
+import { symmetricForm } from './linear-algebra';
 
 export const COMPARED_SETTINGS_MAX = 24;
 
@@ -62,18 +63,19 @@ export function blockAnalysis(strips: readonly StripFigure[]): Outcome<BlockAnal
       'settings',
     );
   }
-  const stripsOf = (setting: string) => strips.filter((strip) => strip.setting === setting);
-  const settings = allSettings.filter((setting) => stripsOf(setting).length > 1);
-  const used = strips.filter((strip) => settings.includes(strip.setting));
+  const stripsOf = new Map(allSettings.map((setting) => [setting, 0]));
+  for (const { setting } of strips) stripsOf.set(setting, (stripsOf.get(setting) as number) + 1);
+  const isCompared = (setting: string) => (stripsOf.get(setting) as number) > 1;
+  const settings = allSettings.filter(isCompared);
+  const used = strips.filter((strip) => isCompared(strip.setting));
   const blocks = distinct(used.map((strip) => strip.block));
   const refusal = tooLittle(strips, settings, blocks, used);
   if (refusal) return refusal;
 
-  const fit = leastSquares(used, blocks, settings);
-  const errorDegreesOfFreedom = used.length - blocks.length - settings.length + 1;
+  const fit = blockLeastSquares(used, blocks, settings);
+  const { errorDegreesOfFreedom } = fit;
   const meanSquareError = fit.residualSquares / errorDegreesOfFreedom;
-  const largest = Math.max(...used.map((strip) => Math.abs(strip.figure)));
-  if (meanSquareError <= (1e-10 * largest) ** 2) {
+  if (fit.isExact) {
     return insufficient(
       'no-variation',
       'strips that vary within a setting',
@@ -88,12 +90,12 @@ export function blockAnalysis(strips: readonly StripFigure[]): Outcome<BlockAnal
   return value({
     means: settings.map((setting) => ({
       setting,
-      strips: stripsOf(setting).length,
+      strips: stripsOf.get(setting) as number,
       leastSquaresMean: fit.mean(setting),
       standardError: standardError(fit.meanContrast(setting)),
     })),
     leftOut: strips
-      .filter((strip) => !settings.includes(strip.setting))
+      .filter((strip) => !isCompared(strip.setting))
       .map(({ setting, figure }) => ({ setting, figure })),
     blocks: blocks.length,
     strips: used.length,
@@ -142,53 +144,6 @@ function tooLittle(
   return null;
 }
 
-/** Least squares on block columns and all setting columns but the last, around the grand mean. */
-function leastSquares(used: readonly StripFigure[], blocks: readonly string[], settings: readonly string[]) {
-  const grandMean = used.reduce((sum, strip) => sum + strip.figure, 0) / used.length;
-  const columns = blocks.length + settings.length - 1;
-  const normal = Array.from({ length: columns }, () => new Array<number>(columns).fill(0));
-  const right = new Array<number>(columns).fill(0);
-  const columnsOf = (strip: StripFigure) => {
-    const settingColumn = settings.indexOf(strip.setting);
-    const own = [blocks.indexOf(strip.block)];
-    return settingColumn < settings.length - 1 ? [...own, blocks.length + settingColumn] : own;
-  };
-  for (const strip of used) {
-    for (const row of columnsOf(strip)) {
-      right[row] = (right[row] as number) + strip.figure - grandMean;
-      for (const column of columnsOf(strip)) {
-        (normal[row] as number[])[column] = ((normal[row] as number[])[column] as number) + 1;
-      }
-    }
-  }
-  const inverse = invertedPositive(normal);
-  const effects = inverse.map((row) => product(row, right));
-  const meanContrast = (setting: string): number[] => {
-    const column = blocks.length + settings.indexOf(setting);
-    return effects.map((_, index) => (index < blocks.length ? 1 / blocks.length : index === column ? 1 : 0));
-  };
-  const fitted = (strip: StripFigure) =>
-    columnsOf(strip).reduce((sum, column) => sum + (effects[column] as number), grandMean);
-  const residualSquares = squares(used.map((strip) => strip.figure - fitted(strip)));
-  const blockMeans = new Map(
-    blocks.map((block) => {
-      const own = used.filter((strip) => strip.block === block);
-      return [block, own.reduce((sum, strip) => sum + strip.figure, 0) / own.length] as const;
-    }),
-  );
-  // The settings' share, as fitted values less block means, stays exact where a difference of two large sums would not.
-  const settingSquares = squares(
-    used.map((strip) => fitted(strip) - (blockMeans.get(strip.block) as number)),
-  );
-  return {
-    inverse,
-    residualSquares,
-    settingSquares,
-    meanContrast,
-    mean: (setting: string) => grandMean + product(meanContrast(setting), effects),
-  };
-}
-
 function missingCells(
   used: readonly StripFigure[],
   blocks: readonly string[],
@@ -200,12 +155,4 @@ function missingCells(
 
 function distinct(names: readonly string[]): string[] {
   return [...new Set(names)];
-}
-
-function product(first: readonly number[], second: readonly number[]): number {
-  return first.reduce((sum, entry, index) => sum + entry * (second[index] as number), 0);
-}
-
-function squares(numbers: readonly number[]): number {
-  return numbers.reduce((sum, entry) => sum + entry * entry, 0);
 }

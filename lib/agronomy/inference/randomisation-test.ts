@@ -27,7 +27,10 @@ export type RandomisationTest =
       p: number;
       /** Standard error of the sampled p. */
       pStandardError: number;
+      /** Of all arrangements; a sample cannot show less than `smallestSampledP`. */
       smallestAttainableP: number;
+      /** 1 / (sampled + 1), because the arrangement that was laid counts as one of them. */
+      smallestSampledP: number;
     };
 
 /**
@@ -87,6 +90,7 @@ export function randomisationTest(strips: readonly StripFigure[], seed: number):
       pStandardError: Math.sqrt((p * (1 - p)) / SAMPLED_ARRANGEMENTS),
       // Only ties are certain without counting: complete blocks tie in every renaming of the settings.
       smallestAttainableP: (isComplete ? distinctArrangements(dealt[0] as number[]) : 1) / arrangements,
+      smallestSampledP: 1 / (SAMPLED_ARRANGEMENTS + 1),
     });
   }
 
