@@ -5,7 +5,8 @@ import { emergenceSpread } from '@/lib/agronomy/emergence-spread';
 import { kachmanSmith } from '@/lib/agronomy/kachman-smith';
 import { ImpossibleInput, type Outcome } from '@/lib/agronomy/outcome';
 import { packedFigures } from '@/lib/agronomy/packed-figures';
-import { packedKnown, type PackedRows } from '@/lib/agronomy/packed-rows';
+import { packRows } from '@/lib/agronomy/pack-rows';
+import { packedKnown } from '@/lib/agronomy/packed-rows';
 import { randomStream } from '@/lib/agronomy/random';
 import { spacingInchesMean, spacingsInches, spacingVariation } from '@/lib/agronomy/spacing';
 
@@ -13,19 +14,14 @@ type PlainRow = { places: number[]; days: number[]; up: number[]; held: number; 
 
 const plain = (changes: Partial<PlainRow> = {}): PlainRow => ({ places: [0, 6, 13], days: [8, 9, 10], up: [0, 2, 3], held: 3, area: 0.001, theoretical: 6.15, ...changes });
 
-function packed(rows: readonly PlainRow[]): PackedRows {
-  const startsOf = (lengths: readonly number[]) => Uint32Array.from([0, ...lengths.map((_, index) => lengths.slice(0, index + 1).reduce((sum, each) => sum + each, 0))]);
-  return {
-    placesInches: Float64Array.from(rows.flatMap((row) => row.places)),
-    placesFrom: startsOf(rows.map((row) => row.places.length)),
-    visitDays: Float64Array.from(rows.flatMap((row) => row.days)),
-    plantsUp: Float64Array.from(rows.flatMap((row) => row.up)),
-    visitsFrom: startsOf(rows.map((row) => row.days.length)),
-    plantsHeld: Float64Array.from(rows.map((row) => row.held)),
-    areaAcres: Float64Array.from(rows.map((row) => row.area)),
-    theoreticalSpacingInches: Float64Array.from(rows.map((row) => row.theoretical)),
-  };
-}
+const packed = (rows: readonly PlainRow[]) =>
+  packRows(rows.map((row) => ({
+    placesInches: row.places,
+    visits: row.days.map((days, index) => ({ days, plantsUp: row.up[index] ?? 0 })),
+    plantsHeld: row.held,
+    areaAcres: row.area,
+    theoreticalSpacingInches: row.theoretical,
+  })));
 
 const orNothing = (outcome: Outcome<number>) => (outcome.kind === 'value' ? outcome.value : 'insufficient');
 
@@ -134,6 +130,14 @@ describe('figures of packed row samples', () => {
     ['a visit before planting', { days: [-1, 8, 9] }],
   ])('refuse %s', (_, changes) => {
     expect(() => packedFigures(packed([plain(), plain(changes)]))).toThrow(ImpossibleInput);
+  });
+
+  it('keep each row to its own places and visits', () => {
+    const two = packed([plain({ places: [0, 2, 17, 33], days: [8, 9], up: [1, 4] }), plain()]);
+    expect([...two.placesFrom]).toEqual([0, 4, 7]);
+    expect([...two.visitsFrom]).toEqual([0, 2, 5]);
+    expect([...two.placesInches]).toEqual([0, 2, 17, 33, 0, 6, 13]);
+    expect([...two.visitDays, ...two.plantsUp]).toEqual([8, 9, 8, 9, 10, 1, 4, 0, 2, 3]);
   });
 
   it('of no rows are no figures', () => {
