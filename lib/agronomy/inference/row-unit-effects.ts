@@ -55,7 +55,7 @@ export type RowUnitEffects = {
  * number above 0, or two figures of one row unit in a strip.
  * Equation: figure = strip + row unit + error, by least squares; t of each unit less the mean of the others; Holm 1979.
  * What it does not tell: a row unit that is late under one setting only, and whether the unit or its place is at fault:
- * wheel track, guess row, pinch row. Example: five units in six strips, one 23.0 later than the others, p 0.004.
+ * wheel track, guess row, pinch row. Example: five units in six strips, one 22.9 later than the others, p 0.004.
  */
 export function rowUnitEffects(figures: readonly RowUnitFigure[]): Outcome<RowUnitEffects> {
   requiredRowUnitFigures(figures);
