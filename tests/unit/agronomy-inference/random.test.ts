@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { ImpossibleInput } from '../../../lib/agronomy/outcome';
 import { randomStream, randomStreamFromState, shuffled } from '../../../lib/agronomy/random';
@@ -59,6 +60,24 @@ describe('randomStream', () => {
 
   it.each([-1, 1.5, Number.NaN, 4_294_967_296])('refuses the seed %s', (seed) => {
     expect(() => randomStream(seed)).toThrow(ImpossibleInput);
+  });
+});
+
+describe('nextBelow', () => {
+  it('is the remainder of the next word, for any limit', () => {
+    fc.assert(
+      fc.property(
+        fc.nat({ max: 4_294_967_295 }),
+        fc.integer({ min: 1, max: 4_294_967_296 }),
+        (seed, limit) => {
+          const word = randomStream(seed).nextWord();
+          // Words past the last whole multiple of the limit are drawn again.
+          fc.pre(word < 4_294_967_296 - (4_294_967_296 % limit));
+          expect(randomStream(seed).nextBelow(limit)).toBe(word % limit);
+        },
+      ),
+      { numRuns: 2000 },
+    );
   });
 });
 

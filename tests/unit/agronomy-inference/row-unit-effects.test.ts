@@ -5,7 +5,6 @@ import { ImpossibleInput } from '../../../lib/agronomy/outcome';
 import { randomStream } from '../../../lib/agronomy/random';
 import { timingOfRowUnits } from '../../../lib/agronomy/timing-of-row-units';
 import { countsFrom, rowSampleOf } from '../agronomy/row-sample-of';
-import { normalStream } from './normal-stream';
 import { answered } from './reference-designs';
 import { trialComparison } from './trial-comparison';
 
@@ -139,31 +138,6 @@ describe('rowUnitEffects', () => {
     const figures = [...sampled(0, 0), { strip: '1', setting: 'a', rowUnit: 3, figure: 8, ...change }];
     expect(() => rowUnitEffects(figures)).toThrow(ImpossibleInput);
     expect(() => rowUnitEffects(figures)).toThrow(expect.objectContaining({ field }));
-  });
-
-  it('calls any unit late in at most 5 of 100 trials where none is', () => {
-    const normal = normalStream(19);
-    let wrong = 0;
-    for (let trial = 0; trial < 1000; trial += 1) {
-      const figures = sampled(0, 0).map((each) => ({ ...each, figure: normal() }));
-      if (answered(rowUnitEffects(figures)).rowUnits.some((unit) => unit.isLateUnit)) wrong += 1;
-    }
-    expect(wrong / 1000).toBeLessThan(0.05);
-  });
-
-  it('holds the true lateness of a unit in 93 to 97 of 100 intervals', () => {
-    const normal = normalStream(23);
-    let held = 0;
-    for (let trial = 0; trial < 2000; trial += 1) {
-      const figures = sampled(0, 0).map((each) => ({
-        ...each,
-        figure: Number(each.strip) + (each.rowUnit === 6 ? 1 : 0) + 0.4 * normal(),
-      }));
-      const unit = answered(rowUnitEffects(figures)).rowUnits[1];
-      if (unit && unit.lower <= 1 && unit.upper >= 1) held += 1;
-    }
-    expect(held / 2000).toBeGreaterThan(0.93);
-    expect(held / 2000).toBeLessThan(0.97);
   });
 });
 
