@@ -209,4 +209,14 @@ describe('comparisonHeadline', () => {
       }),
     );
   });
+
+  it.each([
+    ['not-connected', 'The settings share no blocks: nothing to compare.'],
+    ['no-error-degrees-of-freedom', 'Too few strips to know how far strips vary: nothing to compare yet.'],
+    ['no-variation', 'The strips do not vary as measured strips do: nothing to compare.'],
+    ['one-environment', 'Too little to compare yet: needed 2 fields, had 1.'],
+  ])('says why nothing is compared: %s', (reason, sentence) => {
+    const finding = comparisonFinding(insufficient(reason, '2 fields', '1'), 'score', 'raised');
+    expect(comparisonHeadline(finding, wording)).toEqual({ headline: sentence, details: [] });
+  });
 });

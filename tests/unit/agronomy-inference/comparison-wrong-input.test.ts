@@ -1,11 +1,15 @@
 import { describe, expect, it } from 'vitest';
 import { comparisonDescription } from '../../../lib/agronomy/comparison-description';
 import { blockAnalysis, type StripFigure } from '../../../lib/agronomy/inference/block-analysis';
+import { pairwiseLetters } from '../../../lib/agronomy/inference/pairwise-letters';
+import { blockLeastSquares } from '../../../lib/agronomy/inference/block-least-squares';
+import { invertedPositive } from '../../../lib/agronomy/inference/linear-algebra';
 import { holmAgainstReference, tukeyPairs } from '../../../lib/agronomy/inference/pairwise';
 import {
   EXACT_ARRANGEMENTS_MAX,
   randomisationTest,
 } from '../../../lib/agronomy/inference/randomisation-test';
+import { studentizedRangeUpperTail } from '../../../lib/agronomy/inference/studentized-range';
 import { layout } from '../../../lib/agronomy/layout';
 import { ImpossibleInput } from '../../../lib/agronomy/outcome';
 import { normalStream } from './normal-stream';
@@ -97,6 +101,52 @@ describe('numbers that are none', () => {
   it('refuses a seed that is none where chance is asked', () => {
     const strips = blocksOf(Array.from({ length: 6 }, () => 'ABCD'));
     expect(() => randomisationTest(strips, 0.5)).toThrow(ImpossibleInput);
+  });
+});
+
+describe('what the parts refuse', () => {
+  it('a matrix that cannot be inverted, as of settings that share nothing', () => {
+    expect(() => invertedPositive([[0]])).toThrow('not positive definite');
+    const apart = blocksOf(['AB', 'AB', 'CD', 'CD']);
+    expect(() => blockLeastSquares(apart, ['0', '1', '2', '3'], ['A', 'B', 'C', 'D'])).toThrow(
+      ImpossibleInput,
+    );
+  });
+
+  it('a range of zero is reached by all', () => {
+    expect(studentizedRangeUpperTail(0, 3, 6)).toBe(1);
+  });
+
+  it('knows no ties of incomplete blocks it did not count, and says only what one arrangement is worth', () => {
+    const strips = blocksOf(['ABCD', 'ABCD', 'ABCD', 'ABCD', 'ABCD', 'ABC']);
+    const test = answered(randomisationTest(strips, 3));
+    expect(test).toMatchObject({ method: 'sampled', arrangements: 24 ** 5 * 6 });
+    expect(test.smallestAttainableP).toBe(1 / (24 ** 5 * 6));
+  });
+
+  it('gives the twenty-seventh letter a number of its own', () => {
+    // Every second of 60 settings apart from its neighbours: more groups than the alphabet has letters.
+    const means = Array.from({ length: 60 }, (_, index) => ({
+      setting: `${index}`,
+      strips: 2,
+      leastSquaresMean: -index,
+      standardError: 1,
+    }));
+    const pairs = means.flatMap((first, index) =>
+      means.slice(index + 1).map((second) => ({
+        first: first.setting,
+        second: second.setting,
+        difference: 1,
+        standardError: 1,
+        pUnadjusted: 0,
+        p: 0,
+        lower: 0.5,
+        upper: 1.5,
+        toldApart: true,
+      })),
+    );
+    const letters = pairwiseLetters(means, pairs).map((each) => each.letters);
+    expect([letters[0], letters[25], letters[26], letters[59]]).toEqual(['a', 'z', 'a2', 'h3']);
   });
 });
 

@@ -64,6 +64,10 @@ describe('randomStream', () => {
 });
 
 describe('nextBelow', () => {
+  it.each([0, -1, 2.5, Number.NaN, 4_294_967_297])('refuses %d as a limit', (limit) => {
+    expect(() => randomStream(1).nextBelow(limit)).toThrow(ImpossibleInput);
+  });
+
   it('is the remainder of the next word, for any limit', () => {
     fc.assert(
       fc.property(
