@@ -30,50 +30,58 @@ export function arrangementStatistic(
     const mean = block.reduce((sum, strip) => sum + strip.figure, 0) / block.length;
     return block.map((strip) => strip.figure - mean);
   });
-  const inverse = generalizedInverse(blocks, settings);
-  const fromTotals = (totals: readonly number[]): number => {
+  const count = settings.length;
+  const inverse = Float64Array.from(generalizedInverse(blocks, settings).flat());
+  const fromTotals = (totals: Float64Array): number => {
     let sum = 0;
-    for (let row = 0; row < totals.length; row += 1) {
-      const weights = inverse[row] as number[];
+    for (let row = 0; row < count; row += 1) {
       let inner = 0;
-      for (let column = 0; column < totals.length; column += 1) {
-        inner += (weights[column] as number) * (totals[column] as number);
+      for (let column = 0; column < count; column += 1) {
+        inner += (inverse[row * count + column] as number) * (totals[column] as number);
       }
       sum += inner * (totals[row] as number);
     }
     return sum;
   };
-  const added = (totals: number[], hand: readonly number[], blockIndex: number, sign: 1 | -1): void => {
+  const add = (totals: Float64Array, hand: readonly number[], blockIndex: number): void => {
     const own = deviations[blockIndex] as number[];
     for (let strip = 0; strip < hand.length; strip += 1) {
       const setting = hand[strip] as number;
-      totals[setting] = (totals[setting] as number) + sign * (own[strip] as number);
+      totals[setting] = (totals[setting] as number) + (own[strip] as number);
     }
   };
   return {
     of: (dealt) => {
-      const totals = settings.map(() => 0);
-      dealt.forEach((hand, blockIndex) => added(totals, hand, blockIndex, 1));
+      const totals = new Float64Array(count);
+      dealt.forEach((hand, blockIndex) => add(totals, hand, blockIndex));
       return fromTotals(totals);
     },
     forEach: (choices, callback) => {
-      const walk = (blockIndex: number, totals: readonly number[]): void => {
-        const hands = choices[blockIndex];
-        if (!hands) {
-          callback(fromTotals(totals));
+      const shares = choices.map((hands, blockIndex) =>
+        hands.map((hand) => {
+          const share = new Float64Array(count);
+          add(share, hand, blockIndex);
+          return share;
+        }),
+      );
+      // One array a block, written anew for every hand: adding and taking away again would let rounding pile up over a
+      // million steps, and a new array each time would cost more than the sums.
+      const totalsAfter = choices.map(() => new Float64Array(count));
+      const walk = (blockIndex: number, before: Float64Array): void => {
+        const hands = shares[blockIndex];
+        const after = totalsAfter[blockIndex];
+        if (!hands || !after) {
+          callback(fromTotals(before));
           return;
         }
-        for (const hand of hands) {
-          // A fresh copy, because adding and taking away again would let rounding pile up over a million steps.
-          const next = totals.slice();
-          added(next, hand, blockIndex, 1);
-          walk(blockIndex + 1, next);
+        for (const share of hands) {
+          for (let setting = 0; setting < count; setting += 1) {
+            after[setting] = (before[setting] as number) + (share[setting] as number);
+          }
+          walk(blockIndex + 1, after);
         }
       };
-      walk(
-        0,
-        settings.map(() => 0),
-      );
+      walk(0, new Float64Array(count));
     },
     scale: deviations.flat().reduce((sum, deviation) => sum + deviation * deviation, 0),
   };
