@@ -2,7 +2,7 @@ import { SAME_NUMBER } from '../constants';
 import { ImpossibleInput, insufficient, value, type Outcome } from '../outcome';
 import { requiredNumber } from '../required-number';
 import type { StandInterval } from '../stand-interval-shape';
-import { studentQuantile } from './student-t';
+import { ratioOfSums } from './ratio-of-sums';
 
 /** Plants held and the part of an acre they were found on: one row sample, or all of one strip's added. */
 export type StandUnit = { plantsHeld: number; areaAcres: number };
@@ -42,9 +42,9 @@ export function standInterval(
     const needed = basis === 'strips' ? '2 strips' : '2 row samples';
     return value({ plantsPerAcre: density, interval: insufficient('one-place', needed, had) });
   }
-  const squares = units.reduce((sum, unit) => sum + (unit.plantsHeld - density * unit.areaAcres) ** 2, 0);
-  const standardError = Math.sqrt(squares / (count - 1) / count) / areaMean;
-  const reach = studentQuantile(0.975, count - 1) * standardError;
+  const { standardError, reach, degreesOfFreedom } = ratioOfSums(
+    units.map((unit) => ({ amount: unit.plantsHeld, size: unit.areaAcres })),
+  );
   const equalAreas = units.every((unit) => Math.abs(unit.areaAcres / areaMean - 1) <= SAME_NUMBER);
   return value({
     plantsPerAcre: density,
@@ -55,7 +55,7 @@ export function standInterval(
       method: equalAreas ? 't-of-mean' : 'ratio-linearized',
       basis,
       units: count,
-      student: { standardErrorPlantsPerAcre: standardError, degreesOfFreedom: count - 1 },
+      student: { standardErrorPlantsPerAcre: standardError, degreesOfFreedom },
     }),
   });
 }
