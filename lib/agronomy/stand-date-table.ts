@@ -59,7 +59,7 @@ export function checkedTable(table: StandDateTable): StandDateTable {
 export function tableYieldPercent(table: StandDateTable, planted: MonthDay, plantsPerAcre: number, field = 'plantedOn'): StandDateReading {
   requiredNumber(plantsPerAcre, 'plantsPerAcre', { atLeast: 0 });
   const day = dayOfYear(planted, field);
-  const bands = table.rows.map((row) => ({ from: dayOfYear(row.from, 'from'), to: dayOfYear(row.to, 'to') }));
+  const bands = table.rows.map((row) => ({ from: dayOfYear(row.from, 'rows'), to: dayOfYear(row.to, 'rows') }));
   const first = bands[0] as { from: number };
   const last = bands[bands.length - 1] as { to: number };
   const lastMeasured = Math.max(...table.rows.map((row, index) => (row.extrapolatedInSource ? 0 : (bands[index] as { to: number }).to)));
