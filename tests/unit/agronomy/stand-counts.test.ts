@@ -55,7 +55,12 @@ describe('cutRow', () => {
   });
 
   test('settles the ends and the doubtful plants of every piece by itself', () => {
-    const row = answerOf(cutRow([{ ...piece(68, 11), ...plants }, { ...piece(60, 10), plantsDoubtful: 2 }]));
+    const row = answerOf(
+      cutRow([
+        { ...piece(68, 11), ...plants },
+        { ...piece(60, 10), plantsDoubtful: 2 },
+      ]),
+    );
     expect(row.plantsHeld).toBe(10 + 9);
   });
 
