@@ -1,4 +1,3 @@
-import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { NORMAL_QUANTILE_975 } from '../../../lib/agronomy/constants';
 import { chiSquareTails } from '../../../lib/agronomy/inference/chi-square-tails';
@@ -7,7 +6,7 @@ import { moreRowSamples } from '../../../lib/agronomy/inference/more-row-samples
 import { ratioOfSums } from '../../../lib/agronomy/inference/ratio-of-sums';
 import { rowSamplesNeeded } from '../../../lib/agronomy/inference/row-samples-needed';
 import { standDispersion } from '../../../lib/agronomy/inference/stand-dispersion';
-import { studentQuantile } from '../../../lib/agronomy/inference/student-t';
+import { standInterval, standStrips } from '../../../lib/agronomy/inference/stand-interval';
 import { ImpossibleInput } from '../../../lib/agronomy/outcome';
 import { wilsonInterval } from '../../../lib/agronomy/share-of-seed';
 import published from '../../reference/published-stand-counts.json';
@@ -51,22 +50,17 @@ describe('standDispersion', () => {
     expectClose(answerOf(standDispersion(unitsOf(plants.map((each) => each / 2)))).index, index / 2);
   });
 
-  test('gives a p of at most 1', () => {
-    fc.assert(
-      fc.property(fc.array(fc.integer({ min: 20, max: 60 }), { minLength: 2, maxLength: 12 }), (plants) => {
-        const { p } = answerOf(answerOf(standDispersion(unitsOf(plants))).test);
-        expect(p).toBeGreaterThanOrEqual(0);
-        expect(p).toBeLessThanOrEqual(1);
-      }),
-      { numRuns: 50 },
-    );
-  });
-
   test('has an index but no test where a place would hold fewer than five plants', () => {
-    const dispersion = answerOf(standDispersion(unitsOf([4, 5, 5])));
-    expect(dispersion.index).toBeGreaterThan(0);
+    const dispersion = answerOf(standDispersion(unitsOf([2, 4, 3])));
+    // Variance 1 over mean 3, by hand.
+    expectClose(dispersion.index, 1 / 3);
     expect(reasonOf(dispersion.test)).toBe('few-plants-a-place');
     expect(answerOf(standDispersion(unitsOf([5, 5, 5]))).test.kind).toBe('value');
+  });
+
+  test('looks at the place that would hold fewest, however many the others hold', () => {
+    const dispersion = answerOf(standDispersion(unitsOf([40, 41, 3], [20, 20, 1])));
+    expect(reasonOf(dispersion.test)).toBe('few-plants-a-place');
   });
 
   test.each([
@@ -121,23 +115,6 @@ describe('rowSamplesNeeded', () => {
   test('asks for 7 where the normal asks for 4', () => {
     const { cv, withinShare, byT } = published.sampleSize;
     expect(rowSamplesNeeded(cv, withinShare)).toBe(byT);
-  });
-
-  test('is the smallest number that does', () => {
-    const does = (count: number, cv: number, within: number) =>
-      count >= ((studentQuantile(0.975, count - 1) * cv) / within) ** 2;
-    fc.assert(
-      fc.property(
-        fc.double({ min: 0.01, max: 0.8, noNaN: true }),
-        fc.double({ min: 0.03, max: 0.5, noNaN: true }),
-        (cv, within) => {
-          const needed = rowSamplesNeeded(cv, within);
-          expect(does(needed, cv, within)).toBe(true);
-          expect(needed === 2 || !does(needed - 1, cv, within)).toBe(true);
-        },
-      ),
-      { numRuns: 60 },
-    );
   });
 
   test('is two where row samples do not differ', () => {
@@ -251,5 +228,40 @@ describe('ratioOfSums', () => {
     expectClose(ratio.standardError * perAcre, expected.se);
     expectClose(ratio.reach * perAcre, expected.upper - expected.plants_per_acre);
     expect(ratio.degreesOfFreedom).toBe(5);
+  });
+});
+
+describe('standInterval and standStrips', () => {
+  const sound = { plantsHeld: 30, areaAcres: 0.001 };
+
+  test.each([
+    { field: 'plantsHeld', plantsHeld: -1, areaAcres: 0.001 },
+    { field: 'plantsHeld', plantsHeld: Number.NaN, areaAcres: 0.001 },
+    { field: 'areaAcres', plantsHeld: 30, areaAcres: 0 },
+    { field: 'areaAcres', plantsHeld: 30, areaAcres: Number.POSITIVE_INFINITY },
+  ])('refuse $plantsHeld plants on $areaAcres acres, alone or among the sound ones of a strip', (place) => {
+    const { field, ...unit } = place;
+    expect(() => standInterval([sound, unit], 'row-samples')).toThrow(expect.objectContaining({ field }));
+    const inStrip = [sound, unit].map((each) => ({ ...each, stripId: 'A' }));
+    expect(() => standStrips(inStrip)).toThrow(expect.objectContaining({ field }));
+  });
+
+  test('refuse a strip without a name', () => {
+    expect(() => standStrips([{ ...sound, stripId: '' }])).toThrow(
+      expect.objectContaining({ field: 'stripId' }),
+    );
+  });
+
+  test('say which place they had too few of', () => {
+    const one = (basis: 'strips' | 'row-samples') => answerOf(standInterval([sound], basis)).interval;
+    expect(one('strips')).toMatchObject({ needed: '2 strips', had: '1 strip' });
+    expect(one('row-samples')).toMatchObject({ needed: '2 row samples', had: '1 row sample' });
+  });
+
+  test('call the interval a ratio as soon as one area differs', () => {
+    const method = (lengths: number[]) =>
+      answerOf(answerOf(standInterval(unitsOf([30, 31, 29], lengths), 'row-samples')).interval).method;
+    expect(method([10, 10, 10])).toBe('t-of-mean');
+    expect(method([9, 10, 11])).toBe('ratio-linearized');
   });
 });

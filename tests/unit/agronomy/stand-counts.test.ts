@@ -1,4 +1,3 @@
-import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { cutRow } from '@/lib/agronomy/cut-row';
 import { hoopFactor, hoopSquareFeet } from '@/lib/agronomy/hoop-factor';
@@ -7,7 +6,6 @@ import { standInterval } from '@/lib/agronomy/inference/stand-interval';
 import { ImpossibleInput } from '@/lib/agronomy/outcome';
 import { rowLengthFeet, rowLengthMeters } from '@/lib/agronomy/row-length';
 import { rowSamplesAlike } from '@/lib/agronomy/row-samples-alike';
-import { plantsPerAcre } from '@/lib/agronomy/stand';
 import { standByDoubtful } from '@/lib/agronomy/stand-by-doubtful';
 import { wheelStand } from '@/lib/agronomy/wheel-stand';
 import published from '../../reference/published-stand-counts.json';
@@ -62,26 +60,6 @@ describe('cutRow', () => {
       ]),
     );
     expect(row.plantsHeld).toBe(10 + 9);
-  });
-
-  test('is one place whose stand is that of the row had it not been cut between marks', () => {
-    fc.assert(
-      fc.property(
-        fc.array(fc.tuple(fc.integer({ min: 1, max: 400 }), fc.nat(60)), { minLength: 1, maxLength: 8 }),
-        (pieces) => {
-          const row = answerOf(cutRow(pieces.map(([length, up]) => piece(length, up))));
-          const whole = {
-            lengthInches: pieces.reduce((sum, [length]) => sum + length, 0),
-            plantsHeld: pieces.reduce((sum, [, up]) => sum + up, 0),
-          };
-          const rowSpacingInches = 30;
-          expect(plantsPerAcre({ ...row, rowSpacingInches })).toBeCloseTo(
-            plantsPerAcre({ ...whole, rowSpacingInches }),
-            6,
-          );
-        },
-      ),
-    );
   });
 
   test('is insufficient without a piece', () => {
