@@ -9,6 +9,7 @@ export const methodTexts = {
     stand: 'Stand',
     timing: 'Timing and late plants',
     spacing: 'Spacing',
+    residue: 'Residue',
     score: 'Score',
     late: 'Yield lost to late plants',
     uneven: 'Yield lost to uneven spacing',
