@@ -12,6 +12,6 @@ export default defineConfig({
     include: ['tests/unit/agronomy/**/*.test.ts', 'tests/unit/agronomy-inference/**/*.test.ts'],
     exclude: ['**/*.property.test.ts', '**/*.simulation.test.ts'],
     environment: 'node',
-    testTimeout: 20_000,
+    testTimeout: 240_000,
   },
 });
