@@ -21,8 +21,13 @@ export type GainByTable = {
  * stand on 28 May: 94 % against 90 %.
  */
 export function replantGainByTable(table: StandDateTable, terms: ReplantTerms, plantsPerAcre: number): GainByTable {
-  const kept = shareSpan(tableYieldPercent(table, terms.plantedOn, plantsPerAcre, 'plantedOn'));
-  const second = shareSpan(tableYieldPercent(table, terms.replantOn, terms.replantPlantsPerAcre, 'replantOn'));
+  const kept = tableYieldPercent(table, terms.plantedOn, plantsPerAcre, 'plantedOn');
+  return gainOfReadings(terms, kept, tableYieldPercent(table, terms.replantOn, terms.replantPlantsPerAcre, 'replantOn'));
+}
+
+/** The same from what the table says of the stand that is kept and of the second one. */
+export function gainOfReadings(terms: ReplantTerms, keptReading: StandDateReading, secondReading: StandDateReading): GainByTable {
+  const [kept, second] = [shareSpan(keptReading), shareSpan(secondReading)];
   const keepFactor = terms.maximumYieldBushelsPerAcre * (1 - terms.gapLossShare) * (1 - terms.unevenLossShare);
   const poor = terms.poorSecondStandChance;
   const replantYield = (share: number) => terms.maximumYieldBushelsPerAcre * ((1 - poor) * share + poor * terms.poorSecondStandYieldShare);

@@ -16,6 +16,8 @@ export type StandDateTable = {
   age: string;
   /** Plants per acre, ascending. */
   stands: readonly number[];
+  /** Stands that the source prints as one, such as 28,000 to 32,000; within it a cell is printed and not read between. */
+  fullStandBand?: { from: number; to: number };
   rows: readonly (DateBand & { percents: readonly number[]; extrapolatedInSource?: boolean })[];
 };
 
@@ -35,6 +37,10 @@ export function checkedTable(table: StandDateTable): StandDateTable {
   table.stands.forEach((stand, index) => {
     requiredNumber(stand, `stands.${index}`, index === 0 ? { atLeast: 0 } : { above: table.stands[index - 1] as number });
   });
+  const band = table.fullStandBand;
+  if (band && requiredNumber(band.from, 'fullStandBand', { atLeast: 0 }) >= requiredNumber(band.to, 'fullStandBand')) {
+    throw new ImpossibleInput('A band of stands ends before it begins.', 'fullStandBand');
+  }
   table.rows.forEach((row, index) => {
     const from = dayOfYear(row.from, `rows.${index}.from`);
     const before = table.rows[index - 1];
@@ -57,33 +63,52 @@ export function checkedTable(table: StandDateTable): StandDateTable {
  * Example: Iowa 2001, planted 1 May, 24,000 plants: 94 %, printed.
  */
 export function tableYieldPercent(table: StandDateTable, planted: MonthDay, plantsPerAcre: number, field = 'plantedOn'): StandDateReading {
-  requiredNumber(plantsPerAcre, 'plantsPerAcre', { atLeast: 0 });
-  const day = dayOfYear(planted, field);
-  const bands = table.rows.map((row) => ({ from: dayOfYear(row.from, 'rows'), to: dayOfYear(row.to, 'rows') }));
-  const first = bands[0] as { from: number };
-  const last = bands[bands.length - 1] as { to: number };
-  const lastMeasured = Math.max(...table.rows.map((row, index) => (row.extrapolatedInSource ? 0 : (bands[index] as { to: number }).to)));
-  const extrapolatedInSource = lastMeasured < last.to && day > lastMeasured;
-  if (plantsPerAcre === 0) return { kind: 'value', percent: 0, basis: 'no-plants', extrapolatedInSource: false };
-  const line = lineOnDay(table, bands, day);
-  const percent = interpolate(line, plantsPerAcre);
-  const beyond: TableEnd[] = [];
-  if (plantsPerAcre < (table.stands[0] as number)) beyond.push('stand-below');
-  if (plantsPerAcre > (table.stands[table.stands.length - 1] as number)) beyond.push('stand-above');
-  if (day < first.from) beyond.push('date-before');
-  if (day > last.to) beyond.push('date-after');
-  if (beyond.length > 0) return { kind: 'at-most', percent, beyond, extrapolatedInSource };
-  const printed = isAnchor(line, plantsPerAcre) && bands.some(({ from, to }) => day >= from && day <= to);
-  return { kind: 'value', percent, basis: printed ? 'printed' : 'interpolated', extrapolatedInSource };
+  return tableOnDay(table, planted, field)(plantsPerAcre);
 }
 
-function lineOnDay(table: StandDateTable, bands: readonly { from: number; to: number }[], day: number) {
+/** The same with the day read once, for many stands of one planting. */
+export function tableOnDay(table: StandDateTable, planted: MonthDay, field = 'plantedOn'): (plantsPerAcre: number) => StandDateReading {
+  const day = dayOfYear(planted, field);
+  const bands = table.rows.map((row) => ({ from: dayOfYear(row.from, 'rows'), to: dayOfYear(row.to, 'rows') }));
+  const lastDay = Math.max(...bands.map(({ to }) => to));
+  const lastMeasured = Math.max(...table.rows.map((row, index) => (row.extrapolatedInSource ? 0 : (bands[index] as { to: number }).to)));
+  const extrapolatedInSource = lastMeasured < lastDay && day > lastMeasured;
+  const dayPrinted = bands.some(({ from, to }) => day >= from && day <= to);
+  const line = tableLineOnDay(table, planted, field);
+  const dateEnd = tableDateEnd(table, planted, field);
+  const [lowest, highest] = [table.stands[0] as number, table.stands[table.stands.length - 1] as number];
+  const full = table.fullStandBand;
+  return (plantsPerAcre) => {
+    requiredNumber(plantsPerAcre, 'plantsPerAcre', { atLeast: 0 });
+    if (plantsPerAcre === 0) return { kind: 'value', percent: 0, basis: 'no-plants', extrapolatedInSource: false };
+    const percent = interpolate(line, plantsPerAcre);
+    const beyond: TableEnd[] = [];
+    if (plantsPerAcre < lowest) beyond.push('stand-below');
+    if (plantsPerAcre > highest) beyond.push('stand-above');
+    if (dateEnd) beyond.push(dateEnd);
+    if (beyond.length > 0) return { kind: 'at-most', percent, beyond, extrapolatedInSource };
+    const isFull = full !== undefined && plantsPerAcre >= full.from && plantsPerAcre <= full.to;
+    const printed = dayPrinted && (isFull || isAnchor(line, plantsPerAcre));
+    return { kind: 'value', percent, basis: printed ? 'printed' : 'interpolated', extrapolatedInSource };
+  };
+}
+
+/** The table's line of percents over stand on one day, read between its dates; the edge row beyond them. */
+export function tableLineOnDay(table: StandDateTable, planted: MonthDay, field = 'plantedOn'): { at: number; result: number }[] {
+  const day = dayOfYear(planted, field);
+  const bands = table.rows.map((row) => ({ row, from: dayOfYear(row.from, 'rows'), to: dayOfYear(row.to, 'rows') }));
   return table.stands.map((stand, column) => {
-    const anchors = table.rows.flatMap((row, index) => {
-      const { from, to } = bands[index] as { from: number; to: number };
+    const anchors = bands.flatMap(({ row, from, to }) => {
       const result = row.percents[column] as number;
       return to > from ? [{ at: from, result }, { at: to, result }] : [{ at: from, result }];
     });
     return { at: stand, result: interpolate(anchors, day) };
   });
+}
+
+/** Whether a day lies before the table's first date, after its last, or within. */
+export function tableDateEnd(table: StandDateTable, planted: MonthDay, field = 'plantedOn'): 'date-before' | 'date-after' | null {
+  const day = dayOfYear(planted, field);
+  if (day < dayOfYear((table.rows[0] as DateBand).from, 'rows')) return 'date-before';
+  return day > dayOfYear((table.rows[table.rows.length - 1] as DateBand).to, 'rows') ? 'date-after' : null;
 }

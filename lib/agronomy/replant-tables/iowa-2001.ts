@@ -7,6 +7,7 @@ export const iowa2001: StandDateTable = {
   source: 'Iowa State University 2001, PM 1885 table 7',
   age: 'Hybrids of the 1990s, Iowa; between its bands of dates our own interpolation',
   stands: [12_000, 16_000, 20_000, 24_000, 28_000, 32_000],
+  fullStandBand: { from: 28_000, to: 32_000 },
   rows: [
     { from: { month: 4, day: 20 }, to: { month: 5, day: 5 }, percents: [68, 74, 81, 94, 100, 100] },
     { from: { month: 5, day: 13 }, to: { month: 5, day: 19 }, percents: [67, 73, 80, 93, 99, 99] },

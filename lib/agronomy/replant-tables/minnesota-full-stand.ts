@@ -1,6 +1,6 @@
-import { interpolate } from '../interpolate';
-import { dayOfYear, type MonthDay } from '../replant-date';
+import type { MonthDay } from '../replant-date';
 import type { StandDateReading } from '../replant-table-nafziger';
+import { tableYieldPercent, type StandDateTable } from '../stand-date-table';
 
 export type MinnesotaTrials = 'lamberton-1988-2003' | 'three-sites-2009-2011';
 
@@ -11,8 +11,17 @@ const percents: Record<MinnesotaTrials, readonly number[]> = {
   'three-sites-2009-2011': [98, 99, 100, 100, 99, 98, 95, 92, 89, 84, 79],
 };
 
+/** What a full stand is, the service does not print; the band is that of Iowa's and Wisconsin's (common practice, no source). */
+const FULL_STAND = { from: 28_000, to: 36_000 };
+
 /** A stand of 22,000 planted on time, against a full one (Hicks 2002). */
 export const MINNESOTA_PERCENT_AT_22000 = 88;
+
+/** The same trials as one table among others: a full stand has one value a date, a thinner one only a bound. */
+export const minnesotaTable: Record<MinnesotaTrials, StandDateTable> = {
+  'lamberton-1988-2003': tableOf('lamberton-1988-2003', 'Minnesota, Lamberton 1988 to 2003'),
+  'three-sites-2009-2011': tableOf('three-sites-2009-2011', 'Minnesota, three sites 2009 to 2011'),
+};
 
 /**
  * What does a full stand make in Minnesota when it is planted on this day?
@@ -23,11 +32,20 @@ export const MINNESOTA_PERCENT_AT_22000 = 88;
  * service does not print thinner ones by date. Example: Lamberton, 20 May: 92 %.
  */
 export function minnesotaFullStandPercent(trials: MinnesotaTrials, planted: MonthDay): StandDateReading {
-  const day = dayOfYear(planted, 'plantedOn');
-  const anchors = days.map(([month, dayOfMonth], index) => ({ at: dayOfYear({ month, day: dayOfMonth }, 'plantedOn'), result: percents[trials][index] as number }));
-  const percent = interpolate(anchors, day);
-  const [first, last] = [anchors[0]?.at ?? day, anchors[anchors.length - 1]?.at ?? day];
-  if (day < first) return { kind: 'at-most', percent: 100, beyond: ['date-before'], extrapolatedInSource: false };
-  if (day > last) return { kind: 'at-most', percent, beyond: ['date-after'], extrapolatedInSource: false };
-  return { kind: 'value', percent, basis: anchors.some(({ at }) => at === day) ? 'printed' : 'interpolated', extrapolatedInSource: false };
+  return tableYieldPercent(minnesotaTable[trials], planted, FULL_STAND.from);
+}
+
+function tableOf(trials: MinnesotaTrials, name: string): StandDateTable {
+  return {
+    id: `minnesota-${trials}`,
+    name,
+    source: 'University of Minnesota',
+    age: 'For full stands only, taken as 28,000 plants and more; thinner ones are not printed by date, so only a bound',
+    stands: [FULL_STAND.from, FULL_STAND.to],
+    fullStandBand: FULL_STAND,
+    rows: days.map(([month, day], index) => {
+      const percent = percents[trials][index] as number;
+      return { from: { month, day }, to: { month, day }, percents: [percent, percent] };
+    }),
+  };
 }

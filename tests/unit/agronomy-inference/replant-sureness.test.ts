@@ -4,6 +4,8 @@ import { firstLookAgain } from '@/lib/agronomy/first-look-again';
 import { hoeGain } from '@/lib/agronomy/hoe-gain';
 import { oneMoreRowSample } from '@/lib/agronomy/inference/one-more-row-sample';
 import { ImpossibleInput } from '@/lib/agronomy/outcome';
+import { breakEvenStand } from '@/lib/agronomy/replant-break-even';
+import { breakEvenStandByTable } from '@/lib/agronomy/replant-break-even-by-table';
 import { breakEvenPrice } from '@/lib/agronomy/replant-break-even-price';
 import { replantGainByTable } from '@/lib/agronomy/replant-gain-by-table';
 import { lastReplantDay } from '@/lib/agronomy/replant-last-day';
@@ -89,6 +91,20 @@ describe('the simulation', () => {
     expect(chancy.replantWinsShare).toBeLessThan(0.83);
   });
 
+  it('draws the chance and the yield of a poor second stand from their spans, and stays as it was where both are points', () => {
+    const chancy = { ...asked, tables: [nafziger1994], stand: { plantsPerAcre: 10_000, error: null }, terms: { ...terms, poorSecondStandChance: 1, poorSecondStandYieldShare: 0.3 } };
+    // The chance is even from 0 to 0.4, so 0.2 on the average; replanting wins with a good second stand alone.
+    const spread = replantSimulation({ ...chancy, poorSecondStandChance: { lower: 0, upper: 0.4 } });
+    expect(spread.replantWinsShare).toBeGreaterThan(0.77);
+    expect(spread.replantWinsShare).toBeLessThan(0.83);
+    // Keeping makes 68 %; with $50 at $4 a second stand must make 74.25 %, the middle of the span.
+    const yields = replantSimulation({ ...chancy, poorSecondStandYieldShare: { lower: 0.6925, upper: 0.7925 } });
+    expect(yields.replantWinsShare).toBeGreaterThan(0.46);
+    expect(yields.replantWinsShare).toBeLessThan(0.54);
+    const points = replantSimulation({ ...chancy, poorSecondStandChance: { lower: 1, upper: 1 }, poorSecondStandYieldShare: { lower: 0.3, upper: 0.3 } });
+    expect(points.keepWinsShare).toBe(1);
+  });
+
   it('leaves draws open where a table gives only a bound', () => {
     const open = replantSimulation({ ...asked, tables: [wisconsin2003FullSeason], stand: { plantsPerAcre: 12_000, error: null } });
     expect(open).toMatchObject({ openShare: 1, keepWinsShare: 0, gainDollarsPerAcre: null, tablesDisagree: false });
@@ -107,11 +123,46 @@ describe('the simulation', () => {
     ['no table', { tables: [] }],
     ['a price of nothing', { priceDollarsPerBushel: { lower: 0, upper: 4 } }],
     ['prices out of order', { priceDollarsPerBushel: { lower: 5, upper: 4 } }],
+    ['a chance below nothing', { poorSecondStandChance: { lower: -0.1, upper: 0.2 } }],
+    ['chances out of order', { poorSecondStandChance: { lower: 0.3, upper: 0.2 } }],
+    ['a poor yield above all', { poorSecondStandYieldShare: { lower: 0.3, upper: 1.1 } }],
     ['too few draws', { draws: 10 }],
     ['too many draws', { draws: 1e6 }],
     ['no such seed', { seed: -1 }],
   ])('refuses %s', (_, changes) => {
     expect(() => replantSimulation({ ...asked, ...changes })).toThrow(ImpossibleInput);
+  });
+});
+
+describe('the break-even stand by a table', () => {
+  it('is the grid’s own on the grid of Nafziger', () => {
+    for (const changes of [{}, { plantedOn: day(4, 1) }, { replantOn: day(6, 20) }, { plantedOn: day(4, 1), replantOn: day(6, 20) }, { costs: [{ label: 'all', dollarsPerAcre: 400 }] }, { insurancePaymentDollarsPerAcre: 400 }, { gapLossShare: 0.05, unevenLossShare: 0.05 }, { plantedOn: day(4, 1), costs: [{ label: 'all', dollarsPerAcre: 400 }] }]) {
+      const asked = { ...terms, ...changes };
+      const own = breakEvenStand(asked);
+      expect(breakEvenStandByTable(nafziger1994, asked)).toEqual(own.kind === 'stand' ? { ...own, plantsPerAcre: expect.closeTo(own.plantsPerAcre, 6) } : own);
+    }
+  });
+
+  it('is read on the table asked: Iowa holds a stand cheaper to lose than Nafziger does', () => {
+    // By hand: 90 % of 200 bu less $50 / $4 = 167.5 bu, 83.75 %; between 20,000 (81) and 24,000 (94): 20,000 + 4,000 × 2.75 / 13.
+    const asked = { ...terms, plantedOn: day(5, 1), replantOn: day(5, 28) };
+    expect(breakEvenStandByTable(iowa2001, asked)).toEqual({ kind: 'stand', plantsPerAcre: expect.closeTo(20_846.15, 2), bound: 'exact' });
+  });
+
+  it('is a printed stand where the need is exactly its percent', () => {
+    // 90 % of 200 bu less $36 / $2 is 162 bu, 81 %, printed for 20,000; 148 bu, 74 %, for 16,000; 136 bu, 68 %, for 12,000, its lowest.
+    const costing = (dollarsPerAcre: number) => ({ ...terms, priceDollarsPerBushel: 2, plantedOn: day(5, 1), replantOn: day(5, 28), costs: [{ label: 'all', dollarsPerAcre }] });
+    for (const [cost, stand] of [[36, 20_000], [64, 16_000], [88, 12_000]] as const) {
+      expect(breakEvenStandByTable(iowa2001, costing(cost))).toEqual({ kind: 'stand', plantsPerAcre: expect.closeTo(stand, 6), bound: 'exact' });
+    }
+  });
+
+  it('is below a table that prints full stands only, and none where even those earn less', () => {
+    const asked = { ...terms, plantedOn: day(5, 1), replantOn: day(6, 1) };
+    expect(breakEvenStandByTable(wisconsin2003FullSeason, asked)).toEqual({ kind: 'below-table', plantsPerAcre: 28_000 });
+    expect(breakEvenStandByTable(wisconsin2003FullSeason, { ...asked, insurancePaymentDollarsPerAcre: 500 })).toEqual({ kind: 'none-in-table' });
+    expect(breakEvenStandByTable(wisconsin2003FullSeason, { ...asked, replantOn: day(6, 25), insurancePaymentDollarsPerAcre: 900 })).toEqual({ kind: 'cannot-tell' });
+    expect(breakEvenStandByTable(wisconsin2003FullSeason, { ...asked, plantedOn: day(4, 1) })).toEqual({ kind: 'cannot-tell' });
   });
 });
 

@@ -3,8 +3,9 @@ import { gapLossShare } from '@/lib/agronomy/gap-loss-share';
 import { ImpossibleInput } from '@/lib/agronomy/outcome';
 import { nafzigerYieldPercent } from '@/lib/agronomy/replant-table-nafziger';
 import { iowa2001 } from '@/lib/agronomy/replant-tables/iowa-2001';
-import { minnesotaFullStandPercent, MINNESOTA_PERCENT_AT_22000 } from '@/lib/agronomy/replant-tables/minnesota-full-stand';
+import { minnesotaFullStandPercent, minnesotaTable, MINNESOTA_PERCENT_AT_22000 } from '@/lib/agronomy/replant-tables/minnesota-full-stand';
 import { nafziger1994 } from '@/lib/agronomy/replant-tables/nafziger-1994';
+import { publishedTables } from '@/lib/agronomy/replant-tables/published-tables';
 import { wisconsin2003FullSeason, wisconsin2003ShortSeason } from '@/lib/agronomy/replant-tables/wisconsin-2003';
 import { checkedTable, tableYieldPercent, type StandDateTable } from '@/lib/agronomy/stand-date-table';
 
@@ -69,6 +70,26 @@ describe('the tables of stand and date', () => {
     expect(tableYieldPercent(nafziger1994, day(4, 30), 20_000)).toMatchObject({ percent: 92 });
   });
 
+  it('print a full stand as one value: 30,000 is printed in Iowa, as are 28,000 and 32,000, and 27,000 is read between', () => {
+    const basisAt = (stand: number) => tableYieldPercent(iowa2001, day(5, 28), stand);
+    for (const stand of [28_000, 29_999, 30_000, 32_000]) expect(basisAt(stand)).toMatchObject({ percent: 90, basis: 'printed' });
+    expect(basisAt(27_000)).toMatchObject({ kind: 'value', basis: 'interpolated' });
+    expect(tableYieldPercent(iowa2001, day(5, 22), 30_000)).toMatchObject({ kind: 'value', basis: 'interpolated' });
+  });
+
+  it('all answer through one door, each with its source and age, and hold as tables of one’s own would', () => {
+    expect(new Set(publishedTables.map(({ id }) => id)).size).toBe(6);
+    for (const table of publishedTables) {
+      expect(checkedTable(table)).toBe(table);
+      expect(table.age.length).toBeGreaterThan(10);
+      expect(tableYieldPercent(table, day(5, 14), 30_000).percent).toBeGreaterThan(80);
+    }
+  });
+
+  it('only bound a thinner stand in Minnesota, where full ones alone are printed by date', () => {
+    expect(tableYieldPercent(minnesotaTable['lamberton-1988-2003'], day(5, 20), 22_000)).toEqual({ kind: 'at-most', percent: 92, beyond: ['stand-below'], extrapolatedInSource: false });
+  });
+
   it('refuse a negative stand and a day in no calendar', () => {
     expect(() => tableYieldPercent(iowa2001, day(5, 1), -1)).toThrow(ImpossibleInput);
     expect(() => tableYieldPercent(iowa2001, day(5, 1), NaN)).toThrow(ImpossibleInput);
@@ -90,7 +111,7 @@ describe('full stands in Minnesota', () => {
 
   it('are read between dates, and bounded outside them', () => {
     expect(minnesotaFullStandPercent('lamberton-1988-2003', day(6, 2))).toMatchObject({ kind: 'value', basis: 'interpolated' });
-    expect(minnesotaFullStandPercent('lamberton-1988-2003', day(4, 10))).toMatchObject({ kind: 'at-most', percent: 100, beyond: ['date-before'] });
+    expect(minnesotaFullStandPercent('lamberton-1988-2003', day(4, 10))).toMatchObject({ kind: 'at-most', percent: 99, beyond: ['date-before'] });
     expect(minnesotaFullStandPercent('lamberton-1988-2003', day(6, 20))).toMatchObject({ kind: 'at-most', percent: 69, beyond: ['date-after'] });
     expect(() => minnesotaFullStandPercent('lamberton-1988-2003', day(13, 1))).toThrow(ImpossibleInput);
   });
@@ -123,6 +144,8 @@ describe('a table of one’s own', () => {
     ['too few percents', { rows: [own.rows[0]!, { ...own.rows[1]!, percents: [40] }] }, 'rows.1.percents'],
     ['a percent over 110', { rows: [{ ...own.rows[0]!, percents: [60, 111] }, own.rows[1]!] }, 'rows.0.percents.1'],
     ['a percent below 0', { rows: [{ ...own.rows[0]!, percents: [-1, 100] }, own.rows[1]!] }, 'rows.0.percents.0'],
+    ['a full stand of no width', { fullStandBand: { from: 28_000, to: 28_000 } }, 'fullStandBand'],
+    ['a full stand below nothing', { fullStandBand: { from: -1, to: 28_000 } }, 'fullStandBand'],
     ['a day in no calendar', { rows: [{ ...own.rows[0]!, from: day(4, 31) }, own.rows[1]!] }, 'rows.0.from'],
   ])('is refused with %s, at its place', (_, changes, field) => {
     expect(() => checkedTable({ ...own, ...changes })).toThrow(expect.objectContaining({ name: 'ImpossibleInput', field }));
