@@ -44,7 +44,7 @@ export function WorkingSection({ comparison }: { comparison: TrialComparison }) 
     { name: texts.facts.blocks, text: whole(analysis.blocks), entry: null },
     { name: texts.facts.strips, text: whole(analysis.strips), entry: null },
     { name: texts.facts.missing, text: whole(analysis.missingStrips), entry: null },
-    { name: texts.facts.error, text: words.amount(Math.sqrt(analysis.meanSquareError)), entry: 'block-interval' },
+    { name: texts.facts.error, text: words.amount(analysis.errorSd), entry: 'block-interval' },
     { name: texts.facts.degrees, text: whole(analysis.errorDegreesOfFreedom), entry: null },
     {
       name: texts.facts.f,

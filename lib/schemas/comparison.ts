@@ -17,7 +17,7 @@ const analysisSchema = z.object({
   blocks: number,
   strips: number,
   missingStrips: number,
-  meanSquareError: number,
+  errorSd: number,
   errorDegreesOfFreedom: number,
   settingDegreesOfFreedom: number,
   fRatio: number,

@@ -31,6 +31,8 @@ export type BlockAnalysis = {
   /** Strips that complete blocks would have had and these do not. */
   missingStrips: number;
   meanSquareError: number;
+  /** Its root: how far strips of one setting and block lie apart, in the figure's own unit. */
+  errorSd: number;
   errorDegreesOfFreedom: number;
   settingDegreesOfFreedom: number;
   fRatio: number;
@@ -101,6 +103,7 @@ export function blockAnalysis(strips: readonly StripFigure[]): Outcome<BlockAnal
     strips: used.length,
     missingStrips: missingCells(used, blocks, settings),
     meanSquareError,
+    errorSd: Math.sqrt(meanSquareError),
     errorDegreesOfFreedom,
     settingDegreesOfFreedom,
     fRatio,

@@ -43,7 +43,7 @@ export function compareFigure(
       blocks: fitted.blocks,
       strips: fitted.strips,
       missingStrips: fitted.missingStrips,
-      meanSquareError: fitted.meanSquareError,
+      errorSd: fitted.errorSd,
       errorDegreesOfFreedom: fitted.errorDegreesOfFreedom,
       settingDegreesOfFreedom: fitted.settingDegreesOfFreedom,
       fRatio: fitted.fRatio,
