@@ -37,7 +37,11 @@ export function illinois2014(late: LatePlants): Outcome<RestatedPenalty> {
   requiredLatePlants(late);
   const even = isEvenStand(late);
   if (!even && late.lateShare > SHARE_MOST + SAME_NUMBER) {
-    return insufficient('beyond-study', 'at most 75 % of plants late', `${spokenNumber(late.lateShare * 100)} %`);
+    return insufficient(
+      'beyond-study',
+      'at most 75 % of plants late',
+      `${spokenNumber(late.lateShare * 100)} %`,
+    );
   }
   if (!even && late.delayDays > DELAYS_DAYS.threeWeeks) {
     return insufficient('beyond-study', 'a delay up to 21 days', `${spokenNumber(late.delayDays)} days`);

@@ -23,9 +23,17 @@ export function ohioReplantGain(late: LatePlants): Outcome<ReplantGainBound> {
   if (isEvenStand(late)) return value({ gainPercentMost: 0, basis: 'even' });
   if (late.delayDays < TWO_WEEKS_DAYS) return value({ gainPercentMost: 5, basis: 'printed' });
   if (late.delayDays < THREE_WEEKS_DAYS) {
-    return insufficient('beyond-study', 'a delay under 14 days, or of 21 and more', `${spokenNumber(late.delayDays)} days`);
+    return insufficient(
+      'beyond-study',
+      'a delay under 14 days, or of 21 and more',
+      `${spokenNumber(late.delayDays)} days`,
+    );
   }
   return late.lateShare >= 0.5
     ? value({ gainPercentMost: 10, basis: 'printed' })
-    : insufficient('beyond-study', 'half of the plants late or more', `${spokenNumber(late.lateShare * 100)} %`);
+    : insufficient(
+        'beyond-study',
+        'half of the plants late or more',
+        `${spokenNumber(late.lateShare * 100)} %`,
+      );
 }

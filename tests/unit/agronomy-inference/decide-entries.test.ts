@@ -6,6 +6,7 @@ import { hoeGain } from '@/lib/agronomy/hoe-gain';
 import { oneMoreRowSample } from '@/lib/agronomy/inference/one-more-row-sample';
 import { decideEntries } from '@/lib/agronomy/register/decide-entries';
 import type { WorkedExample } from '@/lib/agronomy/register/register-entry';
+import { breakEvenStandByTable } from '@/lib/agronomy/replant-break-even-by-table';
 import { breakEvenPrice } from '@/lib/agronomy/replant-break-even-price';
 import { lastReplantDay } from '@/lib/agronomy/replant-last-day';
 import { replantSimulation } from '@/lib/agronomy/replant-simulation';
@@ -49,6 +50,10 @@ const again: Record<string, (inputs: Inputs) => Record<string, number | undefine
       draws: one(inputs, 'draws'), seed: one(inputs, 'seed'),
     }).keepWinsShare,
   }),
+  'break-even-stand-by-table': (inputs) => {
+    const even = breakEvenStandByTable(iowa2001, { ...costing(inputs), plantedOn: { month: 5, day: 1 }, replantOn: { month: 5, day: 28 } });
+    return { stand: even.kind === 'stand' ? even.plantsPerAcre : NaN };
+  },
   'break-even-price': (inputs) => {
     const price = breakEvenPrice(nafziger1994, costing(inputs), one(inputs, 'stand'));
     return { price: price.kind === 'price' ? price.dollarsPerBushel : NaN };
