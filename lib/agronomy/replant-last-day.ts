@@ -1,7 +1,7 @@
 import { dayOfYear, type MonthDay } from './replant-date';
-import { replantGainByTable } from './replant-gain-by-table';
+import { gainOfReadings } from './replant-gain-by-table';
 import type { ReplantTerms } from './replant-sum';
-import type { StandDateTable } from './stand-date-table';
+import { tableYieldPercent, type StandDateTable } from './stand-date-table';
 
 /** `never`: not even on the day after planting; `beyond-table`: still on the table's last day; `cannot-tell`: a bound. */
 export type LastReplantDay = { kind: 'day'; day: MonthDay } | { kind: 'never' } | { kind: 'beyond-table' } | { kind: 'cannot-tell' };
@@ -22,8 +22,10 @@ export function lastReplantDay(table: StandDateTable, terms: ReplantTerms, plant
   const last = table.rows[table.rows.length - 1]?.to ?? terms.replantOn;
   const lastDay = dayOfYear(last, 'rows');
   const firstDay = dayOfYear(terms.plantedOn, 'plantedOn') + 1;
+  const kept = tableYieldPercent(table, terms.plantedOn, plantsPerAcre, 'plantedOn');
   for (let day = lastDay; day >= firstDay; day -= 1) {
-    const { gainDollarsPerAcre: gain } = replantGainByTable(table, { ...terms, replantOn: monthDay(day) }, plantsPerAcre);
+    const second = tableYieldPercent(table, monthDay(day), terms.replantPlantsPerAcre, 'replantOn');
+    const { gainDollarsPerAcre: gain } = gainOfReadings(terms, kept, second);
     if (gain.lower > 0) return day === lastDay ? { kind: 'beyond-table' } : { kind: 'day', day: monthDay(day) };
     if (gain.upper > 0) return { kind: 'cannot-tell' };
   }
