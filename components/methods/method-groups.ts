@@ -4,14 +4,17 @@ import { penaltyStudies } from '@/lib/agronomy/penalty/penalty';
 import { comparisonEntries } from '@/lib/agronomy/register/comparison-entries';
 import { decideEntries } from '@/lib/agronomy/register/decide-entries';
 import { emergenceFitEntries } from '@/lib/agronomy/register/emergence-fit-entries';
+import { moneyEntries } from '@/lib/agronomy/register/money-entries';
 import type { RegisterEntry } from '@/lib/agronomy/register/register-entry';
 import { residueEntries } from '@/lib/agronomy/register/residue-entries';
+import { restatedPenaltyEntries } from '@/lib/agronomy/register/restated-penalty-entries';
 import { scoreEntries } from '@/lib/agronomy/register/score-entries';
 import { spacingEntries } from '@/lib/agronomy/register/spacing-entries';
 import { standEntries } from '@/lib/agronomy/register/stand-entries';
 import { standEstimatorEntries } from '@/lib/agronomy/register/stand-estimator-entries';
 import { timingDetailEntries } from '@/lib/agronomy/register/timing-detail-entries';
 import { timingEntries } from '@/lib/agronomy/register/timing-entries';
+import { yieldEntries } from '@/lib/agronomy/register/yield-entries';
 import { methodTexts } from '@/lib/texts/method-texts';
 import { lateStudies, spacingStudies } from '@/lib/texts/score-texts';
 
@@ -34,9 +37,11 @@ export function methodGroups(): MethodGroup[] {
     { id: 'spacing', title: texts.spacing, entries: Object.values(spacingEntries) },
     { id: 'residue', title: texts.residue, entries: residueEntries },
     { id: 'score', title: texts.score, entries: Object.values(scoreEntries) },
-    { id: 'late', title: texts.late, entries: lateStudies.map((study) => register[study]) },
+    { id: 'late', title: texts.late, entries: [...lateStudies.map((study) => register[study]), ...restatedPenaltyEntries] },
     { id: 'uneven', title: texts.uneven, entries: [...spacingStudies, ...ungrouped].map((study) => register[study]) },
     { id: 'comparison', title: texts.comparison, entries: [...inferenceRegister.filter((entry) => !ofReplant(entry)), ...comparisonEntries] },
     { id: 'replant', title: texts.replant, entries: [...inferenceRegister.filter(ofReplant), ...decideEntries] },
+    { id: 'yield', title: texts.yield, entries: yieldEntries },
+    { id: 'money', title: texts.money, entries: moneyEntries },
   ];
 }

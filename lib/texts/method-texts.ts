@@ -15,6 +15,8 @@ export const methodTexts = {
     uneven: 'Yield lost to uneven spacing',
     comparison: 'Comparing settings',
     replant: 'Keep or replant',
+    yield: 'Harvest',
+    money: 'Whether equipment pays',
   },
   tryLead: 'Worked out in this browser with the same formulas; nothing is sent or kept. Each form opens with a published example.',
   entry: {
