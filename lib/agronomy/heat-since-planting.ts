@@ -1,16 +1,18 @@
-import { degreeDaysFahrenheit } from './degree-days';
+import { degreeDaysCelsius, degreeDaysFahrenheit } from './degree-days';
 import { ImpossibleInput, insufficient, value, type Outcome } from './outcome';
 import { requiredNumber } from './required-number';
 
-/** A day's air temperatures, `day` being 0 on the planting day, 1 on the next. */
-export type WeatherDay = { day: number; highF: number; lowF: number };
+/** A day's air temperatures in °F or in °C, `day` being 0 on the planting day, 1 on the next. */
+export type WeatherDay = { day: number; highF: number; lowF: number } | { day: number; highC: number; lowC: number };
+
+const FAHRENHEIT_PER_CELSIUS = 1.8;
 
 /**
  * `through-yesterday`: what a morning count goes by. `by-the-hour`: the day of the visit brings its part up to then.
  */
 export type HeatConvention = 'through-yesterday' | 'by-the-hour';
 
-export type Heat = { degreeDaysF: number; convention: HeatConvention; plantingDayShare: number };
+export type Heat = { degreeDaysF: number; degreeDaysC: number; convention: HeatConvention; plantingDayShare: number };
 
 type HeatAsked = {
   weather: readonly WeatherDay[];
@@ -25,8 +27,8 @@ type HeatAsked = {
 /**
  * How much heat had a field had between planting and a visit?
  *
- * Takes daily highs and lows in °F by day since planting, in any order, when on the planting day it was planted, and the
- * day and part of day of the visit. Returns °F degree days with the convention that made them. Insufficient where a day
+ * Takes daily highs and lows in °F or °C by day since planting, in any order, when on the planting day it was planted, and the
+ * day and part of day of the visit. Returns degree days in both units with the convention that made them. Insufficient where a day
  * that is needed has no weather: the answer names those days. Throws ImpossibleInput for a day given twice, parts outside
  * 0 to 1, a visit before planting, and temperatures as degreeDaysFahrenheit does.
  * Method: 86/50 degree days summed. The planting day counts from planting on, in proportion to what was left of it. Both
@@ -50,7 +52,7 @@ export function heatSincePlanting(asked: HeatAsked): Outcome<Heat> {
     else degreeDaysF += heat * shareOfDay(day);
   }
   if (missing.length > 0) return insufficient('weather-missing', `the weather of every day from 0 to ${lastDay}`, `none of day ${missing.join(', ')}`);
-  return value({ degreeDaysF, convention, plantingDayShare });
+  return value({ degreeDaysF, degreeDaysC: degreeDaysF / FAHRENHEIT_PER_CELSIUS, convention, plantingDayShare });
 
   function shareOfDay(day: number): number {
     const until = day === visitDay ? visitPart : 1;
@@ -61,10 +63,11 @@ export function heatSincePlanting(asked: HeatAsked): Outcome<Heat> {
 
 function heatByDay(weather: readonly WeatherDay[]): Map<number, number> {
   const byDay = new Map<number, number>();
-  for (const { day, highF, lowF } of weather) {
+  for (const weatherDay of weather) {
+    const { day } = weatherDay;
     if (!Number.isInteger(day)) throw new ImpossibleInput('Weather is given by whole days after planting.', 'day');
     if (byDay.has(day)) throw new ImpossibleInput(`Day ${day} has its weather twice.`, 'day');
-    byDay.set(day, degreeDaysFahrenheit(highF, lowF));
+    byDay.set(day, 'highF' in weatherDay ? degreeDaysFahrenheit(weatherDay.highF, weatherDay.lowF) : FAHRENHEIT_PER_CELSIUS * degreeDaysCelsius(weatherDay.highC, weatherDay.lowC));
   }
   return byDay;
 }

@@ -21,7 +21,7 @@ const many = (inputs: Inputs, name: string) => inputs[name] as readonly number[]
 const one = (inputs: Inputs, name: string) => inputs[name] as number;
 const visits = (inputs: Inputs) => many(inputs, 'days').map((days, index) => ({ days, plantsUp: many(inputs, 'plantsUp')[index] ?? 0 }));
 const curveOf = (days: readonly number[], plantsUp: readonly number[]) => answerOf(emergenceCurve(days.map((each, index) => ({ days: each, plantsUp: plantsUp[index] ?? 0 }))));
-const heat = (degreeDaysF: number) => value({ degreeDaysF, convention: 'by-the-hour' as const, plantingDayShare: 1 });
+const heat = (degreeDaysF: number) => value({ degreeDaysF, degreeDaysC: degreeDaysF / 1.8, convention: 'by-the-hour' as const, plantingDayShare: 1 });
 
 /** How each worked example is figured again by the code it explains. */
 const again: Record<string, (inputs: Inputs) => Record<string, number>> = {

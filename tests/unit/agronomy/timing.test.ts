@@ -154,10 +154,17 @@ describe('heat since planting', () => {
 
   it('counts the planting day from planting, and by the hour the day of the visit up to then', () => {
     // 6 degree days on the planting day, half of it left; 11.5 the next day, a quarter of it over.
-    expect(answerOf(heatSincePlanting({ ...asked, plantedAtPart: 0.5, visitDay: 1 }))).toEqual({ degreeDaysF: 3, convention: 'through-yesterday', plantingDayShare: 0.5 });
+    expect(answerOf(heatSincePlanting({ ...asked, plantedAtPart: 0.5, visitDay: 1 }))).toEqual({ degreeDaysF: 3, degreeDaysC: expect.closeTo(5 / 3, 9), convention: 'through-yesterday', plantingDayShare: 0.5 });
     expect(answerOf(heatSincePlanting({ ...asked, plantedAtPart: 0.5, visitDay: 1, visitPart: 0.25, convention: 'by-the-hour' })).degreeDaysF).toBeCloseTo(3 + 11.5 / 4, 9);
     expect(answerOf(heatSincePlanting({ ...asked, plantedAtPart: 0.75, visitDay: 0, visitPart: 0.5, convention: 'by-the-hour' })).degreeDaysF).toBe(0);
     expect(answerOf(heatSincePlanting({ ...asked, visitDay: 0 })).degreeDaysF).toBe(0);
+  });
+
+  it('takes °C as well, each day in its own unit', () => {
+    // 30 and 10 °C are 86 and 50 °F: 18 °F degree days, 10 in °C.
+    const celsius = answerOf(heatSincePlanting({ ...asked, weather: [{ day: 0, highC: 30, lowC: 10 }, { day: 1, highF: 86, lowF: 50 }], visitDay: 2 }));
+    expect(celsius.degreeDaysF).toBeCloseTo(36, 9);
+    expect(celsius.degreeDaysC).toBeCloseTo(20, 9);
   });
 
   it('names the days whose weather is missing', () => {
@@ -179,7 +186,7 @@ describe('heat since planting', () => {
 });
 
 describe('the curve on the scale of heat', () => {
-  const heat = (degreeDaysF: number) => value({ degreeDaysF, convention: 'through-yesterday' as const, plantingDayShare: 1 });
+  const heat = (degreeDaysF: number) => value({ degreeDaysF, degreeDaysC: degreeDaysF / 1.8, convention: 'through-yesterday' as const, plantingDayShare: 1 });
   const curve = curveOf([9, 10, 11, 12], [0, 10, 20, 30]);
 
   it('interpolates the same counts against heat', () => {
