@@ -1,9 +1,10 @@
+import { Disclosure } from '@/components/ui/disclosure';
 import type { RegisterEntry } from '@/lib/agronomy/register/register-entry';
 import { methodTexts } from '@/lib/texts/method-texts';
 
 const texts = methodTexts.entry;
 
-/** One figure: what it says at the left, how it comes about at the right. */
+/** One figure: what it says at the left, its equation at the right; where it comes from, its limits and an example are one press away. */
 export function MethodEntry({ entry }: { entry: RegisterEntry }) {
   const example = entry.workedExample;
   const facts = [
@@ -18,25 +19,29 @@ export function MethodEntry({ entry }: { entry: RegisterEntry }) {
         <p className="text-15">{entry.sentence}</p>
         <p className="font-mono text-13 text-ink-soft">{texts.version(entry.version)}</p>
       </div>
-      <dl className="flex min-w-0 flex-col gap-3">
-        <div>
-          <dt className="text-13 font-bold">{texts.equation}</dt>
-          <dd className="max-w-reading font-mono text-15">{entry.equation}</dd>
-        </div>
-        {facts.map((fact) => (
-          <div key={fact.name}>
-            <dt className="text-13 font-bold">{fact.name}</dt>
-            <dd className="max-w-reading text-15">{fact.text}</dd>
-          </div>
-        ))}
-        <div>
-          <dt className="text-13 font-bold">{texts.example}</dt>
-          <dd className="max-w-reading text-15">
-            {example.given} {texts.gives} <strong>{example.result}</strong>
-          </dd>
-          <dd className="text-13 text-ink-soft">{texts.exampleFrom(example.source)}</dd>
-        </div>
-      </dl>
+      <div className="flex min-w-0 flex-col gap-1">
+        <p className="max-w-reading font-mono text-15">
+          <span className="sr-only">{texts.equation}: </span>
+          {entry.equation}
+        </p>
+        <Disclosure label={texts.more}>
+          <dl className="flex min-w-0 flex-col gap-3">
+            {facts.map((fact) => (
+              <div key={fact.name}>
+                <dt className="text-13 font-bold">{fact.name}</dt>
+                <dd className="max-w-reading text-15">{fact.text}</dd>
+              </div>
+            ))}
+            <div>
+              <dt className="text-13 font-bold">{texts.example}</dt>
+              <dd className="max-w-reading text-15">
+                {example.given} {texts.gives} <strong>{example.result}</strong>
+              </dd>
+              <dd className="text-13 text-ink-soft">{texts.exampleFrom(example.source)}</dd>
+            </div>
+          </dl>
+        </Disclosure>
+      </div>
     </article>
   );
 }

@@ -21,6 +21,7 @@ export const methodTexts = {
   tryLead: 'Worked out in this browser with the same formulas; nothing is sent or kept. Each form opens with a published example.',
   entry: {
     equation: 'Equation',
+    more: 'Source, limits and an example',
     source: 'Source',
     domain: 'Works for',
     limits: 'Does not tell',
