@@ -31,6 +31,10 @@ function byRecords(row: PlainRow) {
   const variation = spacingVariation(spacings);
   const placement = kachmanSmith([{ spacingsInches: spacings, theoreticalSpacingInches: row.theoretical }]);
   const curve = emergenceCurve(row.days.map((days, index) => ({ days, plantsUp: row.up[index] ?? 0 })));
+  const atLatest = (share: number) => {
+    const reached = curve.kind === 'value' ? emergencePercentile(curve.value, share) : curve;
+    return reached.kind === 'value' && 'bound' in reached.value && reached.value.bound === 'at-latest';
+  };
   const daysTo = (share: number) => {
     if (curve.kind === 'insufficient') return 'insufficient';
     const reached = emergencePercentile(curve.value, share);
@@ -49,7 +53,8 @@ function byRecords(row: PlainRow) {
     daysTo50: daysTo(0.5),
     daysTo90: daysTo(0.9),
     spreadDays: spread.kind === 'value' ? spread.value.days : 'insufficient',
-  };
+    atLatest: [atLatest(0.1), atLatest(0.5), atLatest(0.9)],
+  } as const;
 }
 
 const bitOf = {
@@ -63,6 +68,9 @@ function expectAsByRecords(rows: readonly PlainRow[]) {
   const figures = packedFigures(packed(rows));
   rows.forEach((row, index) => {
     const expected = byRecords(row);
+    const known = figures.known[index] ?? 0;
+    const bounds = [packedKnown.daysTo10AtLatest, packedKnown.daysTo50AtLatest, packedKnown.daysTo90AtLatest].map((bit) => (known & bit) !== 0);
+    expect([index, bounds]).toEqual([index, expected.atLatest]);
     for (const name of Object.keys(bitOf) as (keyof typeof bitOf)[]) {
       const isKnown = bitOf[name] === 0 || ((figures.known[index] ?? 0) & bitOf[name]) !== 0;
       const record = expected[name];
@@ -89,10 +97,15 @@ describe('figures of packed row samples', () => {
       const plants = Math.floor(stream.nextUnit() * 34);
       const places = Array.from({ length: plants }, () => Math.round(stream.nextUnit() * 418) / 2).sort((a, b) => a - b);
       const visits = Math.floor(stream.nextUnit() * 9);
-      const up = Array.from({ length: visits }, (_, index) => Math.max(0, Math.round(stream.nextUnit() * 4 + index * 4 - 6)));
+      const up = Array.from({ length: visits }, (_, index) => Math.max(0, Math.round(stream.nextUnit() * 9 + index * 3 - 6)));
       return plain({ places, days: up.map((_, index) => 7 + index + stream.nextUnit() / 2), up, held: plants });
     });
+    expect(rows.filter(({ up }) => up.some((plants, index) => plants < (up[index - 1] ?? 0))).length).toBeGreaterThan(50);
     expectAsByRecords(rows);
+  });
+
+  it('put a percentile that a visit meets on that visit', () => {
+    expectAsByRecords([plain({ up: [1, 5, 10] }), plain({ up: [0, 5, 10] }), plain({ up: [9, 10, 10] }), plain({ up: [5, 9, 10] })]);
   });
 
   it('put spacings on a limit where the record function puts them', () => {
@@ -123,6 +136,9 @@ describe('figures of packed row samples', () => {
     ['no area', { area: 0 }],
     ['an area without end', { area: Infinity }],
     ['negative plants', { held: -1 }],
+    ['plants without end', { held: Infinity }],
+    ['a count without end', { up: [0, 2, Infinity] }],
+    ['a day without end', { days: [8, 9, Infinity] }],
     ['plants that are no number', { held: NaN }],
     ['a negative count', { up: [-1, 2, 3] }],
     ['a count that is no number', { up: [0, NaN, 3] }],
