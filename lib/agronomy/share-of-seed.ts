@@ -1,4 +1,4 @@
-import { NORMAL_QUANTILE_975 } from './constants';
+import { NORMAL_QUANTILE_975, SAME_NUMBER } from './constants';
 import { insufficient, value, type Outcome } from './outcome';
 import { requiredNumber } from './required-number';
 import { spokenNumber } from './spoken-number';
@@ -40,14 +40,15 @@ export function shareOfSeed(plants: number, seeds: number): ShareOfSeed {
 export function wilsonInterval(hits: number, trials: number): Outcome<ShareInterval> {
   requiredNumber(hits, 'hits', { atLeast: 0 });
   requiredNumber(trials, 'trials', { above: 0 });
-  if (hits > trials) {
+  // Seeds come from rate × area, where decimals make 33.99999999999999 of 34: a full stand is no excess.
+  if (hits > trials + SAME_NUMBER) {
     return insufficient(
       'more-plants-than-seeds',
       `at most ${spokenNumber(trials)} plants, one a seed`,
       `${spokenNumber(hits)} plants`,
     );
   }
-  const share = hits / trials;
+  const share = Math.min(1, hits / trials);
   const square = NORMAL_QUANTILE_975 ** 2;
   const center = share + square / (2 * trials);
   const reach =
@@ -55,7 +56,7 @@ export function wilsonInterval(hits: number, trials: number): Outcome<ShareInter
   const scale = 1 + square / trials;
   return value({
     shareLower: hits === 0 ? 0 : Math.max(0, (center - reach) / scale),
-    shareUpper: hits === trials ? 1 : Math.min(1, (center + reach) / scale),
+    shareUpper: hits >= trials - SAME_NUMBER ? 1 : Math.min(1, (center + reach) / scale),
     level: 0.95,
     method: 'binomial-wilson',
   });

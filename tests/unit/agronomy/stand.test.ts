@@ -131,6 +131,27 @@ describe('shareOfSeed', () => {
     expect(reasonOf(share.interval)).toBe('more-plants-than-seeds');
   });
 
+  test('agrees with PROP-02, a stand and its ends over the seeding rate', () => {
+    const { input, expected } = referenceCase<
+      { plants_per_acre: number; lower: number; upper: number; seeds_per_acre: number },
+      { pct: number; lower: number; upper: number }
+    >(standMeasures, 'PROP-02');
+    const percentOf = (plants: number) => 100 * shareOfSeed(plants, input.seeds_per_acre).share;
+    expect(percentOf(input.plants_per_acre)).toBeCloseTo(expected.pct, 10);
+    expect(percentOf(input.lower)).toBeCloseTo(expected.lower, 10);
+    expect(percentOf(input.upper)).toBeCloseTo(expected.upper, 10);
+  });
+
+  test('has an interval for a full stand, whose seeds decimals make a hair fewer', () => {
+    // 34,000 × 209.088 × 30 / 6,272,640 is 33.99999999999999 in binary arithmetic, and 34 plants stand.
+    const row = { plantsHeld: 34, lengthInches: 209.088, rowSpacingInches: 30, seedsPerAcre: 34_000 };
+    const interval = answerOf(standOfOneRow(row));
+    // PROP-01 has 34 of 34 from 0.898485445846676 to 1, R 4.2.2 prop.test.
+    expect(interval.plantsPerAcreLower).toBeCloseTo(34_000 * 0.898485445846676, 4);
+    expect(interval.plantsPerAcreUpper).toBe(34_000);
+    expect(reasonOf(wilsonInterval(34.001, 34))).toBe('more-plants-than-seeds');
+  });
+
   test('makes 31 of 34 seeds 26 to 33 plants', () => {
     const { plants, seeds, wilson, tolerance } = published.countingInterval;
     const interval = answerOf(wilsonInterval(plants, seeds));
