@@ -52,7 +52,15 @@ function isLate(lateClass: PlantDelay['lateClass']): boolean {
   return lateClass === 'late' || lateClass === 'very-late';
 }
 
-function sheetDelays(
+/**
+ * How late is each plant of one tape sheet, against the first flush of its own row sample?
+ *
+ * Takes a row sample and the limits. Returns the delays of its plants in tape order, missing places left out, and whether
+ * shares read off them are exact or at least. Never insufficient: a plant whose day is not known is *unknown*, and without
+ * a sheet there are none. Throws ImpossibleInput as plantDelays does. Method: plantDelays from the tenth percentile.
+ * Example: a sheet without visits and marks gives *unknown* throughout.
+ */
+export function sheetDelays(
   sample: RowSample,
   limits: LateLimits,
 ): { plants: PlantDelay[]; bound: LateShare['bound'] } {

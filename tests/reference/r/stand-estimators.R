@@ -26,6 +26,11 @@ exact <- function(hits, trials) {
   list(hits = hits, trials = trials, lower = ends[1, ], upper = ends[2, ])
 }
 
+wilson <- function(hits, trials) {
+  ends <- mapply(function(x, n) suppressWarnings(prop.test(x, n, correct = FALSE))$conf.int[1:2], hits, trials)
+  list(hits = hits, trials = trials, lower = ends[1, ], upper = ends[2, ])
+}
+
 alike <- function(figures, strips) {
   rows <- summary(aov(figures ~ factor(strips)))[[1]]
   ms <- rows[['Mean Sq']]; n <- table(strips); k <- length(n)
@@ -69,5 +74,7 @@ cat(json(list(
   residueEqual = residue(c(44, 38, 51, 29), rep(100, 4)),
   residueUnequal = residue(c(44, 19, 51), c(100, 50, 100)),
   cleared = cleared(c(60, 55, 65), c(20, 25, 15)),
-  needed = needed(c(31, 28, 33, 26, 30, 29), 0.05)
+  needed = needed(c(31, 28, 33, 26, 30, 29), 0.05),
+  # On time, late and missing of 34 seeds; one find of two digs.
+  seedShares = wilson(c(29, 2, 3, 1), c(34, 34, 34, 2))
 )), '\n')

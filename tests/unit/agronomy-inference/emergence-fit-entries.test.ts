@@ -17,7 +17,7 @@ const again: Record<string, (inputs: Inputs) => Record<string, number>> = {
   },
   'where-the-seeds-went': (inputs) => {
     const account = answerOf(seedAccount([{ seeds: one(inputs, 'seeds'), onTime: one(inputs, 'onTime'), late: one(inputs, 'late'), dayNotSeen: 0, doubles: one(inputs, 'doubles'), digs: ['no-seed', 'seed-rotten'] }]));
-    return { onTime: account.onTime.share, late: account.late.share, missing: account.missing.share, notDropped: account.dug['no-seed']?.share ?? NaN };
+    return { onTime: account.onTime.share, late: account.late.share, missing: account.missing.share, noSeed: account.dug['no-seed']?.share ?? NaN, notAccountedFor: account.notAccountedFor.share };
   },
 };
 

@@ -15,6 +15,7 @@ function filesOfTheCore(below = ''): string[] {
 
 /** Which entry speaks for each calculation. */
 const spokenFor: Record<string, string> = {
+  'accounted-row': 'where-the-seeds-went',
   'acres-to-own': 'acres-to-own',
   'adjustment-labor': 'adjustment-labor',
   'annual-equipment-cost': 'annual-equipment-cost',
