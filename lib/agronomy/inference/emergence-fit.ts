@@ -1,15 +1,17 @@
 import { insufficient, value, type Outcome } from '../outcome';
 import { requiredNumber } from '../required-number';
 import type { SeenBetween } from '../turnbull';
+import { emergenceLikelihood } from './emergence-likelihood';
 import { emergenceShapes, standardShapes, type EmergenceShape } from './emergence-shape';
+import { likeliestCurve, type LikeliestCurve } from './likeliest-curve';
 import { invertedPositive, symmetricForm } from './linear-algebra';
-import { newtonMaximum, type Maximum } from './newton-maximum';
 
 /**
- * What the curve describes: the plants that emerged (the default), all seeds, or all seeds of which a share d ≤ 1 ever
- * emerges.
+ * What the curve describes: the plants that emerged (the default, all of them up by the last visit); those that will have
+ * emerged, of which the last visit saw only the early ones (divided by F at that visit); all seeds; or all seeds of which a
+ * share d ≤ 1 ever emerges.
  */
-export type FitBasis = 'emerged' | 'seeds' | 'seeds-with-final-share';
+export type FitBasis = 'emerged' | 'emerged-by-last-visit' | 'seeds' | 'seeds-with-final-share';
 
 export type Estimate = { estimate: number; standardError: number };
 
@@ -36,10 +38,12 @@ const NON_EMPTY_LEAST = 3;
  *
  * Takes intervals in days since planting with the plants that came up in each (seeds not seen yet have `byDays` null), a
  * shape and a basis. Returns location and scale of the logarithm of days, days to 10, 50 and 90 % and the spread with
- * standard errors, log-likelihood and AIC. Insufficient below three intervals with plants (interpolate then, and say so)
- * and where the likelihood has no single top. Throws ImpossibleInput for intervals or plants that cannot be.
+ * standard errors, log-likelihood and AIC. The last visit is the latest day of any interval, so give one that found nothing
+ * as 0 plants. Insufficient below three intervals with plants (interpolate then, and say so) and where the likelihood has no
+ * single top, or one so flat that the standard error of the scale or of the days to 50 or 90 % is as large as they are. Throws ImpossibleInput for intervals or plants that cannot be.
  * Method: maximum of Σ nᵢ log{F(tᵢ) − F(tᵢ₋₁)} for interval-censored data (Onofri, Mesgaran and Ritz 2022, Weed Science),
- * seeds not seen adding n log{1 − d F(tₖ)}; standard errors from the observed information by the delta method. Least squares
+ * seeds not seen adding n log{1 − d F(tₖ)}, and N log F(tₖ) taken off on the basis of the last visit, where AIC is not to be
+ * held against that of another basis; standard errors from the observed information by the delta method. Least squares
  * on cumulative counts would be the wrong likelihood. Agrees with survreg of R on type interval2.
  * Plants of one row are not independent, so its standard errors are too small for a row and serve to compare fits; settings
  * are compared by strips. With a final share at 1 the rest is fitted with all seeds emerging.
@@ -56,9 +60,10 @@ export function emergenceFit(seen: readonly SeenBetween[], shape: EmergenceShape
   if (filled < NON_EMPTY_LEAST) return insufficient('too-few-intervals', `${NON_EMPTY_LEAST} intervals with new plants, or interpolation`, `${filled}`);
   const counted = basis === 'emerged' ? emerged : seen.filter(({ plants }) => plants > 0);
   const fitsShare = basis === 'seeds-with-final-share' && counted.some(({ byDays }) => byDays === null);
-  const top = newtonMaximum((at) => logLikelihood(counted, shape, at, fitsShare), startOf(emerged, counted, fitsShare));
-  if (top && fitsShare && shareOf(top.at[2] as number) > 1 - 1e-4) return atTheBound(counted, shape, emerged);
-  return top ? described(top, shape, basis, fitsShare) : insufficient('fit-does-not-settle', 'one best curve', 'none that is better than its neighbors');
+  const sought = { shape, fitsShare, byLastVisitDays: basis === 'emerged-by-last-visit' ? lastVisitOf(seen) : null };
+  const curve = likeliestCurve(counted, sought);
+  const within = curve && !(fitsShare && (curve.finalShare as number) > AT_BOUND);
+  return within ? described(curve, shape, basis) : fitsShare ? atTheBound(counted, shape) : unsettled('none that is better than its neighbors');
 }
 
 /** All three shapes, and the one with the lowest AIC; insufficient where none settles. */
@@ -70,67 +75,53 @@ export function bestEmergenceFit(seen: readonly SeenBetween[], basis: FitBasis =
   return value({ best: others.reduce((best, each) => (each.aic < best.aic ? each : best), first), fits });
 }
 
-const shareOf = (logit: number) => 1 / (1 + Math.exp(-logit));
+/** A final share this near to 1 is taken for 1. */
+const AT_BOUND = 1 - 1e-4;
 
-function logLikelihood(counted: readonly SeenBetween[], shape: EmergenceShape, at: readonly number[], fitsShare: boolean): number {
-  const [location, logScale, logit] = at as [number, number, number];
-  const scale = Math.exp(logScale);
-  const { below } = standardShapes[shape];
-  const upBy = (days: number) => (days === 0 ? 0 : below((Math.log(days) - location) / scale));
-  const final = fitsShare ? shareOf(logit) : 1;
-  return counted.reduce((sum, { afterDays, byDays, plants }) => {
-    const likely = byDays === null ? 1 - final * upBy(afterDays) : final * (upBy(byDays) - upBy(afterDays));
-    return sum + plants * Math.log(Math.max(likely, 1e-300));
-  }, 0);
-}
+const unsettled = (had: string) => insufficient('fit-does-not-settle', 'one best curve', had);
 
-function startOf(emerged: readonly SeenBetween[], counted: readonly SeenBetween[], fitsShare: boolean): number[] {
-  const total = emerged.reduce((sum, { plants }) => sum + plants, 0);
-  const middle = ({ afterDays, byDays }: SeenBetween) => Math.log((afterDays + (byDays ?? afterDays)) / 2);
-  const mean = emerged.reduce((sum, each) => sum + each.plants * middle(each), 0) / total;
-  const variance = emerged.reduce((sum, each) => sum + each.plants * (middle(each) - mean) ** 2, 0) / total;
-  const start = [mean, Math.log(Math.max(0.05, Math.sqrt(variance)))];
-  if (!fitsShare) return start;
-  const all = counted.reduce((sum, { plants }) => sum + plants, 0);
-  const share = Math.min(0.99, total / all);
-  return [...start, Math.log(share / (1 - share))];
-}
+const lastVisitOf = (seen: readonly SeenBetween[]) => Math.max(...seen.map(({ afterDays, byDays }) => byDays ?? afterDays));
 
-function described(top: Maximum, shape: EmergenceShape, basis: FitBasis, fitsShare: boolean): Outcome<EmergenceFit> {
-  const covariance = covarianceOf(top.information);
-  if (!covariance) return insufficient('fit-does-not-settle', 'one best curve', 'a flat top');
-  const [location, logScale, logit] = top.at as [number, number, number];
-  const scale = Math.exp(logScale);
-  const estimate = (of: number, gradient: readonly number[]): Estimate => ({
+function described({ location, scale, finalShare, logLikelihood, information }: LikeliestCurve, shape: EmergenceShape, basis: FitBasis): Outcome<EmergenceFit> {
+  const covariance = covarianceOf(information);
+  if (!covariance) return unsettled('a flat top');
+  const others = finalShare === null ? [] : [0];
+  const estimate = (of: number, [byLocation, byLogScale]: readonly [number, number]): Estimate => ({
     estimate: of,
-    standardError: Math.sqrt(symmetricForm(covariance, [...gradient, ...(fitsShare ? [0] : [])])),
+    standardError: Math.sqrt(symmetricForm(covariance, [byLocation * scale, byLogScale, ...others])),
   });
   const { quantile } = standardShapes[shape];
   const dayOf = (share: number) => Math.exp(location + scale * quantile(share));
   const slopeOf = (share: number) => [dayOf(share), dayOf(share) * scale * quantile(share)] as const;
   const [early, late] = [slopeOf(0.1), slopeOf(0.9)];
-  const final = shareOf(logit);
-  return value({
+  const fit: EmergenceFit = {
     shape,
     basis,
     location: estimate(location, [1, 0]),
     scale: estimate(scale, [0, scale]),
-    finalShare: fitsShare ? { estimate: final, standardError: Math.sqrt(symmetricForm(covariance, [0, 0, final * (1 - final)])) } : null,
+    finalShare: finalShare === null ? null : { estimate: finalShare, standardError: Math.sqrt(symmetricForm(covariance, [0, 0, finalShare * (1 - finalShare)])) },
     daysTo10: estimate(dayOf(0.1), early),
     daysTo50: estimate(dayOf(0.5), slopeOf(0.5)),
     daysTo90: estimate(dayOf(0.9), late),
     spreadDays: estimate(dayOf(0.9) - dayOf(0.1), [late[0] - early[0], late[1] - early[1]]),
-    logLikelihood: top.value,
-    aic: -2 * top.value + 2 * top.at.length,
-  });
+    logLikelihood,
+    aic: -2 * logLikelihood + 2 * information.length,
+  };
+  // Where the last visit saw only the beginning, a ridge of curves fits alike: such errors are as large as what they belong to.
+  const told = [fit.scale, fit.daysTo50, fit.daysTo90].every(({ estimate: of, standardError }) => standardError < of);
+  return told ? value(fit) : unsettled('a top so flat that the day half are up is not told');
 }
 
-/** A final share of 1 lies on its bound, where the top is no top in d: the rest is fitted with all seeds emerging. */
-function atTheBound(counted: readonly SeenBetween[], shape: EmergenceShape, emerged: readonly SeenBetween[]): Outcome<EmergenceFit> {
-  const top = newtonMaximum((at) => logLikelihood(counted, shape, at, false), startOf(emerged, counted, false));
-  const fit = top ? described(top, shape, 'seeds-with-final-share', false) : null;
-  if (fit?.kind !== 'value') return insufficient('fit-does-not-settle', 'one best curve', 'none with a final share of 1');
-  return value({ ...fit.value, finalShare: { estimate: 1, standardError: null }, aic: fit.value.aic + 2 });
+/**
+ * A final share of 1 lies on its bound, where the top is no top in d: the rest is fitted with all seeds emerging. It holds only
+ * where a little less than 1 is no likelier.
+ */
+function atTheBound(counted: readonly SeenBetween[], shape: EmergenceShape): Outcome<EmergenceFit> {
+  const curve = likeliestCurve(counted, { shape, fitsShare: false, byLastVisitDays: null });
+  const lessThanAll = { location: curve?.location ?? NaN, scale: curve?.scale ?? NaN, finalShareLogit: Math.log(AT_BOUND / (1 - AT_BOUND)) };
+  if (!curve || emergenceLikelihood(counted, shape, lessThanAll, null) > curve.logLikelihood) return unsettled('none with a final share of 1');
+  const fit = described(curve, shape, 'seeds-with-final-share');
+  return fit.kind === 'value' ? value({ ...fit.value, finalShare: { estimate: 1, standardError: null }, aic: fit.value.aic + 2 }) : fit;
 }
 
 function covarianceOf(information: readonly (readonly number[])[]): number[][] | null {

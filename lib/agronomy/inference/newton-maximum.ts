@@ -1,3 +1,11 @@
+/** So little to gain moves a place by a hundred-thousandth of its standard error. */
+const LEAST_GAIN = 1e-10;
+/** A gain below this share of the value itself is lost in its rounding. */
+const LEAST_GAIN_OF_VALUE = 1e-13;
+
+/** Of central differences: the same wherever it stands, for a place far from 0 can still be sharp. */
+const STEP = 1e-4;
+
 export type Maximum = { at: number[]; value: number; information: number[][] };
 
 /**
@@ -5,41 +13,36 @@ export type Maximum = { at: number[]; value: number; information: number[][] };
  *
  * Takes the function and where to begin. Returns the place, the value and the observed information (the negative second
  * differences there), or null where no step improves and the slope is not flat. Throws nothing of its own.
- * Method: Newton’s steps from central differences, made uphill by Levenberg’s damping and halved until they improve.
- * It finds the top it stands under: begin near it. Example: −(x − 2)² from 0 gives 2 with information 2.
+ * Method: Newton’s steps from central differences, made uphill by Levenberg’s damping, which grows until a step improves. It
+ * is the top only where an undamped step would no longer gain anything: a short step under heavy damping shows nothing.
+ * It finds the top it stands under: begin near it, in numbers that matter by about 1. Example: −(x − 2)² from 0 gives 2 with information 2.
  */
 export function newtonMaximum(f: (at: readonly number[]) => number, begin: readonly number[]): Maximum | null {
   let at = [...begin];
   let value = f(at);
   let damping = 1e-3;
-  for (let step = 0; step < 300; step += 1) {
+  for (let step = 0; step < 300 && damping < 1e12; step += 1) {
     const { slope, information } = differences(f, at, value);
-    const move = damped(information, slope, damping);
-    if (move === null) {
-      damping = Math.max(1e-6, damping * 10);
-      if (damping > 1e12) return null;
-      continue;
-    }
-    const next = at.map((each, index) => each + (move[index] as number));
-    const nextValue = f(next);
-    if (nextValue >= value) {
-      const moved = Math.max(...move.map(Math.abs));
-      at = next;
-      value = nextValue;
-      damping = Math.max(1e-12, damping / 10);
-      if (moved < 1e-9) return { at, value, information: differences(f, at, value).information };
-    } else {
-      damping = Math.max(1e-9, damping * 10);
-      // Steps too small to tell apart: this is the top, as far as numbers go.
-      if (damping > 1e12) return Math.max(...slope.map(Math.abs)) < 1e-3 ? { at, value, information } : null;
+    const whole = damped(information, slope, 0);
+    if (whole && gainOf(whole, slope) < Math.max(LEAST_GAIN, LEAST_GAIN_OF_VALUE * Math.abs(value))) return { at, value, information };
+    for (let improved = false; !improved && damping < 1e12; ) {
+      const move = damped(information, slope, damping);
+      const next = at.map((each, index) => each + (move?.[index] ?? NaN));
+      const nextValue = move ? f(next) : NaN;
+      improved = nextValue > value;
+      if (improved) [at, value] = [next, nextValue];
+      damping = improved ? Math.max(1e-9, damping / 10) : damping * 10;
     }
   }
   return null;
 }
 
+/** What a move along this slope would gain. */
+const gainOf = (move: readonly number[], slope: readonly number[]) => move.reduce((sum, each, index) => sum + each * (slope[index] as number), 0);
+
 function differences(f: (at: readonly number[]) => number, at: readonly number[], value: number) {
   const size = at.length;
-  const h = at.map((each) => 1e-4 * Math.max(1, Math.abs(each)));
+  const h = at.map(() => STEP);
   const shifted = (first: number, by: number, second = -1, bySecond = 0) =>
     f(at.map((each, index) => each + (index === first ? by : 0) + (index === second ? bySecond : 0)));
   const slope = at.map((_, i) => (shifted(i, h[i] as number) - shifted(i, -(h[i] as number))) / (2 * (h[i] as number)));

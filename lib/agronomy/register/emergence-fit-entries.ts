@@ -7,9 +7,9 @@ export const emergenceFitEntries: readonly RegisterEntry[] = [
     version: '1',
     name: 'Smooth emergence curve',
     sentence: 'The days to 10, 50 and 90 % up and the spread, from a smooth curve fitted to what the visits saw.',
-    equation: 'maximum of Σ nᵢ log{F(tᵢ) − F(tᵢ₋₁)}, seeds not seen n log{1 − d F(tₖ)}; F log-normal, log-logistic or Weibull, the lowest AIC',
+    equation: 'maximum of Σ nᵢ log{F(tᵢ) − F(tᵢ₋₁)}, seeds not seen n log{1 − d F(tₖ)}, or where counting has not ended less N log F(tₖ); F log-normal, log-logistic or Weibull, the lowest AIC',
     source: 'Onofri, Mesgaran and Ritz 2022, Weed Science',
-    domain: 'Three intervals with new plants or more; below that the days are interpolated.',
+    domain: 'Three intervals with new plants or more; below that the days are interpolated. No curve where none is best, or one so flat that its days are not told.',
     limits: 'Plants of one row are not independent: its standard errors are too small for a row, and settings are compared by strips.',
     workedExample: {
       given: '4, 17, 10, 7, 1 and 1 plants between days 4 to 5, 5 to 6, 6 to 7, 7 to 8, 8 to 9 and 10 to 11',
