@@ -40,11 +40,14 @@ const NON_EMPTY_LEAST = 3;
  * shape and a basis. Returns location and scale of the logarithm of days, days to 10, 50 and 90 % and the spread with
  * standard errors, log-likelihood and AIC. The last visit is the latest day of any interval, so give one that found nothing
  * as 0 plants. Insufficient below three intervals with plants (interpolate then, and say so) and where the likelihood has no
- * single top, or one so flat that the standard error of the scale or of the days to 50 or 90 % is as large as they are. Throws ImpossibleInput for intervals or plants that cannot be.
+ * single top, or one so flat that the standard error of the scale or of the days to 50 or 90 % is as large as they are.
+ * Throws ImpossibleInput for intervals or plants that cannot be.
  * Method: maximum of Σ nᵢ log{F(tᵢ) − F(tᵢ₋₁)} for interval-censored data (Onofri, Mesgaran and Ritz 2022, Weed Science),
  * seeds not seen adding n log{1 − d F(tₖ)}, and N log F(tₖ) taken off on the basis of the last visit, where AIC is not to be
  * held against that of another basis; standard errors from the observed information by the delta method. Least squares
- * on cumulative counts would be the wrong likelihood. Agrees with survreg of R on type interval2.
+ * on cumulative counts would be the wrong likelihood. Agrees with survreg of R on type interval2, save where a plant lies so
+ * far in a tail that survreg stops short of the top; there it agrees with optim.
+ * The basis of the last visit is for rows that were all visited to the same day; pooled rows with last days of their own are not.
  * Plants of one row are not independent, so its standard errors are too small for a row and serve to compare fits; settings
  * are compared by strips. With a final share at 1 the rest is fitted with all seeds emerging.
  * Example: 4 17 10 7 1 1 plants in (4, 5], (5, 6], (6, 7], (7, 8], (8, 9], (10, 11]: log-normal half up on day 6.10, AIC 125.5.
@@ -58,7 +61,7 @@ export function emergenceFit(seen: readonly SeenBetween[], shape: EmergenceShape
   const emerged = seen.filter(({ plants, byDays }) => plants > 0 && byDays !== null);
   const filled = new Set(emerged.map(({ afterDays, byDays }) => `${afterDays} ${byDays}`)).size;
   if (filled < NON_EMPTY_LEAST) return insufficient('too-few-intervals', `${NON_EMPTY_LEAST} intervals with new plants, or interpolation`, `${filled}`);
-  const counted = basis === 'emerged' ? emerged : seen.filter(({ plants }) => plants > 0);
+  const counted = basis === 'emerged' || basis === 'emerged-by-last-visit' ? emerged : seen.filter(({ plants }) => plants > 0);
   const fitsShare = basis === 'seeds-with-final-share' && counted.some(({ byDays }) => byDays === null);
   const sought = { shape, fitsShare, byLastVisitDays: basis === 'emerged-by-last-visit' ? lastVisitOf(seen) : null };
   const curve = likeliestCurve(counted, sought);

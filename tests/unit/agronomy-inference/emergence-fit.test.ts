@@ -67,6 +67,12 @@ describe('a smooth curve on interval-censored counts', () => {
     within(conditional.logLikelihood, plain.logLikelihood, 1e-12);
   });
 
+  it('conditional on the last visit asks of the seeds not seen only when that visit was', () => {
+    const one = byLastVisit[0] as (typeof byLastVisit)[number];
+    const unseenSeeds = { afterDays: one.last, byDays: null, plants: 400 };
+    expect(emergenceFit([...seenOf(one), unseenSeeds], 'log-normal', 'emerged-by-last-visit')).toEqual(emergenceFit(seenOf(one), 'log-normal', 'emerged-by-last-visit'));
+  });
+
   it('conditional on a last visit says it does not settle where plants only ever came faster', () => {
     const rising = [2, 6, 20, 70].map((plants, index) => ({ afterDays: 5 + index, byDays: 6 + index, plants }));
     expect(emergenceFit(rising, 'log-normal', 'emerged-by-last-visit')).toMatchObject({ kind: 'insufficient', reason: 'fit-does-not-settle' });
