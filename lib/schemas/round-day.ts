@@ -9,7 +9,7 @@ export type RoundDay = {
   what: typeof roundDayMark;
   version: typeof roundDayVersion;
   organisation: { id: string; name: string; timeZone: string; demoToday: string | null };
-  person: { id: string; name: string; role: Role; units: UnitSystem };
+  person: { id: string; name: string; role: Role };
   /** When the server made it, as an instant. */
   readAt: string;
   farms: RoundFarm[];
@@ -21,6 +21,15 @@ export const roundDayVersion = 1;
 
 export type RoundFarm = { id: string; name: string; timeZone: string };
 export type RoundField = { id: string; farmId: string; name: string; restrictions: RoundRestriction[] };
+
+/** Who is signed in on this phone and where they belong: what the phone asks first. */
+export type RoundPerson = {
+  what: typeof roundPersonMark;
+  version: typeof roundDayVersion;
+  person: { id: string; name: string; units: UnitSystem };
+  organisations: { id: string; name: string; role: Role }[];
+};
+export const roundPersonMark = 'rowrise-round-person';
 
 /** The newest word on a spraying, corrected ones left out, with the exceptions recorded under it. */
 export type RoundRestriction = {
@@ -44,7 +53,7 @@ export type RoundPlanting = {
   seedsPerAcre: number;
   /** Whether row samples lie in the strips of a trial: then nobody counts a free place as part of it. */
   hasTrial: boolean;
-  strips: { id: string; number: number; blockNumber: number }[];
+  strips: { id: string; number: number; blockNumber: number; /** Lost at planting: nobody walks there. */ lost: boolean }[];
   transects: { id: string; stripId: string | null; readOn: string; marksRead: number; marksCovered: number; personName: string }[];
   conditions: { id: string; rowSampleId: string | null; observedOn: string; observedAt: string | null; growthStage: string | null; soilTemperature: { typed: string; unit: 'F' | 'C' } | null; soilMoisture: string | null; personName: string }[];
   notes: { id: string; rowSampleId: string | null; notedOn: string; text: string; personName: string }[];

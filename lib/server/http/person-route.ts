@@ -38,3 +38,13 @@ export function personRoute<Body extends z.ZodType>(declared: {
       return respond((await declared.service(person, parse(declared.body, await readJson(request)), callerOf(request))) ?? {});
     });
 }
+
+/** A reading route about the signed-in person themself, outside any organisation. */
+export function personReadRoute(service: (person: SignedIn) => Promise<unknown>) {
+  return () =>
+    answering(async () => {
+      const person = await currentPerson();
+      if (!person) throw new AppError('not-signed-in');
+      return respond(await service(person));
+    });
+}
