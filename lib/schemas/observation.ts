@@ -1,11 +1,9 @@
 import { z } from 'zod';
+import { leafCollarsMost, marksMost, plantsMost, tapePlacesMost } from './field-limits';
 import { calendarDaySchema, timeOfDaySchema } from './operation';
 import { countKinds, importKinds, tapeEntryKinds, tapeUnits, withdrawableKinds } from './vocabulary';
 
-export const plantsMost = 2_000;
-export const tapePlacesMost = 1_000;
-export const leafCollarsMost = 20;
-export const marksMost = 1_000;
+export { leafCollarsMost, marksMost, plantsMost, tapePlacesMost };
 export const importLinesMost = 2_000;
 export const importCharactersMost = 1_000_000;
 

@@ -1,5 +1,6 @@
 import 'server-only';
 import type { Transaction } from '@/db/connection';
+import { momentOf, resolveCounts } from '@/lib/schemas/resolve-counts';
 import { placeInches } from '@/lib/schemas/tape-place';
 import type { TapeEntryKind, TapeUnit } from '@/lib/schemas/vocabulary';
 import { listCounts } from '../../data/count';
@@ -7,10 +8,10 @@ import { listResidueReadings } from '../../data/residue-reading';
 import { listTapeSheets, type TapeSheetRow } from '../../data/tape-sheet';
 import { listWithdrawnIds } from '../../data/withdrawal';
 import { groupByRowSample } from './group-by-row-sample';
-import { momentOf, resolveCounts, type ObservedCount } from './resolve-counts';
+import type { ObservedCount } from './observed-count';
 
 export { groupByRowSample } from './group-by-row-sample';
-export type { ObservedCount } from './resolve-counts';
+export type { ObservedCount } from './observed-count';
 
 export type ObservedPlace = {
   typed: string;

@@ -1,5 +1,6 @@
 import 'server-only';
 import { AppError, badField } from '@/lib/errors/app-error';
+import { checkCounts, type CountOfRow } from '@/lib/schemas/check-counts';
 import { recordCountSchema, type RecordCountInput } from '@/lib/schemas/observation';
 import { insertCounts, listCounts } from '../../data/count';
 import { lockRowSamples } from '../../data/row-sample';
@@ -8,7 +9,6 @@ import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
 import { originColumns } from '../../operations/origin-columns';
 import { findSeenRowSample } from '../row-samples/find-seen-row-sample';
-import { checkCounts, type CountOfRow } from './check-counts';
 import { checkVisit } from './check-visit';
 import { rowSampleFacts } from './count-facts';
 import { keepVisit } from './keep-visit';

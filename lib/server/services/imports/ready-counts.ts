@@ -6,7 +6,7 @@ import { insertCounts } from '../../data/count';
 import { insertVisits } from '../../data/visit';
 import type { WriteContext } from '../../operations/context';
 import { originColumns } from '../../operations/origin-columns';
-import { checkCounts } from '../counts/check-counts';
+import { checkCounts } from '@/lib/schemas/check-counts';
 import { checkVisit } from '../counts/check-visit';
 import { rowSampleFacts } from '../counts/count-facts';
 import { groupByRowSample } from '../counts/group-by-row-sample';

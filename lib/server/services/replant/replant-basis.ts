@@ -9,7 +9,7 @@ import { replantInputsSchema, type ReplantInputs } from '@/lib/schemas/replant-s
 import { readingOf } from '../../operations/reading-columns';
 import type { ReplantSheetRow } from '../../data/replant-sheet';
 import type { CoreSamples } from '../scores/core-samples';
-import { momentOf } from '../counts/resolve-counts';
+import { momentOf } from '@/lib/schemas/resolve-counts';
 import { replantSentences } from './replant-sentences';
 import { fullYieldOf, isAfterPlanting, replantTerms } from './replant-terms';
 import { replantValue } from './replant-value';

@@ -1,4 +1,4 @@
-import type { ObservedCount } from '../counts/resolve-counts';
+import type { ObservedCount } from '../counts/observed-count';
 
 /** The markers that the standing visits of a row sample set, each once. */
 export function markersOfRow(counts: readonly ObservedCount[], rowSampleId: string): string[] {

@@ -1,7 +1,7 @@
 import type { FieldProblem, Question } from '@/lib/errors/app-error';
 import { dateText } from '@/lib/format/date-text';
 import { countText } from '@/lib/format/count-text';
-import { plantsMost } from '@/lib/schemas/observation';
+import { plantsMost } from './field-limits';
 import { momentOf, resolveCounts, sameVisit, type Countable } from './resolve-counts';
 
 export type CountOfRow = Countable & { id: string; doubtful: number };

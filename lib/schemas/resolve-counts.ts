@@ -1,14 +1,7 @@
-import type { CountRow } from '../../data/count';
+import type { CountKind } from './vocabulary';
 
-export type ObservedCount = Omit<CountRow, 'replacesId' | 'importId'> & {
-  /** All plants up so far at this visit, whichever way it was typed. */
-  plantsUp: number;
-  /** False for a second count of the same row, day and time; the first that came in is used until one is taken back. */
-  used: boolean;
-  alsoCountedBy: string | null;
-};
-
-export type Countable = Pick<CountRow, 'visitedOn' | 'visitedAt' | 'countedAs' | 'plants' | 'personId' | 'personName'>;
+/** As much of a count as its place among the others needs; the server and a phone hold the rest each in its own shape. */
+export type Countable = { visitedOn: string; visitedAt: string | null; countedAs: CountKind; plants: number; personId: string; personName: string };
 
 /** A visit without a time counts as noon, so that it stands between a morning's and an evening's. */
 export const momentOf = (each: { visitedOn: string; visitedAt: string | null }) => `${each.visitedOn}T${each.visitedAt ?? '12:00'}`;
