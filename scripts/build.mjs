@@ -58,6 +58,11 @@ export async function build(options = {}) {
     failure: 'The application could not be built.',
     ...options,
   });
-  if (result.code === 0) writeFileSync(mark, hash);
+  if (result.code === 0) {
+    // Only here: esbuild is among the modules, which a first start has installed by now.
+    const { makeRoundWorker } = await import('./round-worker.mjs');
+    await makeRoundWorker();
+    writeFileSync(mark, hash);
+  }
   return result;
 }

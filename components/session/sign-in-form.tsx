@@ -7,6 +7,7 @@ import { Button } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
 import { TextInput } from '@/components/ui/text-input';
 import type { ProblemError } from '@/lib/client/problem-error';
+import { askFirst } from '@/lib/client/round/person-flag';
 import { postJson } from '@/lib/client/request';
 import { apiPaths, paths } from '@/lib/paths/paths';
 import { sessionTexts } from '@/lib/texts/session-texts';
@@ -17,7 +18,10 @@ export function SignInForm() {
   const signIn = useMutation<unknown, ProblemError>({
     mutationFn: () => postJson(apiPaths.signIn, draft),
     // A whole new page, so that nothing of the person before stays in this tab's memory.
-    onSuccess: () => window.location.assign(paths.home),
+    onSuccess: () => {
+      askFirst();
+      window.location.assign(new URLSearchParams(window.location.search).get('to') === 'round' ? paths.round : paths.home);
+    },
   });
   return (
     <form

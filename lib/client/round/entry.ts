@@ -25,6 +25,8 @@ export type EntryAnswer = {
   fields?: { path: string; message: string }[];
   questions?: { rule: string; about: string; sentence: string }[];
   standingVersion?: number;
+  /** What stands in the place of an edit that lost: who, when, how many. */
+  standing?: Record<string, unknown>;
   result?: Record<string, unknown>;
 };
 
