@@ -26,7 +26,7 @@ export const templateName = 'rowrise_template';
 const prefix = 'rowrise-test-';
 
 // What a power cut would cost is of no interest here, and the waiting is most of the time of a small test.
-const settings = { fsync: 'off', full_page_writes: 'off', synchronous_commit: 'off', max_connections: 200 };
+const passing = { fsync: 'off', full_page_writes: 'off', synchronous_commit: 'off', max_connections: 200 };
 
 function temporaryFolder() {
   const folder =
@@ -48,8 +48,12 @@ function removeLeftovers(parent) {
   }
 }
 
-/** Starts the cluster with its roles and an empty, migrated template; answers with what is needed to use it. */
-export async function startTestCluster() {
+/**
+ * Starts the cluster with its roles and an empty, migrated template; answers with what is needed to use it. A harness that
+ * stops PostgreSQL hard asks for a lasting one: it waits for the disk, as a real one does.
+ */
+export async function startTestCluster({ lasting = false } = {}) {
+  const settings = lasting ? { max_connections: 200 } : passing;
   const parent = temporaryFolder();
   removeLeftovers(parent);
   const folder = mkdtempSync(join(parent, prefix));
@@ -60,7 +64,7 @@ export async function startTestCluster() {
   const programs = await postgresPrograms();
   const secrets = newSecrets();
   const dataFolder = join(folder, 'postgres');
-  await makeCluster({ programs, dataFolder, password: secrets.superuser, lasting: false });
+  await makeCluster({ programs, dataFolder, password: secrets.superuser, lasting });
   const logFile = join(folder, 'postgres.log');
   const port = await startPostgres({ programs, dataFolder, password: secrets.superuser, logFile, settings });
   await withClient(databaseUrls(port, secrets, 'postgres').admin, async (client) => {
@@ -69,7 +73,7 @@ export async function startTestCluster() {
   });
   const template = databaseUrls(port, secrets, templateName);
   await migrate(template.migrator, template.app);
-  return { port, secrets, folder };
+  return { port, secrets, folder, dataFolder };
 }
 
 /** What the database tests read from their environment. */

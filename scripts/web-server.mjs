@@ -20,29 +20,29 @@ async function isHealthy(address) {
   }
 }
 
-/** Starts `next start`, or `next dev`, and answers once it is healthy: its address, a promise of its end, and a way to stop it. */
+/**
+ * Starts `next start`, or `next dev`, and answers once it is healthy: its address, a promise of its end, and ways to stop
+ * it and to kill it outright. A harness may start a program of its own in the place of next.
+ */
 export async function startWebServer({
   dev = false,
   host,
   port,
   env,
   stdio = ['ignore', 'inherit', 'inherit'],
+  program = ['node_modules/next/dist/bin/next', dev ? 'dev' : 'start', '-H', host, '-p', String(port)],
 }) {
-  const child = start(
-    process.execPath,
-    ['node_modules/next/dist/bin/next', dev ? 'dev' : 'start', '-H', host, '-p', String(port)],
-    {
-      cwd: checkout,
-      stdio,
-      env: {
-        ...plainEnvironment(),
-        NODE_ENV: dev ? 'development' : 'production',
-        ...env,
-        PORT: String(port),
-        HOST: host,
-      },
+  const child = start(process.execPath, program, {
+    cwd: checkout,
+    stdio,
+    env: {
+      ...plainEnvironment(),
+      NODE_ENV: dev ? 'development' : 'production',
+      ...env,
+      PORT: String(port),
+      HOST: host,
     },
-  );
+  });
   child.on('error', () => {});
   const stop = () => end(child, { graceSeconds: 10 });
   beforeLeaving(stop);
@@ -57,5 +57,5 @@ export async function startWebServer({
       throw new Stop(`The web server did not answer at ${address}/api/health in ${healthSecondsMost} s.`);
     await pause(150);
   }
-  return { address, over: ended(child), stop };
+  return { address, over: ended(child), stop, kill: () => end(child, { signal: 'SIGKILL' }) };
 }
