@@ -4,7 +4,7 @@ import type { Plan } from './play';
 export type Control = { name: string; breaks: string; change: Partial<Plan>; caughtBy: 'lost' | 'doubled' };
 
 /** Without these keys the database no longer refuses what stands already. */
-const withoutKeys = ['receipt', 'audit_event', 'residue_reading', 'count', 'withdrawal'].map((table) => `alter table ${table} drop constraint ${table}_pk cascade`);
+export const withoutKeys = ['receipt', 'audit_event', 'residue_reading', 'count', 'withdrawal'].map((table) => `alter table ${table} drop constraint ${table}_pk cascade`);
 
 /** Each breaks one thing on purpose; the harness has to say so by the figure named, or its green means nothing. */
 export const controls: readonly Control[] = [

@@ -26,15 +26,24 @@ const columns = {
 
 export type CountRow = Awaited<ReturnType<typeof listCounts>>[number];
 
-/** All counts of a planting's standing row samples, corrected and withdrawn ones among them, as they came in. */
-export async function listCounts(tx: Transaction, params: { organisationId: string; plantingId: string }) {
+/**
+ * All counts of a planting's standing row samples, or of one of them, corrected and withdrawn ones among them, as they came
+ * in. A write asks for its own row: a season's counts of the planting would make each one dearer than the one before.
+ */
+export async function listCounts(tx: Transaction, params: { organisationId: string; plantingId: string; rowSampleId?: string }) {
   return tx
     .select(columns)
     .from(count)
     .innerJoin(visit, and(eq(visit.organisationId, count.organisationId), eq(visit.id, count.visitId)))
     .innerJoin(rowSample, and(eq(rowSample.organisationId, count.organisationId), eq(rowSample.id, count.rowSampleId), isNull(rowSample.removedAt)))
     .innerJoin(person, eq(person.id, visit.personId))
-    .where(and(eq(count.organisationId, params.organisationId), eq(rowSample.plantingId, params.plantingId)))
+    .where(
+      and(
+        eq(count.organisationId, params.organisationId),
+        eq(rowSample.plantingId, params.plantingId),
+        params.rowSampleId === undefined ? undefined : eq(count.rowSampleId, params.rowSampleId),
+      ),
+    )
     .orderBy(asc(count.createdAt), asc(count.id));
 }
 

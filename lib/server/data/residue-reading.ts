@@ -4,7 +4,7 @@ import type { Transaction } from '@/db/connection';
 import { residueReading } from '@/db/schema/residue-reading';
 import { rowSample } from '@/db/schema/row-sample';
 
-export async function listResidueReadings(tx: Transaction, params: { organisationId: string; plantingId: string }) {
+export async function listResidueReadings(tx: Transaction, params: { organisationId: string; plantingId: string; rowSampleId?: string }) {
   return tx
     .select({
       id: residueReading.id,
@@ -19,7 +19,13 @@ export async function listResidueReadings(tx: Transaction, params: { organisatio
       rowSample,
       and(eq(rowSample.organisationId, residueReading.organisationId), eq(rowSample.id, residueReading.rowSampleId), isNull(rowSample.removedAt)),
     )
-    .where(and(eq(residueReading.organisationId, params.organisationId), eq(rowSample.plantingId, params.plantingId)))
+    .where(
+      and(
+        eq(residueReading.organisationId, params.organisationId),
+        eq(rowSample.plantingId, params.plantingId),
+        params.rowSampleId === undefined ? undefined : eq(residueReading.rowSampleId, params.rowSampleId),
+      ),
+    )
     .orderBy(asc(residueReading.createdAt), asc(residueReading.id));
 }
 

@@ -58,7 +58,7 @@ function withEntered(standing: readonly ObservedCount[], entered: CountOfRow, re
 
 /** Whether this very count was taken before under another operation, as when the answer to it got lost; another content under its id is refused. */
 async function stands({ tx, actor, operation }: WriteContext, plantingId: string, body: RecordCountInput): Promise<boolean> {
-  const recorded = await listCounts(tx, { organisationId: actor.organisationId, plantingId });
+  const recorded = await listCounts(tx, { organisationId: actor.organisationId, plantingId, rowSampleId: body.rowSampleId });
   const found = recorded.find((count) => count.id === operation.thingId);
   if (!found) return false;
   const same =
@@ -72,8 +72,8 @@ async function stands({ tx, actor, operation }: WriteContext, plantingId: string
 /** A correction names a count of the same row that stands; one that somebody else corrected or took back meanwhile has lost. */
 async function assertReplaceable(context: WriteContext, plantingId: string, rowSampleId: string, replacesId: string, standing: readonly ObservedCount[]) {
   if (standing.some((count) => count.id === replacesId)) return;
-  const recorded = await listCounts(context.tx, { organisationId: context.actor.organisationId, plantingId });
-  if (recorded.some((count) => count.id === replacesId && count.rowSampleId === rowSampleId)) throw new AppError('conflict');
+  const recorded = await listCounts(context.tx, { organisationId: context.actor.organisationId, plantingId, rowSampleId });
+  if (recorded.some((count) => count.id === replacesId)) throw new AppError('conflict');
   throw badField('replacesId', 'There is no such count of this row to correct. Open the sheet again.');
 }
 
