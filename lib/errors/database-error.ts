@@ -6,8 +6,8 @@ function faultOf(error: unknown): DatabaseFault | undefined {
   for (let each: unknown = error, depth = 0; each instanceof Error && depth < 4; each = each.cause, depth += 1) {
     const { code, constraint } = each as Error & { code?: unknown; constraint?: unknown };
     if (typeof code === 'string') return { code, constraint: typeof constraint === 'string' ? constraint : undefined };
-    // The pool's own time-out carries no code.
-    if (/timeout exceeded when trying to connect|Connection terminated/.test(each.message)) return { code: '08006' };
+    // The pool's own time-out carries no code, nor does a query on a connection that has just dropped.
+    if (/timeout exceeded when trying to connect|Connection terminated|is not queryable/.test(each.message)) return { code: '08006' };
   }
   return undefined;
 }

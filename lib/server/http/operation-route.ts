@@ -8,7 +8,7 @@ import { inOrganisation } from '@/db/connection';
 import { wallClock } from '../clock';
 import { database } from '../database';
 import { findMembership } from '../data/membership';
-import { applyOperation, type HandlerOf, type Sender } from '../operations/apply-operation';
+import { applyOperation, operationIdIn, type HandlerOf, type Sender } from '../operations/apply-operation';
 import type { OperationHandler } from '../operations/define-operation';
 import { currentPerson } from '../session/current-person';
 import { parse, parseIds } from './parse';
@@ -49,12 +49,27 @@ export function batchRoute(handlerOf: HandlerOf) {
       const { organisationId, sender } = await senderOf(request, context);
       await assertMember(organisationId, sender.personId);
       const { operations } = parse(batchSchema, await readJson(request));
-      const answers: Answer[] = [];
-      for (const sent of inDeviceOrder(operations)) {
-        answers.push(await applyOperation(database(), { organisationId, sender, handlerOf }, sent));
-      }
-      return respond({ answers });
+      const apply = (sent: unknown) => applyOperation(database(), { organisationId, sender, handlerOf }, sent);
+      return respond({ answers: await answersTo(inDeviceOrder(operations), apply) });
     });
+}
+
+/**
+ * Carries a batch out one by one. After two in a row that the database did not answer, the rest is told so without waiting
+ * anew: forty waits outlast every phone, and one entry alone must not hold up those behind it. Where nothing at all was
+ * carried out, the whole request is told to come again.
+ */
+async function answersTo(operations: readonly unknown[], apply: (sent: unknown) => Promise<Answer>): Promise<Answer[]> {
+  const answers: Answer[] = [];
+  let busyInARow = 0;
+  for (const sent of operations) {
+    const last = answers.at(-1);
+    const answer: Answer = last && busyInARow >= 2 ? { ...last, operationId: operationIdIn(sent) } : await apply(sent);
+    busyInARow = answer.code === 'busy' ? busyInARow + 1 : 0;
+    answers.push(answer);
+  }
+  if (answers.every(({ code }) => code === 'busy')) throw new AppError('busy');
+  return answers;
 }
 
 /** A stranger to the organisation learns nothing from a batch, not even how its entries would have been answered. */

@@ -28,8 +28,7 @@ type Asked = { organisationId: string; sender: Sender; handlerOf: HandlerOf };
 export async function applyOperation(db: Database, asked: Asked, sent: unknown): Promise<Answer> {
   const parsed = operationSchema.safeParse(sent);
   if (!parsed.success) {
-    const operationId = sent !== null && typeof sent === 'object' && 'operationId' in sent ? String(sent.operationId).slice(0, 60) : '';
-    return refusal(operationId, new AppError('bad-input', { fields: fieldProblems(parsed.error) }));
+    return refusal(operationIdIn(sent), new AppError('bad-input', { fields: fieldProblems(parsed.error) }));
   }
   const operation = parsed.data;
   try {
@@ -44,6 +43,10 @@ export async function applyOperation(db: Database, asked: Asked, sent: unknown):
     return refusal(operation.operationId, error);
   }
 }
+
+/** The id under which whatever was sent is answered, sound or not. */
+export const operationIdIn = (sent: unknown) =>
+  sent !== null && typeof sent === 'object' && 'operationId' in sent ? String(sent.operationId).slice(0, 60) : '';
 
 function carryOut(db: Database, asked: Asked, operation: OperationEnvelope): Promise<Answer> {
   if (operation.organisationId !== asked.organisationId) throw new AppError('not-found');
