@@ -6,7 +6,8 @@ import type { Client } from 'pg';
  */
 const appended = [
   'block', 'strip', 'strip_as_planted', 'visit', 'count', 'tape_sheet', 'residue_reading', 'withdrawal', 'import_file',
-  'replant_sheet', 'decision', 'audit_event', 'audit_seal', 'losing_edit',
+  'depth_reading', 'dig', 'crust_reading', 'field_transect', 'condition', 'note', 'marker_tally', 'entry_restriction',
+  'entry_exception', 'photo', 'photo_file', 'replant_sheet', 'decision', 'audit_event', 'audit_seal', 'losing_edit',
 ];
 const changeable = [
   'organisation', 'membership', 'farm', 'farm_person', 'field', 'planting', 'planting_zone', 'setting', 'study', 'trial',
@@ -20,7 +21,8 @@ export const tablesWithoutOrganisation = ['person', 'session', 'one_time_link', 
 /** Tenant tables in an order in which their rows can be deleted, children before parents. */
 export const erasableTables = [
   'audit_seal', 'audit_event', 'receipt', 'losing_edit', 'decision', 'replant_sheet', 'withdrawal', 'import_file',
-  'residue_reading', 'tape_sheet', 'count', 'visit', 'row_sample', 'strip_as_planted', 'strip', 'block', 'trial', 'study',
+  'photo_file', 'photo', 'entry_exception', 'entry_restriction', 'marker_tally', 'note', 'condition', 'field_transect',
+  'crust_reading', 'dig', 'depth_reading', 'residue_reading', 'tape_sheet', 'count', 'visit', 'row_sample', 'strip_as_planted', 'strip', 'block', 'trial', 'study',
   'setting', 'planting_zone', 'planting', 'field', 'farm_person', 'farm', 'membership', 'organisation',
 ];
 

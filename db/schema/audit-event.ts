@@ -17,6 +17,8 @@ export const auditEvent = pgTable(
     body: jsonb('body').notNull(),
     occurred: jsonb('occurred').notNull(),
     confirmations: jsonb('confirmations').notNull(),
+    /** Who read a phone's kept file in at the office; null where the phone sent it itself. */
+    readInBy: uuid('read_in_by'),
     recordedAt: instant('recorded_at').notNull().defaultNow(),
   },
   (t) => [

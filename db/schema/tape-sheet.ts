@@ -1,6 +1,6 @@
 import { sql } from 'drizzle-orm';
 import { check, foreignKey, index, integer, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
-import { tapeUnits, type TapeUnit } from '@/lib/schemas/vocabulary';
+import { tapeReadFroms, tapeUnits, tapeZeros, type TapeReadFrom, type TapeUnit, type TapeZero } from '@/lib/schemas/vocabulary';
 import { oneOf, organisationId, origin, originChecks, thingId } from './columns';
 import { rowSample } from './row-sample';
 import { visit } from './visit';
@@ -14,6 +14,11 @@ export const tapeSheet = pgTable(
     rowSampleId: uuid('row_sample_id').notNull(),
     visitId: uuid('visit_id').notNull(),
     tapeUnit: text('tape_unit').$type<TapeUnit>().notNull(),
+    /** From which end of the row the tape was read; the places are as the tape said. */
+    readFrom: text('read_from').$type<TapeReadFrom>().notNull().default('start'),
+    zeroAt: text('zero_at').$type<TapeZero>().notNull().default('mark'),
+    /** Which places, by index, begin a stretch whose tape was laid anew after a cut; never the first. */
+    segmentStarts: integer('segment_starts').array().notNull().default([]),
     placesTyped: text('places_typed').array().notNull(),
     /** Thousandths of an inch, or of a centimetre where the tape is in centimetres. */
     placesThousandths: integer('places_thousandths').array().notNull(),
@@ -34,6 +39,12 @@ export const tapeSheet = pgTable(
     foreignKey({ name: 'tape_sheet_replaces_fk', columns: [t.organisationId, t.replacesId], foreignColumns: [t.organisationId, t.id] }),
     index('tape_sheet_row_sample_index').on(t.organisationId, t.rowSampleId),
     oneOf('tape_sheet_unit_known', t.tapeUnit, tapeUnits),
+    oneOf('tape_sheet_read_from_known', t.readFrom, tapeReadFroms),
+    oneOf('tape_sheet_zero_at_known', t.zeroAt, tapeZeros),
+    check(
+      'tape_sheet_segment_starts_range',
+      sql`1 <= all (${t.segmentStarts}) and cardinality(${t.placesThousandths}) > all (${t.segmentStarts})`,
+    ),
     check(
       'tape_sheet_arrays_match',
       sql`cardinality(${t.placesTyped}) = cardinality(${t.placesThousandths}) and cardinality(${t.markers}) = cardinality(${t.placesThousandths}) and cardinality(${t.kinds}) = cardinality(${t.placesThousandths}) and cardinality(${t.leafStageTenths}) = cardinality(${t.placesThousandths})`,

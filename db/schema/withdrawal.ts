@@ -9,7 +9,7 @@ export const withdrawal = pgTable(
     organisationId: organisationId(),
     id: thingId(),
     targetKind: text('target_kind').$type<WithdrawableKind>().notNull(),
-    /** No foreign key: the target stands in one of four tables, and the service has found it within the organisation. */
+    /** No foreign key: the target stands in one of several tables, and the service has found it within the organisation. */
     targetId: uuid('target_id').notNull(),
     reason: text('reason').notNull(),
     ...origin(),

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { labelCharactersMost } from './field-limits';
 import type { ReadingRule } from './reading';
 import { readingSchema } from './reading-schema';
 import { rowEnds } from './vocabulary';
@@ -6,10 +7,17 @@ import { rowEnds } from './vocabulary';
 export const rowLengthRule: ReadingRule = { unit: 'ft', otherUnits: ['in', 'm', 'cm'], least: 0.5, most: 1_000, name: 'row length' };
 export const rowSamplesMost = 400;
 
+export const rowSampleLabelSchema = z
+  .string()
+  .trim()
+  .min(1, 'Give the peg a label, such as S7-2.')
+  .max(labelCharactersMost, `Use at most ${labelCharactersMost} characters.`)
+  .regex(/^[\w .#/-]+$/, 'Use letters, digits and - . / # only.');
+
 export const rowSampleSchema = z.object({
   stripId: z.uuid().nullable(),
   zoneId: z.uuid().nullable(),
-  label: z.string().trim().min(1, 'Give the peg a label, such as S7-2.').max(20, 'Use at most 20 characters.').regex(/^[\w .#/-]+$/, 'Use letters, digits and - . / # only.'),
+  label: rowSampleLabelSchema,
   planterRow: z.number().int().min(1).max(99).nullable(),
   length: readingSchema(rowLengthRule),
   startEnd: z.enum(rowEnds),

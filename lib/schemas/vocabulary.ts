@@ -55,6 +55,47 @@ export type TapeEntryKind = (typeof tapeEntryKinds)[number];
 export const tapeUnits = ['in', 'ft-in', 'ft-tenths', 'cm'] as const;
 export type TapeUnit = (typeof tapeUnits)[number];
 
+/** From which end of the row the tape was read, and whether its zero lay at the mark or at the first plant. */
+export const tapeReadFroms = ['start', 'far-end'] as const;
+export type TapeReadFrom = (typeof tapeReadFroms)[number];
+
+export const tapeZeros = ['mark', 'plant'] as const;
+export type TapeZero = (typeof tapeZeros)[number];
+
+export const depthUnits = ['in', 'cm'] as const;
+export type DepthUnit = (typeof depthUnits)[number];
+
+/** What was dug up: a late plant and its on-time neighbor make a pair, or the place where a plant is missing. */
+export const digPlants = ['late', 'neighbor', 'missing'] as const;
+export type DigPlant = (typeof digPlants)[number];
+
+/** Digging destroys the sample, so it is done after counting has ended or in the same length beyond the end mark. */
+export const digPlaces = ['in-sample', 'twin-length'] as const;
+export type DigPlace = (typeof digPlaces)[number];
+
+export const digResidues = ['none', 'beside-seed', 'pinned', 'over-row'] as const;
+export type DigResidue = (typeof digResidues)[number];
+
+export const soilMoistures = ['dry', 'moist', 'wet'] as const;
+export type SoilMoisture = (typeof soilMoistures)[number];
+
+export const crustThicknesses = ['none', 'thin', 'thick'] as const;
+export type CrustThickness = (typeof crustThicknesses)[number];
+
+export const digFindings = [
+  'no-seed', 'firm-seed', 'swollen-seed', 'rotted', 'twisted-shoot', 'hollow-or-cut', 'burned-tips', 'residue-in-furrow', 'sound',
+] as const;
+export type DigFinding = (typeof digFindings)[number];
+
+export const growthStages = ['VE', 'V1', 'V2', 'V3', 'V4', 'V5', 'V6', 'V7', 'V8', 'V9', 'V10'] as const;
+export type GrowthStage = (typeof growthStages)[number];
+
+export const temperatureUnits = ['F', 'C'] as const;
+export type TemperatureUnit = (typeof temperatureUnits)[number];
+
+export const markerEvents = ['set', 'taken-up'] as const;
+export type MarkerEvent = (typeof markerEvents)[number];
+
 /** Where a record came from, so that an import can be told from what was typed, and undone. */
 export const originKinds = ['form', 'phone', 'import', 'demo'] as const;
 export type OriginKind = (typeof originKinds)[number];
@@ -62,7 +103,11 @@ export type OriginKind = (typeof originKinds)[number];
 export const importKinds = ['counts', 'tape-sheets'] as const;
 export type ImportKind = (typeof importKinds)[number];
 
-export const withdrawableKinds = ['count', 'tape-sheet', 'residue-reading', 'import'] as const;
+export const withdrawableKinds = [
+  'count', 'tape-sheet', 'residue-reading', 'import',
+  'depth-reading', 'dig', 'crust-reading', 'field-transect', 'condition', 'note', 'marker-tally', 'entry-restriction', 'entry-exception',
+  'photo',
+] as const;
 export type WithdrawableKind = (typeof withdrawableKinds)[number];
 
 export const decisionChoices = ['keep', 'replant'] as const;

@@ -36,6 +36,7 @@ const eventColumns = {
   body: auditEvent.body,
   occurred: auditEvent.occurred,
   confirmations: auditEvent.confirmations,
+  readInBy: auditEvent.readInBy,
   recordedAt: auditEvent.recordedAt,
 };
 
