@@ -9,7 +9,7 @@ import { visit } from '@/db/schema/visit';
 export type TapeSheetRow = Awaited<ReturnType<typeof listTapeSheets>>[number];
 
 /** All tape sheets of a planting's standing row samples, earlier versions among them, as they came in. */
-export async function listTapeSheets(tx: Transaction, params: { organisationId: string; plantingId: string }) {
+export async function listTapeSheets(tx: Transaction, params: { organisationId: string; plantingId: string; rowSampleId?: string }) {
   return tx
     .select({
       id: tapeSheet.id,
@@ -37,7 +37,13 @@ export async function listTapeSheets(tx: Transaction, params: { organisationId: 
       and(eq(rowSample.organisationId, tapeSheet.organisationId), eq(rowSample.id, tapeSheet.rowSampleId), isNull(rowSample.removedAt)),
     )
     .innerJoin(person, eq(person.id, visit.personId))
-    .where(and(eq(tapeSheet.organisationId, params.organisationId), eq(rowSample.plantingId, params.plantingId)))
+    .where(
+      and(
+        eq(tapeSheet.organisationId, params.organisationId),
+        eq(rowSample.plantingId, params.plantingId),
+        params.rowSampleId === undefined ? undefined : eq(tapeSheet.rowSampleId, params.rowSampleId),
+      ),
+    )
     .orderBy(asc(tapeSheet.createdAt), asc(tapeSheet.id));
 }
 

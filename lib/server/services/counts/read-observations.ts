@@ -43,8 +43,8 @@ export type ObservedResidue = { id: string; rowSampleId: string; readOn: string;
 
 export type Observations = { counts: ObservedCount[]; tapeSheets: ObservedTapeSheet[]; residueReadings: ObservedResidue[] };
 
-/** What stands of everything observed in a planting: corrections in the place of what they replaced, withdrawn ones left out. */
-export async function readObservations(tx: Transaction, params: { organisationId: string; plantingId: string }): Promise<Observations> {
+/** What stands of everything observed in a planting, or at one of its rows: corrections in the place of what they replaced, withdrawn ones left out. */
+export async function readObservations(tx: Transaction, params: { organisationId: string; plantingId: string; rowSampleId?: string }): Promise<Observations> {
   const withdrawn = await listWithdrawnIds(tx, params);
   const standing = <Row extends { id: string; importId: string | null; replacesId?: string | null }>(rows: readonly Row[]) => {
     const present = rows.filter((row) => !withdrawn.has(row.id) && !(row.importId && withdrawn.has(row.importId)));

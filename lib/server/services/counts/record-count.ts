@@ -23,8 +23,7 @@ async function service(context: WriteContext, body: RecordCountInput): Promise<W
   if (visitProblems.length > 0) throw new AppError('bad-input', { fields: visitProblems });
   await lockRowSamples(tx, { organisationId, rowSampleIds: [rowSample.id] });
   if (await stands(context, planting.id, body)) return { version: 1 };
-  const { counts } = await readObservations(tx, { organisationId, plantingId: planting.id });
-  const standing = counts.filter((count) => count.rowSampleId === rowSample.id);
+  const { counts: standing } = await readObservations(tx, { organisationId, plantingId: planting.id, rowSampleId: rowSample.id });
   if (body.replacesId !== null) await assertReplaceable(context, planting.id, rowSample.id, body.replacesId, standing);
   const entered: CountOfRow = {
     id: operation.thingId,

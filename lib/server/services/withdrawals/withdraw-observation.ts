@@ -13,8 +13,9 @@ import { readObservations } from '../counts/read-observations';
 import { findWithdrawable } from './find-withdrawable';
 
 /** Counts of new plants rest on those before them: what is left must still be able to be. */
-async function assertRestPossible(context: WriteContext, plantingId: string): Promise<void> {
-  const { counts } = await readObservations(context.tx, { organisationId: context.actor.organisationId, plantingId });
+async function assertRestPossible(context: WriteContext, plantingId: string, rowSampleIds: readonly string[]): Promise<void> {
+  const only = rowSampleIds.length === 1 ? rowSampleIds[0] : undefined;
+  const { counts } = await readObservations(context.tx, { organisationId: context.actor.organisationId, plantingId, ...(only === undefined ? {} : { rowSampleId: only }) });
   const upset = counts.find((count) => count.doubtful > count.plantsUp);
   if (upset) {
     throw new AppError('in-use', {
@@ -34,7 +35,7 @@ async function service(context: WriteContext, body: WithdrawInput): Promise<Writ
   // Taken back by two people at once, or again after a lost answer, it is taken back once.
   if ((await listWithdrawnIds(tx, { organisationId })).has(body.targetId)) return { version: 1 };
   await insertWithdrawal(tx, { id: operation.thingId, ...body, ...originColumns(context) });
-  if (plantingId !== null && rowSampleIds.length > 0) await assertRestPossible(context, plantingId);
+  if (plantingId !== null && rowSampleIds.length > 0) await assertRestPossible(context, plantingId, rowSampleIds);
   return { version: 1 };
 }
 
