@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { leafCollarsMost, marksMost, plantsMost, tapePlacesMost } from './field-limits';
 import { calendarDaySchema, timeOfDaySchema } from './operation';
-import { countKinds, importKinds, tapeEntryKinds, tapeUnits, withdrawableKinds } from './vocabulary';
+import { countKinds, importKinds, tapeEntryKinds, tapeReadFroms, tapeUnits, tapeZeros, withdrawableKinds } from './vocabulary';
 
 export { leafCollarsMost, marksMost, plantsMost, tapePlacesMost };
 export const importLinesMost = 2_000;
@@ -58,15 +58,23 @@ export const recordTapeSheetSchema = z.object({
 });
 export type RecordTapeSheetInput = z.output<typeof recordTapeSheetSchema>;
 
-const marks = (message: string, least: number) =>
+/** A sheet that says how its tape lay: from which end, what was at its zero, and where it was laid anew after a cut. */
+export const recordLaidTapeSheetSchema = recordTapeSheetSchema.extend({
+  readFrom: z.enum(tapeReadFroms),
+  zeroAt: z.enum(tapeZeros),
+  segmentStarts: z.array(z.number().int().min(1).max(tapePlacesMost)).max(tapePlacesMost),
+});
+export type RecordLaidTapeSheetInput = z.output<typeof recordLaidTapeSheetSchema>;
+
+export const marksSchema = (message: string, least: number) =>
   z.number(message).int(message).min(least, message).max(marksMost, `More than ${marksMost.toLocaleString('en-US')} marks cannot be right.`);
 
 export const recordResidueSchema = z
   .object({
     rowSampleId: z.uuid(),
     readOn: calendarDaySchema,
-    marksRead: marks('Type how many marks were read, as a whole number.', 1),
-    marksCovered: marks('Type how many marks lie on residue, as a whole number.', 0),
+    marksRead: marksSchema('Type how many marks were read, as a whole number.', 1),
+    marksCovered: marksSchema('Type how many marks lie on residue, as a whole number.', 0),
   })
   .refine((reading) => reading.marksCovered <= reading.marksRead, { path: ['marksCovered'], message: 'No more marks can lie on residue than were read.' });
 export type RecordResidueInput = z.output<typeof recordResidueSchema>;
