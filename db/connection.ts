@@ -13,6 +13,8 @@ export function connect(url: string, size = 10) {
     connectionTimeoutMillis: 5_000,
     idle_in_transaction_session_timeout: 30_000,
     statement_timeout: 30_000,
+    // A phone gives a request up after twenty seconds; whoever waits for another's lock is told before that.
+    lock_timeout: 8_000,
   });
   pool.on('error', () => undefined);
   // The pool listens while a connection is idle only. One that drops inside a transaction rejects its query, and says so

@@ -2,13 +2,15 @@
 //   npm run chaos                        20 phones × 500 entries; -- --short for 6 × 60; -- --seed <number>
 //   npm run chaos -- --control <name>    one run with one thing broken on purpose, which has to go red
 //   npm run chaos -- --controls          all of those, short; green only when each was caught
+//   npm run chaos -- --slow-and-full     pool held, two-second answers, disk full
 import { controls, isCaught, type Control } from './chaos/controls';
 import { play, tell, type Plan } from './chaos/play';
 import { ensureBuild, makeChaosCluster, type Cluster } from './chaos/prepare';
+import { slowAndFull } from './chaos/slow-and-full';
 import { Interrupted, leave, listenForSignals } from './interruption.mjs';
 import { Stop, say } from './say.mjs';
 
-const full = { phones: 20, entriesEach: 500, plantings: 5, faultSeconds: 90, convergeSeconds: 120 };
+const full = { phones: 20, entriesEach: 500, plantings: 5, faultSeconds: 180, convergeSeconds: 120 };
 const short = { phones: 6, entriesEach: 60, plantings: 2, faultSeconds: 20, convergeSeconds: 60 };
 const usual = { portalShare: 0.15, habits: {}, broken: null, breakDatabase: [] };
 
@@ -19,7 +21,7 @@ function readOptions(args: readonly string[]) {
   const control = controls.find((each) => each.name === name);
   if (args.includes('--control') && !control) throw new Stop(`The controls are ${controls.map((each) => each.name).join(', ')}.`);
   if (!Number.isSafeInteger(seed)) throw new Stop('A seed is a whole number.');
-  return { seed, control, short: args.includes('--short'), controls: args.includes('--controls') };
+  return { seed, control, short: args.includes('--short'), controls: args.includes('--controls'), slowAndFull: args.includes('--slow-and-full') };
 }
 
 async function runControl(cluster: Cluster, control: Control, seed: number): Promise<boolean> {
@@ -50,6 +52,7 @@ async function main(): Promise<boolean> {
     // A control is a run that goes red; its exit code says so.
     return !caught;
   }
+  if (options.slowAndFull) return (await slowAndFull(cluster, options.seed)).failed === 0;
   const plan: Plan = { ...usual, ...(options.short ? short : full), seed: options.seed };
   say('Playing the phones …');
   const outcome = await play(cluster, plan);

@@ -25,6 +25,26 @@ export function sendingTo(addresses: readonly string[], scene: Scene, cookie: st
       body: JSON.stringify({ from: 'field', operations }),
       hangUpAfterMs: abandon ? chance.whole(0, 400) : requestMsMost,
     });
-    return { status, contentType: headers['content-type'] ?? '', text };
+    return { status, contentType: headers['content-type'] ?? '', text, retryAfter: headers['retry-after'] ?? null };
   };
 }
+
+/** What came back over all phones: how often each status, and whether every 503 said when to come again. */
+export type Watch = { statuses: Record<string, number>; withoutRetryAfter: number; slowestMs: number };
+
+export const watched =
+  (send: Send, watch: Watch): Send =>
+  async (operations, by) => {
+    const startedAt = performance.now();
+    try {
+      const reply = await send(operations, by);
+      watch.statuses[reply.status] = (watch.statuses[reply.status] ?? 0) + 1;
+      if (reply.status === 503 && !reply.retryAfter) watch.withoutRetryAfter += 1;
+      return reply;
+    } catch (error) {
+      watch.statuses.none = (watch.statuses.none ?? 0) + 1;
+      throw error;
+    } finally {
+      watch.slowestMs = Math.max(watch.slowestMs, performance.now() - startedAt);
+    }
+  };

@@ -3,7 +3,7 @@ import type { Chance } from './chance';
 import type { Entry, Made } from './entry';
 import type { PhoneOfScout } from './make-entries';
 
-export type Reply = { status: number; contentType: string; text: string };
+export type Reply = { status: number; contentType: string; text: string; retryAfter?: string | null };
 /** Sends a batch by one of the ways; throws when nothing came back. With `abandon` the phone hangs up in flight. */
 export type Send = (operations: readonly Entry[], by: { way: number; abandon: boolean }) => Promise<Reply>;
 
@@ -15,6 +15,8 @@ export type Habits = {
   twinShare: number;
   /** Over how long the entries are made; a scout does not make a day's work at once. */
   madeWithinMs: number;
+  /** Once the faults are over nobody hangs up or doubles any more; what was sent before still comes again. */
+  calm: () => boolean;
   /** The broken phone of a control: it forgets a batch on any 2xx, whatever is in it. */
   forgetsOnAny2xx: boolean;
 };
@@ -56,7 +58,7 @@ export class Phone {
         continue;
       }
       const way = this.chance.whole(0, this.habits.ways - 1);
-      const twins = this.chance.happens(this.habits.twinShare) ? [way, (way + 1) % this.habits.ways] : [way];
+      const twins = this.chance.happens(this.habits.calm() ? 0 : this.habits.twinShare) ? [way, (way + 1) % this.habits.ways] : [way];
       const came = await Promise.all(twins.map((each) => this.sendOnce(batch, each)));
       // After silence a phone waits a little; the network or the server is away.
       if (!came.some(Boolean)) await pause(this.chance.whole(20, 200));
@@ -83,7 +85,7 @@ export class Phone {
   }
 
   private async sendOnce(batch: readonly Entry[], way: number): Promise<boolean> {
-    const abandon = this.chance.happens(this.habits.abandonShare);
+    const abandon = this.chance.happens(this.habits.calm() ? 0 : this.habits.abandonShare);
     this.tally.requests += 1;
     this.tally.sent += batch.length;
     this.tally.resent += batch.filter(({ operationId }) => !this.waiting.has(operationId)).length;

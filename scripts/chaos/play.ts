@@ -30,7 +30,7 @@ export type Plan = {
 
 export type Outcome = { ledger: Ledger; waiting: number; complaints: string[]; convergedSeconds: number; struck: Record<string, number>; tally: Tally; seconds: number; passed: boolean };
 
-const usual: Habits = { ways: 3, batchMost: 40, resentShare: 0.15, abandonShare: 0.2, twinShare: 0.1, madeWithinMs: 0, forgetsOnAny2xx: false };
+const usual: Habits = { ways: 3, batchMost: 40, resentShare: 0.15, abandonShare: 0.2, twinShare: 0.1, madeWithinMs: 0, calm: () => false, forgetsOnAny2xx: false };
 
 function interrupted(): boolean {
   try {
@@ -69,14 +69,15 @@ export async function play(cluster: Cluster, plan: Plan): Promise<Outcome> {
   const [first, second] = servers.map(({ address }) => address) as [string, string];
   const portal = await openPortal(first, plan.portalShare, chance.branch());
   try {
-    const habits: Habits = { ...usual, madeWithinMs: plan.faultSeconds * 800, ...plan.habits };
+    let faultsEnd = Number.POSITIVE_INFINITY;
+    const habits: Habits = { ...usual, madeWithinMs: plan.faultSeconds * 800, calm: () => performance.now() > faultsEnd, ...plan.habits };
     const phones: Phone[] = [];
     for (let index = 0; index < plan.phones; index += 1) {
       const scout = makeEntries(scene, index, plan.entriesEach, chance.branch());
       const cookie = plan.broken === null ? await signIn(index % 2 === 0 ? first : second, scene.scouts[index]?.email ?? '') : '';
       phones.push(new Phone(scout, sendingTo([first, second, portal.address], scene, cookie, chance.branch()), habits, chance.branch()));
     }
-    const faultsEnd = performance.now() + plan.faultSeconds * 1000;
+    faultsEnd = performance.now() + plan.faultSeconds * 1000;
     const deadline = faultsEnd + plan.convergeSeconds * 1000;
     const faultsOver = () => interrupted() || performance.now() > faultsEnd;
     const walking = phones.map(async (phone) => {
