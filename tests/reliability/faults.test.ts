@@ -2,9 +2,10 @@ import pg from 'pg';
 import { sql } from 'drizzle-orm';
 import { v7 } from 'uuid';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { connect, inOrganisation, type Database } from '@/db/connection';
+import { inOrganisation, type Database } from '@/db/connection';
 import { database } from '@/lib/server/database';
 import { firstOwner, send } from '../support/people-scene';
+import { struckAt } from '../support/struck-at';
 import { makeTestDatabase, type TestDatabase } from '../support/test-database';
 
 let own: TestDatabase;
@@ -24,31 +25,11 @@ afterAll(async () => {
   await own.drop();
 });
 
-/** A pool whose n-th query is struck: its connection drops under it, as when the database or the network goes away. */
-function struckAt(n: number): { faulty: Database; struck: () => boolean } {
-  const faulty = connect(own.appUrl, 1);
-  let queries = 0;
-  let hit = false;
-  faulty.$client.on('connect', (client) => {
-    const query = client.query.bind(client) as (...args: unknown[]) => unknown;
-    client.query = ((...args: unknown[]) => {
-      queries += 1;
-      if (queries === n) {
-        hit = true;
-        // The socket goes while the query is under way.
-        (client as unknown as { connection: { stream: { destroy: (error: Error) => void } } }).connection.stream.destroy(Object.assign(new Error('struck'), { code: 'ECONNRESET' }));
-      }
-      return query(...args);
-    }) as typeof client.query;
-  });
-  return { faulty, struck: () => hit };
-}
-
 describe('a write whose connection drops at its n-th query', () => {
   it('is stored whole or not at all, can be sent again, and leaves no open transaction', async () => {
     let n = 1;
     for (let goesOn = true; goesOn; n += 1) {
-      const { faulty, struck } = struckAt(n);
+      const { faulty, struck } = struckAt(own.appUrl, n, 'drop');
       const sent = { operationId: v7(), deviceId: v7(), deviceSequence: n };
       const thingId = v7();
       const body = { name: `Struck at ${n}`, timeZone: 'UTC' };
