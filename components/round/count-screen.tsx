@@ -35,10 +35,10 @@ export function CountScreen({ planting, field, row }: RoundPlace) {
   const [keeping, setKeeping] = useState(false);
   const lastPlantsUp = usedCounts(row).at(-1)?.plantsUp ?? 0;
   const order = walkingOrder(planting.rows);
-  const rows = planting.rows.map((each) => round.row(each));
+  const { rows } = planting;
   const marker = round.draft<{ marker: string | null }>(`marker ${planting.id} ${today}`)?.marker ?? markerOfToday(rows, today);
   const after = order.slice(order.findIndex((each) => each.id === row.id) + 1);
-  const next = after.find((each) => dueOf(round.row(each), planting, today).do !== 'nothing');
+  const next = after.find((each) => dueOf(each, planting, today).do !== 'nothing');
 
   const press = (pressed: CountPress) => {
     setAsking(undefined);
@@ -62,7 +62,7 @@ export function CountScreen({ planting, field, row }: RoundPlace) {
       const confirmations = answered.map(({ rule, about }) => ({ rule, about, answer: 'yes' as const }));
       await round.keep([countEntry(row, planting.id, count, thingId, visit, confirmations)], { clearDrafts: [draftName] });
       setAsking(undefined);
-      if (next) goTo({ ...address, at: dueOf(round.row(next), planting, today).do === 'count' ? 'count' : 'row', row: next.id }, 'replace');
+      if (next) goTo({ ...address, at: dueOf(next, planting, today).do === 'count' ? 'count' : 'row', row: next.id }, 'replace');
       else goTo({ ...address, at: 'today', planting: null, row: null }, 'replace');
     } catch {
       // What went wrong stands on the bar, and the number stays where it was.

@@ -29,7 +29,7 @@ function WaitingLine() {
       type="button"
       aria-label={`${texts.label}: ${parts.join(', ') || texts.allSent}`}
       onClick={() => goTo({ ...address, at: 'kept', planting: null, row: null })}
-      className={`min-h-press min-w-0 flex-1 cursor-pointer px-2 text-right text-15 leading-tight underline underline-offset-4 ${needsLook > 0 ? 'font-bold text-flag-text' : ''}`}
+      className={`min-h-press min-w-32 flex-1 cursor-pointer px-2 text-right text-15 leading-tight underline underline-offset-4 ${needsLook > 0 ? 'font-bold text-flag-text' : ''}`}
     >
       <span role="status">{parts.join(', ') || texts.allSent}</span>
     </button>

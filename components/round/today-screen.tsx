@@ -22,7 +22,8 @@ export function TodayScreen() {
   const plantings = round
     .plantingIds()
     .flatMap((id) => round.planting(id) ?? [])
-    .map((each) => ({ ...each, rows: walkingOrder(each.planting.rows).map((row): WalkedRow => ({ row: round.row(row), due: dueOf(round.row(row), each.planting, today) })) }))
+    .map((each) => ({ ...each, merged: round.whole(each.planting) }))
+    .map((each) => ({ ...each, rows: walkingOrder(each.planting.rows).map((row): WalkedRow => ({ row: round.row(row), due: dueOf(round.row(row), each.merged, today) })) }))
     .sort((a, b) => dueCount(b.rows) - dueCount(a.rows));
   const due = plantings.reduce((sum, each) => sum + dueCount(each.rows), 0);
   const organisation = round.day?.organisation;
@@ -70,7 +71,7 @@ function PlantingRows({ planting, field, rows, today, farmName }: { planting: Ro
     <section className="border-t-2 border-ink pt-3">
       <h2 className="text-21">{field.name}</h2>
       <p className="text-15">
-        {[farmName, todayTexts.dayOf(dayNumber(planting.plantedOn, today)), rows.length > 0 ? todayTexts.done(seen, rows.length) : null].filter(Boolean).join(' · ')}
+        {[farmName, todayTexts.dayOf(dayNumber(planting.plantedOn, today)), rows.length > 0 ? todayTexts.done(seen, rows.length) : null].filter(Boolean).join(', ')}
       </p>
       {next ? (
         <div className="mt-3">
@@ -79,20 +80,13 @@ function PlantingRows({ planting, field, rows, today, farmName }: { planting: Ro
           </Button>
         </div>
       ) : null}
-      <ul className="mt-2">
-        {rows.map((walked) => (
-          <li key={walked.row.id} className="border-b border-rule">
-            <button type="button" onClick={() => open(walked)} className="flex min-h-press w-full cursor-pointer items-center gap-3 py-2 text-left">
-              <span className={`w-16 shrink-0 text-18 ${isDue(walked) ? 'font-bold' : ''}`}>{walked.row.label}</span>
-              <span className="min-w-0 grow text-15 leading-snug">
-                <span className={`block ${isDue(walked) ? 'font-bold' : ''}`}>{todayTexts.due[walked.due.do === 'nothing' || walked.due.do === 'count' ? walked.due.why : walked.due.do]}</span>
-                <span className="block">{whereText(walked.row)}</span>
-              </span>
-              <LastSeen row={walked.row} planting={planting} />
-            </button>
-          </li>
-        ))}
-      </ul>
+      <RowList rows={rows.filter(isDue)} planting={planting} onOpen={open} />
+      {rows.every(isDue) ? null : (
+        <details className="mt-1">
+          <summary className="flex min-h-press cursor-pointer items-center text-15 font-bold underline underline-offset-4">{todayTexts.notDue(rows.filter((each) => !isDue(each)).length)}</summary>
+          <RowList rows={rows.filter((each) => !isDue(each))} planting={planting} onOpen={open} />
+        </details>
+      )}
       <details className="mt-1">
         <summary className="flex min-h-press cursor-pointer items-center text-15 font-bold underline underline-offset-4">{todayTexts.more}</summary>
         <div className="grid grid-cols-2 gap-2 pb-2">
@@ -105,6 +99,25 @@ function PlantingRows({ planting, field, rows, today, farmName }: { planting: Ro
         </div>
       </details>
     </section>
+  );
+}
+
+function RowList({ rows, planting, onOpen }: { rows: readonly WalkedRow[]; planting: RoundPlanting; onOpen: (walked: WalkedRow) => void }) {
+  return (
+    <ul className="mt-2">
+      {rows.map((walked) => (
+        <li key={walked.row.id} className="border-b border-rule">
+          <button type="button" onClick={() => onOpen(walked)} className="flex min-h-press w-full cursor-pointer items-center gap-3 py-2 text-left">
+            <span className={`w-16 shrink-0 text-18 ${isDue(walked) ? 'font-bold' : ''}`}>{walked.row.label}</span>
+            <span className="min-w-0 grow text-15 leading-snug">
+              <span className={`block ${isDue(walked) ? 'font-bold' : ''}`}>{todayTexts.due[walked.due.do === 'nothing' || walked.due.do === 'count' ? walked.due.why : walked.due.do]}</span>
+              <span className="block">{whereText(walked.row)}</span>
+            </span>
+            <LastSeen row={walked.row} planting={planting} />
+          </button>
+        </li>
+      ))}
+    </ul>
   );
 }
 

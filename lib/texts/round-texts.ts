@@ -50,7 +50,7 @@ export const todayTexts = {
   spraying: 'Record a spraying',
   addPlace: 'Count another place',
   more: 'More in this field',
-  allRows: 'All rows',
+  notDue: (rows: number) => `${countText(rows, 'row')} not due`,
   place: (strip: number) => `strip ${strip}`,
   block: (block: number) => `block ${block}`,
   planterRow: (row: number) => `planter row ${row} from the strip's edge`,

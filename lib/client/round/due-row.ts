@@ -31,8 +31,9 @@ export function newAtLast(row: RoundRow): number | undefined {
 }
 
 /**
- * What is due at a row: a count while plants may still come, then one tape sheet, then the seeding depth. A row counted
- * today waits for tomorrow; it may be opened and counted again all the same.
+ * What is due at a row: a count while plants may still come, then one tape sheet, then the seeding depth of ten plants,
+ * which one row of each strip answers for. A row counted today waits for tomorrow; it may be opened and counted again
+ * all the same.
  */
 export function dueOf(row: RoundRow, planting: RoundPlanting, today: string): Due {
   if (planting.strips.find((strip) => strip.id === row.stripId)?.lost) return { do: 'nothing', why: 'strip-lost' };
@@ -41,8 +42,17 @@ export function dueOf(row: RoundRow, planting: RoundPlanting, today: string): Du
   if (!last) return dayNumber(planting.plantedOn, today) < firstCountDay ? { do: 'nothing', why: 'too-early' } : { do: 'count', why: 'first' };
   if (hasEnded(row, planting)) {
     if (row.tapeSheets.length === 0) return { do: 'tape' };
-    return row.depths.length === 0 ? { do: 'depth' } : { do: 'nothing', why: 'done' };
+    return depthIsDue(row, planting) ? { do: 'depth' } : { do: 'nothing', why: 'done' };
   }
   if (last.visitedOn === today) return { do: 'nothing', why: 'counted-today' };
   return { do: 'count', why: counts.length > 1 && newAtLast(row) === 0 ? 'one-without-new' : 'still-coming' };
 }
+
+/** Ten plants of a strip tell its seeding depth: the first of its row samples stands for it, a free place for itself. */
+function depthIsDue(row: RoundRow, planting: RoundPlanting): boolean {
+  const strip = row.stripId === null ? [row] : planting.rows.filter((each) => each.stripId === row.stripId);
+  const first = [...strip].sort((a, b) => byLabel.compare(a.label, b.label))[0];
+  return first?.id === row.id && row.depths.length === 0 && strip.every((each) => each.id === row.id || each.depths.length === 0);
+}
+
+const byLabel = new Intl.Collator('en-US', { numeric: true });

@@ -26,6 +26,9 @@ type Doors = { fetch: typeof fetch; now: () => number; storeName?: string };
 const firstWaitMilliseconds = 5_000;
 const longestWaitMilliseconds = 300_000;
 const personFact = 'person';
+const shapeFact = 'store-shape';
+/** Rises when what stands in the store changes its meaning for an older page. */
+const storeShape = 1;
 const signOutOwedFact = 'sign-out-owed';
 const noEntries: readonly KeptEntry[] = [];
 
@@ -59,7 +62,7 @@ export class Round {
   private waitMilliseconds = firstWaitMilliseconds;
   private timer: ReturnType<typeof setTimeout> | undefined;
   private sendingPass: Promise<void> | undefined;
-  private passAskedAgain = false;
+  private nextPass: Promise<void> | undefined;
   private channel: BroadcastChannel | undefined;
 
   constructor(doors: Doors) {
@@ -82,15 +85,19 @@ export class Round {
   async open(wantedOrganisationId: string | null): Promise<void> {
     try {
       await this.store.open();
+      const shape = Number((await this.store.facts.get(shapeFact))?.value ?? storeShape);
+      // A newer version has been here: what it keeps must not be read, or written into, as if it were ours.
+      if (shape > storeShape) throw new Error('The store has a newer shape.');
+      await this.store.facts.put({ name: shapeFact, value: storeShape });
+      this.listenToOtherTabs();
+      const kept = (await this.store.facts.get(personFact))?.value as RoundPerson | undefined;
+      if (kept && !asksFirst()) await this.become(kept, wantedOrganisationId);
     } catch {
       this.phase = 'store-away';
       this.tell();
       return;
     }
-    this.listenToOtherTabs();
-    const kept = (await this.store.facts.get(personFact))?.value as RoundPerson | undefined;
-    if (kept && !asksFirst()) await this.become(kept, wantedOrganisationId);
-    else await this.askWho(wantedOrganisationId);
+    if (this.phase === 'opening') await this.askWho(wantedOrganisationId);
     if (this.phase === 'opening') this.showNobody();
     void this.wake();
   }
@@ -243,10 +250,16 @@ export class Round {
     return answer;
   }
 
+  /** A planting with every row as this phone knows it, for what looks at several rows together. */
+  whole(planting: RoundPlanting): RoundPlanting {
+    return { ...planting, rows: planting.rows.map((row) => this.row(row)) };
+  }
+
   place(plantingId: string, rowSampleId: string): RoundPlace | undefined {
     const found = this.planting(plantingId);
-    const row = found?.planting.rows.find((each) => each.id === rowSampleId);
-    return found && row && { ...found, row: this.row(row) };
+    const planting = found && this.whole(found.planting);
+    const row = planting?.rows.find((each) => each.id === rowSampleId);
+    return found && planting && row && { field: found.field, planting, row };
   }
 
   entriesOf(place: string): readonly KeptEntry[] {
@@ -381,20 +394,22 @@ export class Round {
     this.timer = setTimeout(() => void this.wake(), 1_500);
   }
 
-  /** Sends all that waits and reads the day anew; one pass at a time over all tabs. */
+  /**
+   * Sends all that waits and reads the day anew; one pass at a time over all tabs. Asked for during a pass, another one
+   * follows, because what was kept meanwhile may have missed it.
+   */
   wake(): Promise<void> {
     if (this.sendingPass) {
-      this.passAskedAgain = true;
-      return this.sendingPass;
+      this.nextPass ??= this.sendingPass.then(() => {
+        this.nextPass = undefined;
+        return this.wake();
+      });
+      return this.nextPass;
     }
     this.sendingPass = this.onlyOneTab(() => this.pass())
       .catch(() => undefined)
       .finally(() => {
         this.sendingPass = undefined;
-        if (this.passAskedAgain) {
-          this.passAskedAgain = false;
-          void this.wake();
-        }
       });
     return this.sendingPass;
   }
