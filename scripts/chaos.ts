@@ -2,8 +2,10 @@
 //   npm run chaos                        20 phones × 500 entries; -- --short for 6 × 60; -- --seed <number>
 //   npm run chaos -- --control <name>    one run with one thing broken on purpose, which has to go red
 //   npm run chaos -- --controls          all of those, short; green only when each was caught
+//   npm run chaos -- --twins             200 entries, each 50 times at once to two servers
 //   npm run chaos -- --slow-and-full     pool held, two-second answers, disk full
 import { controls, isCaught, type Control } from './chaos/controls';
+import { httpTwins } from './chaos/http-twins';
 import { play, tell, type Plan } from './chaos/play';
 import { ensureBuild, makeChaosCluster, type Cluster } from './chaos/prepare';
 import { slowAndFull } from './chaos/slow-and-full';
@@ -21,7 +23,7 @@ function readOptions(args: readonly string[]) {
   const control = controls.find((each) => each.name === name);
   if (args.includes('--control') && !control) throw new Stop(`The controls are ${controls.map((each) => each.name).join(', ')}.`);
   if (!Number.isSafeInteger(seed)) throw new Stop('A seed is a whole number.');
-  return { seed, control, short: args.includes('--short'), controls: args.includes('--controls'), slowAndFull: args.includes('--slow-and-full') };
+  return { seed, control, short: args.includes('--short'), controls: args.includes('--controls'), slowAndFull: args.includes('--slow-and-full'), twins: args.includes('--twins') };
 }
 
 async function runControl(cluster: Cluster, control: Control, seed: number): Promise<boolean> {
@@ -52,6 +54,7 @@ async function main(): Promise<boolean> {
     // A control is a run that goes red; its exit code says so.
     return !caught;
   }
+  if (options.twins) return httpTwins(cluster, options.seed);
   if (options.slowAndFull) return (await slowAndFull(cluster, options.seed)).failed === 0;
   const plan: Plan = { ...usual, ...(options.short ? short : full), seed: options.seed };
   say('Playing the phones …');
