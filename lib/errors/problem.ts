@@ -11,6 +11,7 @@ export const problemSchema = z.object({
   fields: z.array(z.object({ path: z.string(), message: z.string() })),
   questions: z.array(z.object({ rule: z.string(), about: z.string(), sentence: z.string() })),
   standingVersion: z.number().optional(),
+  standing: z.record(z.string(), z.unknown()).optional(),
 });
 export type Problem = z.infer<typeof problemSchema>;
 
@@ -23,5 +24,6 @@ export function problemOf(error: AppError): Problem {
     fields: error.fields,
     questions: error.questions,
     ...(error.standingVersion === undefined ? {} : { standingVersion: error.standingVersion }),
+    ...(error.standing === undefined ? {} : { standing: error.standing }),
   };
 }

@@ -62,7 +62,11 @@ export const operationSchema = z
 export type OperationEnvelope = z.infer<typeof operationSchema>;
 
 export const batchLimit = 500;
-export const batchSchema = z.object({ operations: z.array(z.unknown()).min(1).max(batchLimit) });
+export const batchSchema = z.object({
+  operations: z.array(z.unknown()).min(1).max(batchLimit),
+  /** Sent by a phone from its round: its clock may be wrong, so a day to come is taken and looked at later. */
+  from: z.literal('field').optional(),
+});
 
 /** How each operation of a batch was answered; the batch itself always succeeds. */
 export const answerSchema = z.object({
@@ -75,6 +79,8 @@ export const answerSchema = z.object({
   thingId: z.string().optional(),
   version: z.number().optional(),
   standingVersion: z.number().optional(),
+  /** What stands in the place of an entry that lost, as its noun writes it out. */
+  standing: z.record(z.string(), z.unknown()).optional(),
   result: z.record(z.string(), z.unknown()).optional(),
 });
 export type Answer = z.infer<typeof answerSchema>;

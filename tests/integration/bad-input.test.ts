@@ -49,6 +49,7 @@ afterAll(async () => {
 
 function writesOf(count: CountScene): Sent[] {
   const fieldId = v7();
+  const restrictionId = v7();
   const visit = () => ({ id: v7(), personId: null, visitedOn: '2026-05-18', visitedAt: '07:30', marker: 'red' });
   const planting = {
     plantedOn: '2026-05-07', plantedAt: '09:00', crop: 'corn', rowSpacing: { typed: '30' }, seedingRate: { typed: '34,000' }, tagGermination: { typed: '95' },
@@ -67,6 +68,26 @@ function writesOf(count: CountScene): Sent[] {
     { kind: 'count.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-2'), visit: visit(), countedAs: 'so-far', plants: 20, doubtful: 1, replacesId: null }) },
     { kind: 'tape-sheet.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-3'), visit: visit(), tapeUnit: 'in', places: [{ typed: '6', kind: 'plant', marker: 'red', leafStage: 2 }, { typed: '12 1/2', kind: 'late', marker: null, leafStage: null }], replacesId: null }) },
     { kind: 'residue.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-1'), readOn: '2026-05-18', marksRead: 50, marksCovered: 10 }) },
+    { kind: 'depth.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-1'), visit: visit(), unit: 'in', depths: ['1 3/4', '2'], replacesId: null }) },
+    {
+      kind: 'dig.record', thingId: v7,
+      body: () => ({
+        rowSampleId: count.row('A-1'), visit: visit(), pairId: v7(), plant: 'late', where: 'twin-length', placeTyped: '68', depth: { typed: '2', unit: 'in' }, residue: 'pinned',
+        moisture: 'dry', crust: 'thin', found: ['rotted', 'sound'], note: 'by the wheel track', replacesId: null,
+      }),
+    },
+    { kind: 'crust.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-1'), visit: visit(), sproutsSound: 6, sproutsDead: 1, crust: 'thick', replacesId: null }) },
+    { kind: 'transect.record', thingId: v7, body: () => ({ plantingId: count.plantingId, stripId: null, readOn: '2026-05-18', marksRead: 100, marksCovered: 44, replacesId: null }) },
+    {
+      kind: 'condition.record', thingId: v7,
+      body: () => ({ plantingId: count.plantingId, rowSampleId: count.row('A-1'), observedOn: '2026-05-18', observedAt: '07:30', growthStage: 'V1', soilTemperature: { typed: '52', unit: 'F' }, soilMoisture: 'dry', replacesId: null }),
+    },
+    { kind: 'note.record', thingId: v7, body: () => ({ plantingId: count.plantingId, rowSampleId: count.row('A-1'), notedOn: '2026-05-18', notedAt: '07:30', text: 'wheel track' }) },
+    { kind: 'markers.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-1'), happenedOn: '2026-05-18', event: 'set', markers: 20, replacesId: null }) },
+    { kind: 'entry-restriction.record', thingId: () => restrictionId, body: () => ({ fieldId, product: 'A burndown', endedOn: '2026-05-17', endedAt: '14:00', hours: 24, replacesId: null }) },
+    { kind: 'entry-exception.record', thingId: v7, body: () => ({ restrictionId, enteredOn: '2026-05-18', exception: 'no contact', equipment: 'gloves' }) },
+    { kind: 'spot-count.start', thingId: v7, body: () => ({ farmId: scene.farmId, field: { id: v7(), name: 'Spot' }, plantedOn: '2026-05-07', crop: 'corn', rowSpacing: { typed: '30' }, seedingRate: { typed: '34,000' }, intendedStand: { typed: '31,500' } }) },
+    { kind: 'spot-place.add', thingId: v7, body: () => ({ plantingId: count.plantingId, zoneId: null, label: `P${v7().slice(-6)}`, length: { typed: '17 ft 5 in' }, startEnd: 'mark', farEnd: 'mark' }) },
     { kind: 'observation.withdraw', thingId: v7, body: () => ({ targetKind: 'count', targetId: v7(), reason: 'typed into the wrong row' }) },
     { kind: 'import.take', thingId: v7, body: () => ({ plantingId: count.plantingId, importKind: 'counts', fileName: 'fuzz.csv', text: 'row_sample,date,so_far\nA-1,2026-05-19,20' }) },
     { kind: 'replant-sheet.save', thingId: v7, body: () => ({ plantingId: count.plantingId, zoneId: null, inputs: { typedIn: 'us', ...purdueInputs } }) },

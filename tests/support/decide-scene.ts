@@ -2,7 +2,7 @@ import { v7 } from 'uuid';
 import { sql } from 'drizzle-orm';
 import { connect, inOrganisation, type Database } from '@/db/connection';
 import type { Answer } from '@/lib/schemas/operation';
-import type { Role } from '@/lib/schemas/vocabulary';
+import type { OriginKind, Role } from '@/lib/schemas/vocabulary';
 import { withActor } from '@/lib/server/operations/actor-context';
 import { allOperations } from '@/lib/server/operations/all-operations';
 import { applyOperation } from '@/lib/server/operations/apply-operation';
@@ -80,7 +80,23 @@ export class DecideScene {
     return this;
   }
 
-  async send(
+  send(
+    who: Role | 'neighbor',
+    kind: string,
+    thingId: string,
+    body: Record<string, unknown>,
+    more: Record<string, unknown> = {},
+  ): Promise<Answer> {
+    return this.sendAs('form', who, kind, thingId, body, more);
+  }
+
+  /** As a phone sends it from its round. */
+  sendFromPhone(...sent: Parameters<DecideScene['send']>): Promise<Answer> {
+    return this.sendAs('phone', ...sent);
+  }
+
+  private async sendAs(
+    originKind: OriginKind,
     who: Role | 'neighbor',
     kind: string,
     thingId: string,
@@ -94,7 +110,7 @@ export class DecideScene {
       this.db,
       {
         organisationId,
-        sender: { personId, now: () => today, originKind: 'form' },
+        sender: { personId, now: () => today, originKind },
         handlerOf: (each, version) =>
           allOperations.find((handler) => handler.kind === each && handler.version === version),
       },

@@ -48,8 +48,9 @@ export function batchRoute(handlerOf: HandlerOf) {
     answering(async () => {
       const { organisationId, sender } = await senderOf(request, context);
       await assertMember(organisationId, sender.personId);
-      const { operations } = parse(batchSchema, await readJson(request));
-      const apply = (sent: unknown) => applyOperation(database(), { organisationId, sender, handlerOf }, sent);
+      const { operations, from } = parse(batchSchema, await readJson(request));
+      const asSent: Sender = from === 'field' ? { ...sender, originKind: 'phone' } : sender;
+      const apply = (sent: unknown) => applyOperation(database(), { organisationId, sender: asSent, handlerOf }, sent);
       return respond({ answers: await answersTo(inDeviceOrder(operations), apply) });
     });
 }
@@ -94,6 +95,7 @@ function respondRefusal(answer: Answer, code: ErrorCode): Response {
       fields: answer.fields ?? [],
       questions: answer.questions ?? [],
       ...(answer.standingVersion === undefined ? {} : { standingVersion: answer.standingVersion }),
+      standing: answer.standing,
     }),
   );
   const headers: Record<string, string> = { 'Cache-Control': 'no-store', 'Content-Type': 'application/problem+json' };

@@ -105,5 +105,6 @@ function refusal(operationId: string, error: AppError): Answer {
     fields: error.fields,
     questions: error.questions,
     ...(error.standingVersion === undefined ? {} : { standingVersion: error.standingVersion }),
+    ...(error.standing === undefined ? {} : { standing: error.standing }),
   };
 }

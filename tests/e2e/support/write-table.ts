@@ -23,6 +23,7 @@ const row = (kind: string, statuses: readonly [Statuses, Statuses, Statuses, Sta
 });
 
 const planners = [barred, everyFarm, barred, everyFarm] as const;
+const atRows = [ownFarms, everyFarm, barred, everyFarm] as const;
 const adds = [[403, '-', '-', '-'], [422, '-', '-', '-'], [403, '-', '-', '-'], [422, '-', '-', '-']] as const;
 const fresh = () => crypto.randomUUID();
 const beforePlanting = () => ({ id: fresh(), personId: null, visitedOn: '2026-01-05', visitedAt: null, marker: null });
@@ -36,6 +37,12 @@ const setting = {
   adjustedFrom: null, note: null,
 };
 const rowSample = { stripId: null, zoneId: null, label: 'T1', planterRow: null, length: { typed: '17 ft 5 in' }, startEnd: 'mark', farEnd: 'mark' };
+const dig = () => ({
+  pairId: fresh(), plant: 'late', where: 'twin-length', placeTyped: null, depth: null, residue: null, moisture: null, crust: null, found: ['sound'], note: null, replacesId: null,
+});
+const spotCount = () => ({
+  field: { id: fresh(), name: 'Sent by a test' }, plantedOn: '2099-05-07', crop: 'corn', rowSpacing: { typed: '30' }, seedingRate: { typed: '34,000' }, intendedStand: { typed: '31,500' },
+});
 const replantInputs = {
   typedIn: 'us', fullYield: null, replantOn: '2026-01-05', replantStand: null, gapLossPercent: 0, unevenLossPercent: 0, poorSecondStandChancePercent: 0,
   poorSecondStandYieldPercent: null, pricePerBushel: null, costs: [], extraDryingPerAcre: null, insurancePaymentPerAcre: null,
@@ -86,6 +93,36 @@ export const writesOfOrganisation: Record<string, readonly WriteRow[]> = {
   ],
   'POST /api/o/[org]/residue-readings': [
     row('residue.record', [ownFarms, everyFarm, barred, everyFarm], (it) => ({ thingId: fresh(), body: { rowSampleId: it.rowSample, readOn: '2020-01-05', marksRead: 50, marksCovered: 10 } })),
+  ],
+  'POST /api/o/[org]/depth-readings': [
+    row('depth.record', atRows, (it) => ({ thingId: fresh(), body: { rowSampleId: it.rowSample, visit: beforePlanting(), unit: 'in', depths: ['2'], replacesId: null } })),
+  ],
+  'POST /api/o/[org]/digs': [
+    row('dig.record', atRows, (it) => ({ thingId: fresh(), body: { ...dig(), rowSampleId: it.rowSample, visit: beforePlanting() } })),
+  ],
+  'POST /api/o/[org]/crust-readings': [
+    row('crust.record', atRows, (it) => ({ thingId: fresh(), body: { rowSampleId: it.rowSample, visit: beforePlanting(), sproutsSound: 6, sproutsDead: 1, crust: 'thick', replacesId: null } })),
+  ],
+  'POST /api/o/[org]/field-transects': [
+    row('transect.record', atRows, (it) => ({ thingId: fresh(), body: { plantingId: it.planting, stripId: null, readOn: '2020-01-05', marksRead: 100, marksCovered: 44, replacesId: null } })),
+  ],
+  'POST /api/o/[org]/conditions': [
+    row('condition.record', atRows, (it) => ({ thingId: fresh(), body: { plantingId: it.planting, rowSampleId: null, observedOn: '2020-01-05', observedAt: null, growthStage: 'V1', soilTemperature: null, soilMoisture: null, replacesId: null } })),
+  ],
+  'POST /api/o/[org]/notes': [
+    row('note.record', atRows, (it) => ({ thingId: fresh(), body: { plantingId: it.planting, rowSampleId: null, notedOn: '2020-01-05', notedAt: null, text: 'Sent by a test' } })),
+  ],
+  'POST /api/o/[org]/marker-tallies': [
+    row('markers.record', atRows, (it) => ({ thingId: fresh(), body: { rowSampleId: it.rowSample, happenedOn: '2020-01-05', event: 'set', markers: 20, replacesId: null } })),
+  ],
+  'POST /api/o/[org]/entry-restrictions': [
+    row('entry-restriction.record', atRows, (it) => ({ thingId: fresh(), body: { fieldId: it.field, product: 'Sent by a test', endedOn: '2020-01-05', endedAt: '12:00', hours: 24, replacesId: null } })),
+    // Nobody has sprayed a field of the demo, so there is none to enter early.
+    row('entry-exception.record', [[404, 404, 404, 404], [404, 404, 404, 404], barred, [404, 404, 404, 404]], () => ({ thingId: fresh(), body: { restrictionId: fresh(), enteredOn: '2026-05-18', exception: 'Sent by a test', equipment: 'Sent by a test' } })),
+  ],
+  'POST /api/o/[org]/spot-counts': [
+    row('spot-count.start', atRows, (it) => ({ thingId: fresh(), body: { ...spotCount(), farmId: it.farm } })),
+    row('spot-place.add', atRows, (it) => ({ thingId: fresh(), body: { plantingId: it.planting, zoneId: fresh(), label: 'T1', length: { typed: '17 ft 5 in' }, startEnd: 'mark', farEnd: 'mark' } })),
   ],
   'POST /api/o/[org]/withdrawals': [
     // Only what must not be found is sent whole: an own count would be taken back.

@@ -2,12 +2,13 @@ import 'server-only';
 import { AppError, badField } from '@/lib/errors/app-error';
 import { checkCounts, type CountOfRow } from '@/lib/schemas/check-counts';
 import { recordCountSchema, type RecordCountInput } from '@/lib/schemas/observation';
-import { insertCounts, listCounts } from '../../data/count';
+import { insertCounts, listCounts, type CountRow } from '../../data/count';
 import { lockRowSamples } from '../../data/row-sample';
 import { askAbout } from '../../operations/ask-about';
 import type { WriteContext, Written } from '../../operations/context';
 import { defineOperation } from '../../operations/define-operation';
 import { originColumns } from '../../operations/origin-columns';
+import { standingInstead } from '../field-records/standing-instead';
 import { findSeenRowSample } from '../row-samples/find-seen-row-sample';
 import { checkVisit } from './check-visit';
 import { rowSampleFacts } from './count-facts';
@@ -72,8 +73,16 @@ async function stands({ tx, actor, operation }: WriteContext, plantingId: string
 async function assertReplaceable(context: WriteContext, plantingId: string, rowSampleId: string, replacesId: string, standing: readonly ObservedCount[]) {
   if (standing.some((count) => count.id === replacesId)) return;
   const recorded = await listCounts(context.tx, { organisationId: context.actor.organisationId, plantingId, rowSampleId });
-  if (recorded.some((count) => count.id === replacesId)) throw new AppError('conflict');
+  if (recorded.some((count) => count.id === replacesId)) {
+    const instead = standingInstead(recorded, new Set(standing.map((count) => count.id)), replacesId);
+    throw new AppError('conflict', { standing: instead && shownCount(instead) });
+  }
   throw badField('replacesId', 'There is no such count of this row to correct. Open the sheet again.');
+}
+
+/** What a sender whose correction lost is shown of the count that stands. */
+function shownCount({ id, plants, doubtful, countedAs, personName, visitedOn, recordedAt }: CountRow): Record<string, unknown> {
+  return { id, plants, doubtful, countedAs, personName, visitedOn, recordedAt };
 }
 
 export const recordCount = defineOperation({ kind: 'count.record', version: 1, action: 'observations.write', body: recordCountSchema, service });

@@ -1,0 +1,4 @@
+import { operationRoute } from '@/lib/server/http/operation-route';
+import { spotCountsOperations } from '@/lib/server/services/spot-counts/operations';
+
+export const POST = operationRoute(spotCountsOperations);
