@@ -38,19 +38,22 @@ export class PhoneWrites {
 
   constructor(readonly scene: DecideScene) {}
 
-  async settle(rows = 400): Promise<this> {
+  async settle(rows = 2_000): Promise<this> {
     this.plantingId = await this.scene.plant({ plantedOn: '2026-05-07' });
     const found = await inOrganisation(this.scene.db, this.scene, async (tx) => (await tx.execute<{ field_id: string }>(sql`select field_id from planting where id = ${this.plantingId}`)).rows);
     this.fieldId = found[0]?.field_id ?? '';
     const samples = Array.from({ length: rows }, (_, index) => ({ id: v7(), stripId: null, zoneId: null, label: `W-${index + 1}`, planterRow: null, length: { typed: '17 ft 5 in' }, startEnd: 'mark', farEnd: 'mark' }));
-    await this.scene.must('agronomist', 'row-samples.add', this.plantingId, { plantingId: this.plantingId, samples });
+    // A planting takes at most 400 row samples at once.
+    for (let from = 0; from < rows; from += 400) {
+      await this.scene.must('agronomist', 'row-samples.add', this.plantingId, { plantingId: this.plantingId, samples: samples.slice(from, from + 400) });
+    }
     this.rowIds = samples.map(({ id }) => id);
     return this;
   }
 
   private freshRow(): string {
-    const id = this.rowIds[this.made % this.rowIds.length];
-    if (id === undefined) throw new Error('The scene has not been settled.');
+    const id = this.rowIds[this.made];
+    if (id === undefined) throw new Error('The scene has no more row samples of its own for each write.');
     return id;
   }
 
