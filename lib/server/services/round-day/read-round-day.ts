@@ -2,7 +2,7 @@ import 'server-only';
 import { Temporal } from 'temporal-polyfill';
 import { seesFarm } from '@/lib/access/can';
 import { readingIn } from '@/lib/schemas/reading';
-import { roundDayMark, roundDayVersion, type RoundDay, type RoundPlanting } from '@/lib/schemas/round-day';
+import { roundDayMark, roundDayVersion, type RoundDay, type RoundPlanting, type RoundRestriction } from '@/lib/schemas/round-day';
 import { listFarms } from '../../data/farm';
 import { listFields } from '../../data/field';
 import { listPlantings, type PlantingRow } from '../../data/planting';
@@ -12,6 +12,9 @@ import type { ReadContext } from '../../operations/context';
 import { rowSampleFacts } from '../counts/count-facts';
 import { readObservations } from '../counts/read-observations';
 import { readPlacedRows } from '../counts/row-places';
+import { readRestrictions, type FieldRestriction } from '../entry-restrictions/read-restrictions';
+import { readFieldRecords } from '../field-records/read-field-records';
+import { roundPlantingRecords, roundRowRecords } from './round-records';
 import { roundRow } from './round-row';
 
 /** A stand is counted within weeks; what was planted longer ago than this nobody walks to any more. */
@@ -30,6 +33,7 @@ export async function readRoundDay(context: ReadContext): Promise<RoundDay> {
   const plantings = (await listPlantings(tx, { organisationId })).filter(
     (planting) => fields.some((field) => field.id === planting.fieldId) && Temporal.PlainDate.from(planting.plantedOn).until(today).days <= seasonDays,
   );
+  const restrictions = (await readRestrictions(tx, { organisationId })).filter((each) => Temporal.PlainDate.from(each.endedOn).until(today).days <= seasonDays);
   const taken: RoundPlanting[] = [];
   for (const planting of plantings) taken.push(await roundPlanting(context, planting));
   return {
@@ -39,9 +43,13 @@ export async function readRoundDay(context: ReadContext): Promise<RoundDay> {
     person: { id: actor.personId, name: actor.name, role: actor.role },
     readAt: clock.now().toISOString(),
     farms: farms.map(({ id, name, timeZone }) => ({ id, name, timeZone })),
-    fields: fields.map(({ id, farmId, name }) => ({ id, farmId, name, restrictions: [] })),
+    fields: fields.map(({ id, farmId, name }) => ({ id, farmId, name, restrictions: restrictions.filter(({ fieldId }) => fieldId === id).map(roundRestriction) })),
     plantings: taken,
   };
+}
+
+function roundRestriction({ id, product, endedOn, endedAt, hours, personName, exceptions }: FieldRestriction): RoundRestriction {
+  return { id, product, endedOn, endedAt, hours, personName, exceptions };
 }
 
 async function roundPlanting(context: ReadContext, planting: PlantingRow): Promise<RoundPlanting> {
@@ -52,6 +60,7 @@ async function roundPlanting(context: ReadContext, planting: PlantingRow): Promi
   const strips = trial ? await listStrips(tx, { organisationId, trialId: trial.id }) : [];
   const placed = await readPlacedRows(context, planting.id);
   const observed = await readObservations(tx, params);
+  const records = await readFieldRecords(tx, params);
   return {
     id: planting.id,
     fieldId: planting.fieldId,
@@ -62,9 +71,7 @@ async function roundPlanting(context: ReadContext, planting: PlantingRow): Promi
     seedsPerAcre: readingIn({ unit: planting.seedingRateUnit, thousandths: planting.seedingRateThousandths }, 'per-acre'),
     hasTrial: trial !== undefined,
     strips: strips.map(({ id, number, blockNumber, asPlanted }) => ({ id, number, blockNumber, lost: asPlanted !== null && asPlanted.settingId === null })),
-    transects: [],
-    conditions: [],
-    notes: [],
-    rows: placed.map((each) => roundRow(each, rowSampleFacts(planting, each.sample), observed)),
+    ...roundPlantingRecords(records),
+    rows: placed.map((each) => ({ ...roundRow(each, rowSampleFacts(planting, each.sample), observed), ...roundRowRecords(each.sample.id, records) })),
   };
 }
