@@ -13,6 +13,9 @@ const visitDiffers = `not exists (
 const placesAs = (type: string, value: string) =>
   `(select array_agg((${value})::${type} order by p.n) from jsonb_array_elements(m.body -> 'places') with ordinality as p (it, n))`;
 
+/** What the places or depths come to, worked out by the harness and not by the server's parser. */
+const meantThousandths = `(select array_agg(p.it::int order by p.n) from jsonb_array_elements_text(m.meant -> 'thousandths') with ordinality as p (it, n))`;
+
 /** Which table an entry of a kind comes to rest in, and when its row is not what the phone entered. */
 const nouns: readonly Noun[] = [
   {
@@ -32,7 +35,29 @@ const nouns: readonly Noun[] = [
     differs: `(t.row_sample_id, t.tape_unit) is distinct from ((m.body ->> 'rowSampleId')::uuid, m.body ->> 'tapeUnit') or t.replaces_id is distinct from (m.body ->> 'replacesId')::uuid
       or t.places_typed is distinct from ${placesAs('text', `p.it ->> 'typed'`)} or t.kinds is distinct from ${placesAs('text', `p.it ->> 'kind'`)}
       or t.markers is distinct from ${placesAs('text', `coalesce(p.it ->> 'marker', '')`)} or t.leaf_stage_tenths is distinct from ${placesAs('int', `coalesce((p.it ->> 'leafStage')::numeric * 10, -1)`)}
-      or t.places_thousandths is distinct from (select array_agg(p.it::int order by p.n) from jsonb_array_elements_text(m.meant -> 'thousandths') with ordinality as p (it, n)) or ${visitDiffers}`,
+      or t.places_thousandths is distinct from ${meantThousandths} or ${visitDiffers}`,
+  },
+  {
+    kind: 'depth.record',
+    table: 'depth_reading',
+    differs: `(t.row_sample_id, t.unit) is distinct from ((m.body ->> 'rowSampleId')::uuid, m.body ->> 'unit')
+      or t.depths_typed is distinct from (select array_agg(p.it order by p.n) from jsonb_array_elements_text(m.body -> 'depths') with ordinality as p (it, n))
+      or t.depths_thousandths is distinct from ${meantThousandths} or ${visitDiffers}`,
+  },
+  {
+    kind: 'crust.record',
+    table: 'crust_reading',
+    differs: `(t.row_sample_id, t.sprouts_sound, t.sprouts_dead, t.crust) is distinct from ((m.body ->> 'rowSampleId')::uuid, (m.body ->> 'sproutsSound')::int, (m.body ->> 'sproutsDead')::int, m.body ->> 'crust') or ${visitDiffers}`,
+  },
+  {
+    kind: 'markers.record',
+    table: 'marker_tally',
+    differs: `(t.row_sample_id, t.happened_on, t.event, t.markers) is distinct from ((m.body ->> 'rowSampleId')::uuid, (m.body ->> 'happenedOn')::date, m.body ->> 'event', (m.body ->> 'markers')::int)`,
+  },
+  {
+    kind: 'note.record',
+    table: 'note',
+    differs: `(t.planting_id, t.row_sample_id, t.noted_on, t.noted_at, t.text) is distinct from ((m.body ->> 'plantingId')::uuid, (m.body ->> 'rowSampleId')::uuid, (m.body ->> 'notedOn')::date, m.body ->> 'notedAt', m.body ->> 'text')`,
   },
   {
     kind: 'observation.withdraw',
@@ -65,7 +90,7 @@ export async function countByLedger(client: pg.Client, organisationId: string, m
     await note('lost', table, `select count(*) as n from made m where m.kind = '${kind}' and not exists (select 1 from ${table} t where t.organisation_id = $1 and t.id = m.thing_id)`);
     await note('doubled', table, `select count(*) - count(distinct id) as n from ${table} where organisation_id = $1`);
     await note('invented', table, `select count(*) as n from ${table} t where t.organisation_id = $1 and not exists (select 1 from made m where m.thing_id = t.id and m.kind = '${kind}')`);
-    await note('altered', table, `select count(*) as n ${pair} and (t.operation_id <> m.operation_id or t.created_by <> m.person_id or ${differs})`);
+    await note('altered', table, `select count(*) as n ${pair} and (t.operation_id <> m.operation_id or t.created_by <> m.person_id or t.origin_kind <> 'phone' or ${differs})`);
   }
   const named = `(select distinct (body -> 'visit' ->> 'id')::uuid as id from made where body -> 'visit' is not null)`;
   await note('lost', 'visit', `select count(*) as n from ${named} m where not exists (select 1 from visit t where t.organisation_id = $1 and t.id = m.id)`);

@@ -18,8 +18,8 @@ const dayAfterPlanting = (days: number) => new Date(Date.UTC(2026, 4, 7 + days))
 const plantsUp = (day: number) => Math.max(0, Math.min(plantsMost, Math.floor((day - 4) * 1.6)));
 
 /**
- * Everything one phone enters: counts of shared rows and of its own, corrections, in-row cover, tape sheets and
- * withdrawals, with ids of the phone's making and its own sequence.
+ * Everything one phone enters: counts of shared rows and of its own, corrections, in-row cover, tape sheets, depths, crust,
+ * markers, notes and withdrawals, with ids of the phone's making and its own sequence.
  */
 export function makeEntries(scene: Scene, index: number, entries: number, chance: Chance): PhoneOfScout {
   const scout = scene.scouts[index % scene.scouts.length];
@@ -103,13 +103,43 @@ export function makeEntries(scene: Scene, index: number, entries: number, chance
     keep('tape-sheet.record', { rowSampleId, visit, tapeUnit: 'in', places, replacesId: null }, { meant: { thousandths }, on: visit.visitedOn, at: visit.visitedAt });
   };
 
+  const depth = () => {
+    const rowSampleId = chance.pick(shared);
+    const { visit } = visitAt(rowSampleId);
+    const eighths = Array.from({ length: 10 }, () => chance.whole(8, 23));
+    const depths = eighths.map((each) => (each % 8 === 0 ? String(each / 8) : chance.happens(0.5) ? `${Math.floor(each / 8)} ${each % 8}/8` : String(each / 8)));
+    keep('depth.record', { rowSampleId, visit, unit: 'in', depths, replacesId: null }, { meant: { thousandths: eighths.map((each) => each * 125) }, on: visit.visitedOn, at: visit.visitedAt });
+  };
+
+  const crust = () => {
+    const rowSampleId = chance.pick(shared);
+    const { visit } = visitAt(rowSampleId);
+    const body = { rowSampleId, visit, sproutsSound: chance.whole(0, 20), sproutsDead: chance.whole(0, 10), crust: chance.pick(['none', 'thin', 'thick']), replacesId: null };
+    keep('crust.record', body, { on: visit.visitedOn, at: visit.visitedAt });
+  };
+
+  const markers = () => {
+    const happenedOn = dayAfterPlanting(chance.whole(5, 30));
+    keep('markers.record', { rowSampleId: chance.pick(shared), happenedOn, event: chance.pick(['set', 'taken-up']), markers: chance.whole(1, 40), replacesId: null }, { on: happenedOn });
+  };
+
+  const note = () => {
+    const notedOn = dayAfterPlanting(chance.whole(5, 30));
+    const text = chance.pick(['Deer in the east end.', 'Reihe 7: Kruste, “dünn” — ½ Zoll', 'Water stood here;\ntwo rows drowned.', 'ряд 3, 雨のあと']);
+    keep('note.record', { plantingId: planting.id, rowSampleId: chance.happens(0.5) ? chance.pick(shared) : null, notedOn, notedAt: '14:05', text }, { on: notedOn, at: '14:05' });
+  };
+
   for (let n = 0; n < entries; n += 1) {
     const share = chance.next();
-    if (share < 0.55) count();
-    else if (share < 0.62) correct();
-    else if (share < 0.7) takeBack();
-    else if (share < 0.88) residue();
-    else tape();
+    if (share < 0.45) count();
+    else if (share < 0.52) correct();
+    else if (share < 0.6) takeBack();
+    else if (share < 0.74) residue();
+    else if (share < 0.84) tape();
+    else if (share < 0.89) depth();
+    else if (share < 0.93) crust();
+    else if (share < 0.97) markers();
+    else note();
   }
   return { personId: scout.personId, deviceId, made };
 }
