@@ -24,7 +24,7 @@ export function CountsSection({ data }: { data: RowSheetData }) {
       ) : null}
       <Section title={countTexts.countsSection}>
         <div className="grid items-start gap-8 lg:grid-cols-2">
-          <StandingCounts counts={counts} plantedOn={plantedOn} fallingOn={data.findings.fallingOn} mayWrite={data.mayWrite} onCorrect={correct} />
+          <StandingCounts counts={counts} plantedOn={plantedOn} fallingOn={data.findings.fallingOn} datedAheadOn={data.findings.datedAheadOn} mayWrite={data.mayWrite} onCorrect={correct} />
           {counts.length > 0 ? (
             <DayBars
               title={countTexts.chartTitle(row.label)}

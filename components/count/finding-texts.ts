@@ -5,6 +5,7 @@ export type Findings = {
   countingEnded: boolean;
   countedTwiceOn: readonly string[];
   fallingOn: readonly string[];
+  datedAheadOn: readonly string[];
   tapePlants: number | null;
   lastPlantsUp: number | null;
   tapeLessCounted: number | null;
@@ -14,10 +15,11 @@ const days = (dates: readonly string[]) => dates.map((date) => dateText(date, 'd
 
 /** What is to be looked at in a row sample, each in a few words; none where there is nothing. */
 export function findingTexts(findings: Findings): string[] {
-  const { countedTwiceOn, fallingOn, tapeLessCounted } = findings;
+  const { countedTwiceOn, fallingOn, datedAheadOn, tapeLessCounted } = findings;
   return [
     ...(countedTwiceOn.length > 0 ? [countTexts.countedTwice(days(countedTwiceOn))] : []),
     ...(fallingOn.length > 0 ? [countTexts.falls(days(fallingOn))] : []),
+    ...(datedAheadOn.length > 0 ? [countTexts.datedAheadOn(days(datedAheadOn))] : []),
     ...(tapeLessCounted !== null && tapeLessCounted < 0 ? [countTexts.tapeFewer(String(-tapeLessCounted))] : []),
     ...(tapeLessCounted !== null && tapeLessCounted > 0 ? [countTexts.tapeMore(String(tapeLessCounted))] : []),
   ];

@@ -13,12 +13,13 @@ type StandingCountsProps = {
   counts: readonly SheetCount[];
   plantedOn: string;
   fallingOn: readonly string[];
+  datedAheadOn: readonly string[];
   mayWrite: boolean;
   onCorrect: (count: SheetCount, said: string) => void;
 };
 
 /** The counts that stand, in the order of visits; each can be corrected or taken back. */
-export function StandingCounts({ counts, plantedOn, fallingOn, mayWrite, onCorrect }: StandingCountsProps) {
+export function StandingCounts({ counts, plantedOn, fallingOn, datedAheadOn, mayWrite, onCorrect }: StandingCountsProps) {
   const [open, setOpen] = useState<string>();
   if (counts.length === 0) return <p className="text-18">{countTexts.noCounts}</p>;
   return (
@@ -37,7 +38,7 @@ export function StandingCounts({ counts, plantedOn, fallingOn, mayWrite, onCorre
                 {[dateText(count.visitedOn, 'day-and-month'), countTexts.day(String(daysAfter(plantedOn, count.visitedOn))), ...(count.visitedAt ? [count.visitedAt] : [])].join(', ')}
               </p>
               <p className="text-15">{detailsOf(count).join(', ')}</p>
-              {notesOf(count, fallingOn).map((note) => (
+              {notesOf(count, fallingOn, datedAheadOn).map((note) => (
                 <p key={note} className="text-15 font-bold text-flag-text">
                   {note}
                 </p>
@@ -81,10 +82,11 @@ function detailsOf(count: SheetCount): string[] {
   ];
 }
 
-function notesOf(count: SheetCount, fallingOn: readonly string[]): string[] {
+function notesOf(count: SheetCount, fallingOn: readonly string[], datedAheadOn: readonly string[]): string[] {
   const other = count.alsoCountedBy;
   return [
     ...(other === null ? [] : [count.used ? countTexts.alsoCounted(other) : countTexts.notUsed(other)]),
     ...(count.used && fallingOn.includes(count.visitedOn) ? [countTexts.fewerThanBefore] : []),
+    ...(datedAheadOn.includes(count.visitedOn) ? [countTexts.datedAhead] : []),
   ];
 }

@@ -29,6 +29,7 @@ export const countTexts = {
   doubtfulOf: (doubtful: string) => `${doubtful} doubtful`,
   countedTwice: (dates: string) => `two counts of ${dates}`,
   falls: (dates: string) => `falls on ${dates}`,
+  datedAheadOn: (dates: string) => `${dates} dated after today: check the phone’s clock`,
   tapeFewer: (difference: string) => `tape has ${difference} fewer than counted`,
   tapeMore: (difference: string) => `tape has ${difference} more than counted`,
   block: (number: string) => `block ${number}`,
@@ -55,6 +56,7 @@ export const countTexts = {
   notUsed: (name: string) => `Not used: ${name} counted this visit first. Take that count back to use this one.`,
   alsoCounted: (name: string) => `Also counted by ${name}; this one, the first recorded, is used.`,
   fewerThanBefore: 'Fewer than at the visit before.',
+  datedAhead: 'Dated after today: check the phone’s clock.',
   disagree: (tape: string, counted: string, difference: string) =>
     `The tape sheet has ${tape}, the last count ${counted}: ${difference}. Both stay. The counts decide stand and timing; the tape sheet decides spacing and which plants were late.`,
   fewer: (plants: string) => `${plants} fewer on the tape`,

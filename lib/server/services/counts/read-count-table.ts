@@ -12,11 +12,12 @@ const shownCount = ({ id, visitedOn, visitedAt, plantsUp, doubtful, used, person
 
 /** All row samples of a planting with their counts by visit, and what is to be seen in them. */
 export async function readCountTable(context: ReadContext, plantingId: string) {
-  const { planting } = await findSeenPlanting(context, plantingId);
+  const { planting, farm } = await findSeenPlanting(context, plantingId);
   const placed = await readPlacedRows(context, plantingId);
   const observations = await readObservations(context.tx, { organisationId: context.actor.organisationId, plantingId });
   const counts = groupByRowSample(observations.counts);
   const sheets = new Map(observations.tapeSheets.filter((sheet) => sheet.used).map((sheet) => [sheet.rowSampleId, sheet]));
+  const today = context.clock.today(farm.timeZone);
   const planted = { on: planting.plantedOn, at: planting.plantedAt };
   return {
     plantedOn: planting.plantedOn,
@@ -28,7 +29,7 @@ export async function readCountTable(context: ReadContext, plantingId: string) {
       label: sample.label,
       place,
       counts: (counts.get(sample.id) ?? []).map(shownCount),
-      findings: rowFindings(planted, counts.get(sample.id) ?? [], sheets.get(sample.id)),
+      findings: rowFindings(planted, counts.get(sample.id) ?? [], sheets.get(sample.id), today),
     })),
   };
 }

@@ -24,11 +24,12 @@ export async function readRowSheet(context: ReadContext, plantingId: string, row
   const tapeSheets = ofRow(all.tapeSheets);
   const { lengthInches, seeds } = rowSampleFacts(planting, here.sample);
   const neighbor = (at: number) => (placed[at] ? { id: placed[at].sample.id, label: placed[at].sample.label } : null);
+  const today = clock.today(farm.timeZone);
   const mayWrite = can(actor, 'observations.write');
   return {
     plantingId,
     plantedOn: planting.plantedOn,
-    today: clock.today(farm.timeZone),
+    today,
     row: {
       id: rowSampleId,
       label: here.sample.label,
@@ -46,7 +47,7 @@ export async function readRowSheet(context: ReadContext, plantingId: string, row
       id, visitId, visitedOn, visitedAt, visitMarker, personId, personName, tapeUnit, used, places,
     })),
     residueReadings: ofRow(all.residueReadings).map(({ id, readOn, marksRead, marksCovered }) => ({ id, readOn, marksRead, marksCovered })),
-    findings: rowFindings({ on: planting.plantedOn, at: planting.plantedAt }, counts, tapeSheets.find((sheet) => sheet.used)),
+    findings: rowFindings({ on: planting.plantedOn, at: planting.plantedAt }, counts, tapeSheets.find((sheet) => sheet.used), today),
     people: mayWrite ? await listMemberNames(tx, { organisationId }) : [],
     me: actor.personId,
     previous: neighbor(index - 1),

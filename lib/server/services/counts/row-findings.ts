@@ -10,14 +10,16 @@ export type RowFindings = {
   countedTwiceOn: string[];
   /** The days at which fewer plants stood than at the visit before. */
   fallingOn: string[];
+  /** Days of counts that had not come yet when this was read: a phone whose clock is ahead. */
+  datedAheadOn: string[];
   tapePlants: number | null;
   lastPlantsUp: number | null;
   /** Null without both. */
   tapeLessCounted: number | null;
 };
 
-/** Takes the standing observations of one row sample, counts in the order of visits. */
-export function rowFindings(planted: FieldTime, counts: readonly ObservedCount[], tapeSheet: ObservedTapeSheet | undefined): RowFindings {
+/** Takes the standing observations of one row sample, counts in the order of visits, and the day it is there. */
+export function rowFindings(planted: FieldTime, counts: readonly ObservedCount[], tapeSheet: ObservedTapeSheet | undefined, today: string): RowFindings {
   const used = counts.filter((count) => count.used);
   const visits = used.map((count) => ({
     days: daysSincePlanting(planted, { on: count.visitedOn, at: count.visitedAt }),
@@ -29,6 +31,7 @@ export function rowFindings(planted: FieldTime, counts: readonly ObservedCount[]
     countingEnded: countingEnded(visits),
     countedTwiceOn: [...new Set(counts.filter((count) => !count.used).map((count) => count.visitedOn))],
     fallingOn: used.filter((count, index) => count.plantsUp < (used[index - 1]?.plantsUp ?? 0)).map((count) => count.visitedOn),
+    datedAheadOn: [...new Set(counts.filter((count) => count.visitedOn > today).map((count) => count.visitedOn))],
     tapePlants,
     lastPlantsUp,
     tapeLessCounted: tapePlants === null || lastPlantsUp === null ? null : tapePlants - lastPlantsUp,
