@@ -12,6 +12,7 @@ export const errorCatalogue = {
   'bad-input': { status: 422, sentence: 'Some of what was entered cannot be used. Nothing was stored; mend the named places and send again.' },
   'bad-json': { status: 400, sentence: 'The request could not be read as JSON.' },
   'not-json': { status: 415, sentence: 'Send JSON.' },
+  'not-a-picture': { status: 415, sentence: 'Send a JPEG, PNG or WebP picture.' },
   'too-large': { status: 413, sentence: 'That is more than can be taken at once.' },
   'needs-confirmation': { status: 409, sentence: 'Please look again at what is asked below.' },
   conflict: { status: 409, sentence: 'Somebody else changed this since you opened it. Your version is kept; open the page again to see theirs and settle which holds.' },

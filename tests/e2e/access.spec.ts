@@ -1,11 +1,11 @@
 import { readdirSync } from 'node:fs';
 import { expect, test } from '@playwright/test';
 import { demoId } from '@/db/demo/demo-id';
-import { insiders, pagesOfNobody, pagesOfOrganisation, readsOfOrganisation, routesOfNobody, type Insider } from './support/access-table';
+import { insiders, pagesOfNobody, pagesOfOrganisation, readsOfOrganisation, routesOfNobody, uploadRoute, type Insider } from './support/access-table';
 import { filledIn, inTurn, readable, readQuestions, signInInsiders, writeQuestions, type Question } from './support/ask';
 import { organisations, things } from './support/demo-things';
 import { discoveredPages, discoveredRoutes } from './support/discovered-routes';
-import { Visitor, type Reply } from './support/visitor';
+import { baseUrl, Visitor, type Reply } from './support/visitor';
 import { batchRoute, writesOfOrganisation } from './support/write-table';
 
 test.describe.configure({ mode: 'serial', timeout: 300_000 });
@@ -34,7 +34,7 @@ async function surprises(who: string, visitor: Visitor, list: readonly Question[
 
 test('every page and every route of the application stands in the table, and nothing else does', () => {
   expect(discoveredPages()).toEqual([...Object.keys(pagesOfOrganisation), ...Object.keys(pagesOfNobody)].sort());
-  const listed = [...Object.keys(readsOfOrganisation), ...Object.keys(routesOfNobody), ...Object.keys(writesOfOrganisation), batchRoute];
+  const listed = [...Object.keys(readsOfOrganisation), ...Object.keys(routesOfNobody), ...Object.keys(writesOfOrganisation), batchRoute, uploadRoute];
   expect(discoveredRoutes()).toEqual(listed.sort());
 });
 
@@ -105,6 +105,18 @@ test('the batch is for members only, and answers each entry for itself', async (
   }
   expect((await signedOut.post(path, { operations: [{}] })).status).toBe(401);
   expect((await outsider.post(path, { operations: [{}] })).status).toBe(404);
+});
+
+test('a photo is taken in only from a member, of a photo that was recorded, and as a picture from our own pages', async () => {
+  const photo = (org: string) => `/api/o/${org}/photos/${things.never.planting}`;
+  const put = (visitor: Visitor, org: string, headers: Record<string, string> = {}) => visitor.request(photo(org), { method: 'PUT', body: 'no picture', headers: { 'Content-Type': 'image/jpeg', Origin: baseUrl(), ...headers } });
+  const statuses = async (visitor: Visitor) => inTurn([organisations.own, organisations.another, organisations.never], async (org) => (await put(visitor, org)).status);
+  expect(await statuses(people.scout)).toEqual([409, 404, 404]);
+  expect(await statuses(people.agronomist)).toEqual([409, 404, 404]);
+  expect(await statuses(people.grower)).toEqual([403, 404, 404]);
+  expect(await statuses(signedOut)).toEqual([401, 401, 401]);
+  expect((await put(people.scout, organisations.own, { Origin: 'https://elsewhere.example' })).status).toBe(403);
+  expect((await put(people.scout, organisations.own, { 'Content-Type': 'text/html' })).status).toBe(415);
 });
 
 test('outside any organisation each page and route answers as listed', async () => {

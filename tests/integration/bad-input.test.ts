@@ -82,6 +82,7 @@ function writesOf(count: CountScene): Sent[] {
       kind: 'condition.record', thingId: v7,
       body: () => ({ plantingId: count.plantingId, rowSampleId: count.row('A-1'), observedOn: '2026-05-18', observedAt: '07:30', growthStage: 'V1', soilTemperature: { typed: '52', unit: 'F' }, soilMoisture: 'dry', replacesId: null }),
     },
+    { kind: 'photo.record', thingId: v7, body: () => ({ plantingId: count.plantingId, rowSampleId: count.row('A-1'), digId: null, takenOn: '2026-05-18', takenAt: '07:30', place: { latitude: 41.5, longitude: -93.5, accuracyMeters: 12 }, sha256: '0'.repeat(64), bytes: 1000 }) },
     { kind: 'note.record', thingId: v7, body: () => ({ plantingId: count.plantingId, rowSampleId: count.row('A-1'), notedOn: '2026-05-18', notedAt: '07:30', text: 'wheel track' }) },
     { kind: 'markers.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-1'), happenedOn: '2026-05-18', event: 'set', markers: 20, replacesId: null }) },
     { kind: 'entry-restriction.record', thingId: () => restrictionId, body: () => ({ fieldId, product: 'A burndown', endedOn: '2026-05-17', endedAt: '14:00', hours: 24, replacesId: null }) },

@@ -12,6 +12,7 @@ import { fieldsOperations } from '../services/fields/operations';
 import { importsOperations } from '../services/imports/operations';
 import { markerTalliesOperations } from '../services/marker-tallies/operations';
 import { notesOperations } from '../services/notes/operations';
+import { photosOperations } from '../services/photos/operations';
 import { peopleOperations } from '../services/people/operations';
 import { plantingsOperations } from '../services/plantings/operations';
 import { replantSheetsOperations } from '../services/replant-sheets/operations';
@@ -45,6 +46,7 @@ export const allOperations: readonly OperationHandler[] = [
   ...markerTalliesOperations,
   ...entryRestrictionsOperations,
   ...spotCountsOperations,
+  ...photosOperations,
   ...withdrawalsOperations,
   ...importsOperations,
   ...replantSheetsOperations,

@@ -48,6 +48,8 @@ export const pagesOfNobody: Record<string, { signedOut: number; signedIn: number
   '/methods': { signedOut: 200, signedIn: 200 },
   '/preferences': { signedOut: 307, signedIn: 200 },
   '/link/[secret]': { signedOut: 200, signedIn: 200 },
+  // A page without anything of anybody in it; what it shows comes out of the phone's own store.
+  '/round': { signedOut: 200, signedIn: 200 },
   '/[...missing]': { signedOut: 404, signedIn: 404 },
 };
 
@@ -57,15 +59,23 @@ const barred = [403, 403, 403, 403] as const;
 export const readsOfOrganisation: Record<string, PageRow> = {
   'GET /api/o/[org]/plantings/[planting]/scores':     of('planting', ownFarms, everyFarm, ownFarms, everyFarm),
   'GET /api/o/[org]/plantings/[planting]/comparison': of('planting', barred,   everyFarm, ownFarms, everyFarm),
+  'GET /api/o/[org]/round-day':                        org(anyoneInside,      anyoneInside, anyoneInside, anyoneInside),
+  // No photo stands in the demo: who sees one is tested where photos are made, in tests/integration/photos.test.ts.
+  'GET /api/o/[org]/photos/[photo]':                  of('planting', closed,   closed,    closed,    closed),
   'GET /api/o/[org]/plantings/[planting]/replant':    of('planting', barred,   everyFarm, ownFarms, everyFarm),
 };
 
 /** Routes outside any organisation, called with a body that none of them takes, so that nothing is done. */
 export const routesOfNobody: Record<string, { signedOut: number; signedIn: number }> = {
   'GET /api/health': { signedOut: 200, signedIn: 200 },
+  'GET /round-worker.js': { signedOut: 200, signedIn: 200 },
+  'GET /api/round': { signedOut: 401, signedIn: 200 },
   'POST /api/links/open': { signedOut: 422, signedIn: 422 },
   'POST /api/sign-in': { signedOut: 422, signedIn: 422 },
   'POST /api/sign-out': { signedOut: 422, signedIn: 422 },
   'POST /api/password': { signedOut: 401, signedIn: 422 },
   'POST /api/preferences': { signedOut: 401, signedIn: 422 },
 };
+
+/** Raw uploads: the one route that takes something other than JSON. */
+export const uploadRoute = 'PUT /api/o/[org]/photos/[photo]';

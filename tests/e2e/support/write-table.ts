@@ -109,6 +109,9 @@ export const writesOfOrganisation: Record<string, readonly WriteRow[]> = {
   'POST /api/o/[org]/conditions': [
     row('condition.record', atRows, (it) => ({ thingId: fresh(), body: { plantingId: it.planting, rowSampleId: null, observedOn: '2020-01-05', observedAt: null, growthStage: 'V1', soilTemperature: null, soilMoisture: null, replacesId: null } })),
   ],
+  'POST /api/o/[org]/photos': [
+    row('photo.record', atRows, (it) => ({ thingId: fresh(), body: { plantingId: it.planting, rowSampleId: null, digId: null, takenOn: '2020-01-05', takenAt: null, place: null, sha256: '0'.repeat(64), bytes: 1 } })),
+  ],
   'POST /api/o/[org]/notes': [
     row('note.record', atRows, (it) => ({ thingId: fresh(), body: { plantingId: it.planting, rowSampleId: null, notedOn: '2020-01-05', notedAt: null, text: 'Sent by a test' } })),
   ],
