@@ -1,4 +1,5 @@
 import Link from 'next/link';
+import type { ReactNode } from 'react';
 import { PageHead } from '@/components/shell/page-head';
 import { TapeSection } from '@/components/tape-sheet/tape-section';
 import { LinkButton } from '@/components/ui/link-button';
@@ -13,7 +14,7 @@ import { rowPlaceText } from './row-place-text';
 import type { RowSheetData } from './row-sheet-types';
 
 /** One row sample: what stands of it, and the paper sheet to type in. */
-export function RowSheet({ org, data }: { org: string; data: RowSheetData }) {
+export function RowSheet({ org, data, children }: { org: string; data: RowSheetData; children?: ReactNode }) {
   const { row, counts, plantedOn, plantingId, previous, next } = data;
   const last = counts.findLast((count) => count.used);
   const title = last
@@ -37,6 +38,7 @@ export function RowSheet({ org, data }: { org: string; data: RowSheetData }) {
       <CountsSection data={data} />
       <TapeSection data={data} />
       <CoverSection data={data} />
+      {children}
     </div>
   );
 }

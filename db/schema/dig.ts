@@ -28,7 +28,7 @@ export const dig = pgTable(
     residue: text('residue').$type<DigResidue>(),
     moisture: text('moisture').$type<SoilMoisture>(),
     crust: text('crust').$type<CrustThickness>(),
-    found: text('found').$type<DigFinding>().array().notNull(),
+    found: text('found').array().$type<DigFinding[]>().notNull(),
     note: text('note'),
     replacesId: uuid('replaces_id'),
     ...origin(),

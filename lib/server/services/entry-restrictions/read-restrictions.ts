@@ -6,7 +6,11 @@ import { listEntryRestrictions, type EntryRestrictionRow } from '../../data/entr
 import { listWithdrawnIds } from '../../data/withdrawal';
 import { standingRecords } from '../field-records/standing-records';
 
-export type FieldRestriction = RoundRestriction & { fieldId: string; timeZone: string; recordedAt: string };
+export type FieldRestriction = Omit<RoundRestriction, 'exceptions'> & {
+  fieldId: string;
+  timeZone: string;
+  exceptions: (RoundRestriction['exceptions'][number] & { personName: string })[];
+};
 
 /**
  * The newest word on each application in the fields of an organisation, with the exceptions recorded under it. One recorded
@@ -18,10 +22,12 @@ export async function readRestrictions(tx: Transaction, params: { organisationId
   const exceptions = standingRecords(await listEntryExceptions(tx, params), withdrawn);
   return standingRecords(recorded, withdrawn).map((row) => {
     const versions = versionsOf(row, recorded);
-    const { id, fieldId, product, endedOn, endedAt, timeZone, hours, personName, recordedAt } = row;
+    const { id, fieldId, product, endedOn, endedAt, timeZone, hours, personName } = row;
     return {
-      id, fieldId, product, endedOn, endedAt, timeZone, hours, personName, recordedAt,
-      exceptions: exceptions.filter((each) => versions.has(each.restrictionId)).map((each) => ({ id: each.id, personId: each.personId, enteredOn: each.enteredOn, exception: each.exception, equipment: each.equipment })),
+      id, fieldId, product, endedOn, endedAt, timeZone, hours, personName,
+      exceptions: exceptions
+        .filter((each) => versions.has(each.restrictionId))
+        .map((each) => ({ id: each.id, personId: each.personId, personName: each.personName, enteredOn: each.enteredOn, exception: each.exception, equipment: each.equipment })),
     };
   });
 }

@@ -49,7 +49,10 @@ export async function readRoundDay(context: ReadContext): Promise<RoundDay> {
 }
 
 function roundRestriction({ id, product, endedOn, endedAt, hours, personName, exceptions }: FieldRestriction): RoundRestriction {
-  return { id, product, endedOn, endedAt, hours, personName, exceptions };
+  return {
+    id, product, endedOn, endedAt, hours, personName,
+    exceptions: exceptions.map(({ id: exceptionId, personId, enteredOn, exception, equipment }) => ({ id: exceptionId, personId, enteredOn, exception, equipment })),
+  };
 }
 
 async function roundPlanting(context: ReadContext, planting: PlantingRow): Promise<RoundPlanting> {

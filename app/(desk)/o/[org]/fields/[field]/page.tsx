@@ -2,6 +2,7 @@ import Link from 'next/link';
 import { notFound } from 'next/navigation';
 import { z } from 'zod';
 import { FieldActions } from '@/components/field/field-actions';
+import { RestrictionsSection } from '@/components/entry-restriction/restrictions-section';
 import { AddPlanting } from '@/components/planting/add-planting';
 import { plantingLine } from '@/components/planting/planting-line';
 import { PageHead } from '@/components/shell/page-head';
@@ -11,14 +12,18 @@ import { can } from '@/lib/access/can';
 import { readingText } from '@/lib/format/reading-text';
 import { paths } from '@/lib/paths/paths';
 import { readPage } from '@/lib/server/http/read-page';
+import { readFieldRestrictions } from '@/lib/server/services/entry-restrictions/read-field-restrictions';
 import { readField } from '@/lib/server/services/fields/read-field';
 import { fieldTexts } from '@/lib/texts/field-texts';
 
 export default async function FieldPage({ params }: { params: Promise<{ org: string; field: string }> }) {
   const { org, field: fieldId } = await params;
   if (!z.uuid().safeParse(fieldId).success) notFound();
-  const { actor, data } = await readPage(org, 'farms.read', (context) => readField(context, fieldId));
-  const { farm, field, plantings } = data;
+  const { actor, data } = await readPage(org, 'farms.read', async (context) => ({
+    ...(await readField(context, fieldId)),
+    entry: await readFieldRestrictions(context, fieldId),
+  }));
+  const { farm, field, plantings, entry } = data;
   return (
     <>
       <PageHead
@@ -39,6 +44,7 @@ export default async function FieldPage({ params }: { params: Promise<{ org: str
           ))}
         </ul>
       </Section>
+      <RestrictionsSection fieldId={field.id} {...entry} />
       {can(actor, 'plantings.write') ? (
         <Section title={fieldTexts.addPlanting}>
           <AddPlanting fieldId={field.id} />
