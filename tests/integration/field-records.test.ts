@@ -1,9 +1,15 @@
 import { v7 } from 'uuid';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { readCountTable } from '@/lib/server/services/counts/read-count-table';
+import { readRowSheet } from '@/lib/server/services/counts/read-row-sheet';
+import { readFieldRestrictions } from '@/lib/server/services/entry-restrictions/read-field-restrictions';
+import { readPlantingRecords } from '@/lib/server/services/field-records/read-planting-records';
+import { readRowRecords } from '@/lib/server/services/field-records/read-row-records';
 import { CountScene, yesTo } from '../support/count-scene';
 import { makeDecideScenes, type DecideScene } from '../support/decide-scene';
 import { fieldKinds, sprayed, sprayedField, standingOf, visit, type FieldKind } from '../support/field-scene';
 import { PlanScene } from '../support/plan-scene';
+import { readAs } from '../support/trial-scene';
 
 let scene: DecideScene;
 let other: DecideScene;
@@ -156,6 +162,49 @@ describe('what a phone sends', () => {
     // Corrected once more by way of the one in between.
     await counted.mustCount('A-1', { on: '2026-05-18', plants: 23, replacesId: String(answer.standing?.id) });
     expect(await counted.count('A-1', { on: '2026-05-18', plants: 22, replacesId: first })).toMatchObject({ outcome: 'conflict', standing: { plants: 23 } });
+  });
+});
+
+describe('the desk', () => {
+  it('marks a count dated after today on the table and the sheet, and no other', async () => {
+    await settled();
+    await counted.mustCount('A-1', { on: '2026-05-19', plants: 20 });
+    const ahead = { rowSampleId: counted.row('A-1'), visit: visit({ visitedOn: '2026-05-29' }), countedAs: 'new', plants: 1, doubtful: 0, replacesId: null };
+    expect(await scene.sendFromPhone('scout', 'count.record', v7(), ahead)).toMatchObject({ outcome: 'applied' });
+    const table = await readAs(scene, 'agronomist', (context) => readCountTable(context, counted.plantingId));
+    expect(table.rows.map(({ label, findings }) => [label, findings.datedAheadOn])).toEqual([['A-1', ['2026-05-29']], ['A-2', []]]);
+    const sheet = await readAs(scene, 'agronomist', (context) => readRowSheet(context, counted.plantingId, counted.row('A-1')));
+    expect(sheet.findings.datedAheadOn).toEqual(['2026-05-29']);
+  });
+
+  it('shows the mean and range of depths, pairs of digs with the late plant first, and markers that are still out', async () => {
+    await settled();
+    const send = (kind: string, more: Record<string, unknown>) => scene.must('scout', kind, v7(), { ...fieldKinds.find((each) => each.kind === kind)?.body(counted), ...more });
+    await send('depth.record', { depths: ['1 1/2', '2', '2 1/2'] });
+    const pairId = v7();
+    for (const plant of ['neighbor', 'late']) await send('dig.record', { pairId, plant });
+    await send('markers.record', { event: 'set', markers: 24 });
+    await send('markers.record', { event: 'taken-up', markers: 21 });
+    const records = await readAs(scene, 'scout', (context) => readRowRecords(context, counted.plantingId, counted.row('A-1')));
+    expect(records.depths).toMatchObject([{ plants: 3, mean: 2, shallowest: 1.5, deepest: 2.5, unit: 'in' }]);
+    expect(records.digPairs.map(({ digs }) => digs.map(({ plant }) => plant))).toEqual([['late', 'neighbor']]);
+    expect(records.markers).toMatchObject({ set: 24, takenUp: 21, left: 3 });
+    const whole = await readAs(scene, 'scout', (context) => readPlantingRecords(context, counted.plantingId));
+    expect(whole.markersOut).toEqual([{ id: counted.row('A-1'), label: 'A-1', left: 3 }]);
+    expect(await readAs(scene, 'scout', (context) => readRowRecords(context, counted.plantingId, counted.row('A-2')))).toMatchObject({ depths: [], digPairs: [], markers: { left: 0 } });
+  });
+
+  // Today is 20 May, 10:00 in Chicago.
+  it.each([
+    ['17:00 the day before for 17 hours', { endedOn: '2026-05-19', endedAt: '17:00', hours: 17 }, { untilOn: '2026-05-20', untilAt: '10:00', isOver: true }],
+    ['17:00 the day before for 17 hours and a half', { endedOn: '2026-05-19', endedAt: '17:00', hours: 17.5 }, { untilOn: '2026-05-20', untilAt: '10:30', isOver: false }],
+    // The clocks went forward on 8 March 2026: an interval is hours, not clock time.
+    ['the night the clocks go forward', { endedOn: '2026-03-07', endedAt: '20:00', hours: 24 }, { untilOn: '2026-03-08', untilAt: '21:00', isOver: true }],
+  ])('says until when a field is closed after %s', async (_, interval, until) => {
+    await settled();
+    await scene.must('scout', 'entry-restriction.record', v7(), { fieldId: sprayed(counted), product: 'A burndown', replacesId: null, ...interval });
+    const read = await readAs(scene, 'grower', (context) => readFieldRestrictions(context, sprayed(counted)));
+    expect(read).toMatchObject({ mayWrite: false, restrictions: [{ product: 'A burndown', ...until }] });
   });
 });
 
