@@ -5,7 +5,6 @@ import { v7 } from 'uuid';
 import { afterPress, emptyCount, type CountDraft, type CountPress } from '@/lib/client/round/count-draft';
 import { checkCountOfRow, countEntry, countOfDraft, noneNew, type CountToKeep } from '@/lib/client/round/count-visit';
 import { dueOf, usedCounts } from '@/lib/client/round/due-row';
-import { markerOfToday } from '@/lib/client/round/markers';
 import type { RoundPlace } from '@/lib/client/round/round';
 import { goTo, useAddress } from '@/lib/client/round/round-place';
 import { useRound } from '@/lib/client/round/use-round';
@@ -36,7 +35,7 @@ export function CountScreen({ planting, field, row }: RoundPlace) {
   const lastPlantsUp = usedCounts(row).at(-1)?.plantsUp ?? 0;
   const order = walkingOrder(planting.rows);
   const { rows } = planting;
-  const marker = round.draft<{ marker: string | null }>(`marker ${planting.id} ${today}`)?.marker ?? markerOfToday(rows, today);
+  const marker = round.markerOf(planting);
   const after = order.slice(order.findIndex((each) => each.id === row.id) + 1);
   const next = after.find((each) => dueOf(each, planting, today).do !== 'nothing');
 

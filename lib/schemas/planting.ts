@@ -3,13 +3,12 @@ import { nameSchema } from './farm';
 import { fieldAreaRule } from './field';
 import { calendarDaySchema, timeOfDaySchema } from './operation';
 import type { ReadingRule } from './reading';
+import { intendedStandRule, rowSpacingRule, seedingRateRule } from './reading-rules';
 import { readingSchema } from './reading-schema';
 import { crops, tillages } from './vocabulary';
 
-export const rowSpacingRule: ReadingRule = { unit: 'in', otherUnits: ['cm', 'm', 'ft'], least: 4, most: 80, name: 'row spacing' };
-export const seedingRateRule: ReadingRule = { unit: 'per-acre', otherUnits: ['per-ha'], least: 1_000, most: 500_000, thousandsComma: true, name: 'seeding rate' };
+export { intendedStandRule, rowSpacingRule, seedingRateRule };
 export const tagGerminationRule: ReadingRule = { unit: 'percent', least: 1, most: 100, name: 'tag germination' };
-export const intendedStandRule: ReadingRule = { unit: 'per-acre', otherUnits: ['per-ha'], least: 1_000, most: 500_000, thousandsComma: true, name: 'intended final stand' };
 export const fullYieldRule: ReadingRule = { unit: 'bu/ac', otherUnits: ['t/ha'], least: 1, most: 700, name: 'yield at full stand and best date' };
 
 /** A planting date outside these years is a slip of the finger. */

@@ -1,10 +1,10 @@
 import { z } from 'zod';
 import { labelCharactersMost } from './field-limits';
-import type { ReadingRule } from './reading';
+import { rowLengthRule } from './reading-rules';
 import { readingSchema } from './reading-schema';
 import { rowEnds } from './vocabulary';
 
-export const rowLengthRule: ReadingRule = { unit: 'ft', otherUnits: ['in', 'm', 'cm'], least: 0.5, most: 1_000, name: 'row length' };
+export { rowLengthRule };
 export const rowSamplesMost = 400;
 
 export const rowSampleLabelSchema = z

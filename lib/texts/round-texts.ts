@@ -129,3 +129,9 @@ export const roundCountTexts = {
   locked: 'Locked against wet glass',
   unlock: 'Hold here to unlock',
 } as const;
+
+/** The words of the field forms. */
+export const screenTexts = {
+  keep: 'Keep',
+  treatedSeed: 'Treated seed is not to be touched with bare hands. Wear gloves; the seed tag decides.',
+} as const;

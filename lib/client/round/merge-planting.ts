@@ -1,4 +1,4 @@
-import type { RoundDay, RoundPlanting, RoundRow } from '@/lib/schemas/round-day';
+import type { RoundDay, RoundField, RoundPlanting, RoundRow } from '@/lib/schemas/round-day';
 import { rowAreaAcres } from '@/lib/agronomy/stand';
 import { parseReading, readingIn, type Reading } from '@/lib/schemas/reading';
 import type { ReadingUnit } from '@/lib/schemas/vocabulary';
@@ -76,4 +76,11 @@ function placeBegunHere(entry: KeptEntry, planting: RoundPlanting): RoundRow {
     crusts: [],
     markers: [],
   };
+}
+
+/** The field of a spot count that was begun on this phone, until a day holds it. */
+export function fieldBegunHere(fieldId: string, entries: readonly KeptEntry[]): RoundField {
+  const start = entries.find((entry) => entry.kind === 'spot-count.start');
+  const body = start?.body as { farmId: string; field: { name: string | null } } | undefined;
+  return { id: fieldId, farmId: body?.farmId ?? '', name: body?.field.name ?? '', restrictions: [] };
 }

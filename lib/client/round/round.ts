@@ -5,9 +5,12 @@ import { askDay, askPerson, type Asked } from './ask-server';
 import type { KeptEntry, NewEntry } from './entry';
 import { wallTimeAt } from './field-time';
 import { keepEntries } from './keep-entry';
-import { mergePlanting } from './merge-planting';
+import { markerOfToday } from './markers';
+import { mergeField } from './merge-field';
+import { fieldBegunHere, mergePlanting } from './merge-planting';
 import { mergeRow } from './merge-row';
 import { asksFirst, personConfirmed } from './person-flag';
+import { restrictedUntil } from './restricted-until';
 import { dayKey, draftKey, RoundStore, type KeptPhoto } from './round-store';
 import { sendEntries, type SendOutcome } from './send-entries';
 import { sendPhotos } from './send-photos';
@@ -230,8 +233,9 @@ export class Round {
   planting(plantingId: string): { planting: RoundPlanting; field: RoundField } | undefined {
     const own = this.byPlace.get(plantingId) ?? noEntries;
     const planting = mergePlanting(this.day, plantingId, own, this.me?.name ?? '');
-    const field = planting && this.day?.fields.find((each) => each.id === planting.fieldId);
-    return planting && { planting, field: field ?? { id: planting.fieldId, farmId: '', name: '', restrictions: [] } };
+    if (!planting || !this.me) return undefined;
+    const field = this.day?.fields.find((each) => each.id === planting.fieldId) ?? fieldBegunHere(planting.fieldId, own);
+    return { planting, field: mergeField(field, this.byPlace.get(field.id) ?? noEntries, this.me) };
   }
 
   /** Every planting, those begun on this phone among them. */
@@ -260,6 +264,11 @@ export class Round {
     const planting = found && this.whole(found.planting);
     const row = planting?.rows.find((each) => each.id === rowSampleId);
     return found && planting && row && { field: found.field, planting, row };
+  }
+
+  /** Whether an application keeps this person out of a field at this moment. */
+  isClosed(field: RoundField): boolean {
+    return this.me !== null && restrictedUntil(field, this.now(), this.me.id) !== undefined;
   }
 
   entriesOf(place: string): readonly KeptEntry[] {
@@ -298,6 +307,13 @@ export class Round {
 
   visit(row: RoundRow, marker: string | null): EntryVisit {
     return visitOfRow(this.entriesOf(row.id), this.now(), marker) ?? { id: v7(), personId: null, visitedOn: this.now().date, visitedAt: this.now().time, marker };
+  }
+
+  /** Today's marker in a planting: the one chosen, else the one in use, else the first color no visit has yet. */
+  markerOf(planting: RoundPlanting): string | null {
+    const { date } = this.now();
+    const chosen = this.draft<{ marker: string | null }>(`marker ${planting.id} ${date}`);
+    return chosen ? chosen.marker : markerOfToday(planting.rows, date);
   }
 
   // ── Writing

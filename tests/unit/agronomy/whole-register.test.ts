@@ -199,6 +199,7 @@ const steps: readonly string[] = [
   'row-sample',
   'row-scores',
   'score-figures',
+  'small-t-table',
   'sorted-counts',
   'spacing-figures',
   'spoken-number',
