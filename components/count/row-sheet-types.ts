@@ -1,3 +1,4 @@
+import type { TapeLaid } from '@/lib/schemas/tape-laid';
 import type { CountKind, OriginKind, ReadingUnit, RowEnd, TapeEntryKind, TapeUnit } from '@/lib/schemas/vocabulary';
 import type { Findings } from './finding-texts';
 import type { RowPlaceFacts } from './row-place-text';
@@ -23,6 +24,9 @@ export type FieldMoment = { on: string; at: string | null };
 
 export type SheetPlace = {
   typed: string;
+  /** Its number in the order read, from 0. */
+  order: number;
+  segment: number;
   positionInches: number;
   kind: TapeEntryKind;
   marker: string | null;
@@ -39,7 +43,9 @@ export type SheetTape = {
   personId: string;
   personName: string;
   tapeUnit: TapeUnit;
+  laid: TapeLaid;
   used: boolean;
+  /** In the order of the row, from its start. */
   places: readonly SheetPlace[];
 };
 

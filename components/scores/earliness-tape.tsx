@@ -32,6 +32,7 @@ export function EarlinessTape({ rows, head }: { rows: readonly DrawnRow[]; head?
               lengthInches={row.lengthInches}
               plants={row.plants.map((plant) => ({
                 positionInches: plant.positionInches,
+                segment: plant.segment,
                 earliness: plant.days === null ? null : scale.earliness(plant.days),
                 late: plant.late,
                 double: plant.double,

@@ -2,7 +2,7 @@ import type { TapePlant } from '@/components/tape/tape-plant';
 import type { TapeEntryKind } from '@/lib/schemas/vocabulary';
 import type { FieldMoment, SheetCount } from '../count/row-sheet-types';
 
-type DrawnPlace = { positionInches: number; kind: TapeEntryKind; seenBy: FieldMoment | null };
+type DrawnPlace = { positionInches: number; segment: number; kind: TapeEntryKind; seenBy: FieldMoment | null };
 
 const millisecondsPerMinute = 60_000;
 /** Minutes since an arbitrary day, for order and shares alone; a visit without a time counts as noon. */
@@ -26,6 +26,7 @@ export function drawnPlants(places: readonly DrawnPlace[], counts: readonly Shee
   };
   return places.map((place) => ({
     positionInches: place.positionInches,
+    segment: place.segment,
     earliness: earlinessOf(place.seenBy),
     late: place.kind === 'late',
     double: place.kind === 'double',

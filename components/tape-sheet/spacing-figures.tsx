@@ -1,5 +1,6 @@
 import { Figure } from '@/components/ui/figure';
 import { NumberSource } from '@/components/ui/number-source';
+import { bySegment } from '@/lib/agronomy/by-segment';
 import { register } from '@/lib/agronomy/register';
 import { mapOutcome } from '@/lib/agronomy/outcome';
 import { spacingInchesMean, spacingsInches, spacingVariation } from '@/lib/agronomy/spacing';
@@ -11,15 +12,19 @@ import type { UnitSystem } from '@/lib/schemas/vocabulary';
 import { tapeSheetTexts } from '@/lib/texts/tape-sheet-texts';
 
 type SpacingFiguresProps = {
-  /** Where plants stand, in any order; missing ones are not among them. */
-  plantInches: readonly number[];
+  /** Where plants stand, in any order within a piece of the tape; missing ones are not among them. */
+  plants: readonly { positionInches: number; segment: number }[];
   units: UnitSystem;
 };
 
 /** How many plants a sheet has, how far apart they stand and how evenly; made anew with every place typed. */
-export function SpacingFigures({ plantInches, units }: SpacingFiguresProps) {
-  const inOrder = [...plantInches].sort((a, b) => a - b);
-  const spacings = spacingsInches(inOrder);
+export function SpacingFigures({ plants, units }: SpacingFiguresProps) {
+  const pieces = bySegment(
+    [...plants].sort((a, b) => a.segment - b.segment || a.positionInches - b.positionInches),
+    (plant) => plant.segment,
+  ).map((piece) => piece.map((plant) => plant.positionInches));
+  const inOrder = pieces.flat();
+  const spacings = pieces.flatMap(spacingsInches);
   const mean = spacingInchesMean(spacings);
   const sd = mapOutcome(spacingVariation(spacings), (variation) => variation.spacingInchesSd);
   const inputs = [

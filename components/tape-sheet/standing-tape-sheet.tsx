@@ -6,6 +6,7 @@ import { useWho } from '@/lib/client/who';
 import { countText } from '@/lib/format/count-text';
 import { dateText } from '@/lib/format/date-text';
 import { daysAfter } from '@/lib/format/days-after';
+import type { TapeLaid } from '@/lib/schemas/tape-laid';
 import { tapeSheetTexts } from '@/lib/texts/tape-sheet-texts';
 import type { RowSheetData, SheetTape } from '../count/row-sheet-types';
 import { TakeBack } from '../count/take-back';
@@ -13,6 +14,15 @@ import { drawnPlants } from './drawn-plants';
 import { SpacingFigures } from './spacing-figures';
 
 type StandingTapeSheetProps = { data: RowSheetData; sheet: SheetTape; onCorrect: () => void };
+
+/** What is not as every sheet is read: from the start mark, in one piece. */
+function laidWords({ readFrom, zeroAt, segmentStarts }: TapeLaid): string[] {
+  return [
+    ...(readFrom === 'far-end' ? [tapeSheetTexts.fromFarEnd] : []),
+    ...(zeroAt === 'plant' ? [tapeSheetTexts.zeroAtPlant] : []),
+    ...(segmentStarts.length > 0 ? [tapeSheetTexts.inPieces(segmentStarts.length + 1)] : []),
+  ];
+}
 
 /** A tape sheet that stands: the row as it was read, and its spacing. */
 export function StandingTapeSheet({ data, sheet, onCorrect }: StandingTapeSheetProps) {
@@ -36,6 +46,9 @@ export function StandingTapeSheet({ data, sheet, onCorrect }: StandingTapeSheetP
           </div>
         ) : null}
       </div>
+      {laidWords(sheet.laid).map((sentence) => (
+        <p key={sentence}>{sentence}</p>
+      ))}
       <TapeRow
         lengthInches={row.lengthInches}
         plants={drawnPlants(sheet.places.map((place) => ({ ...place, seenBy: place.firstSeen?.by ?? null })), counts)}
@@ -45,7 +58,7 @@ export function StandingTapeSheet({ data, sheet, onCorrect }: StandingTapeSheetP
         orientation="horizontal"
         label={tapeSheetTexts.label(row.label)}
       />
-      <SpacingFigures plantInches={plants.map((place) => place.positionInches)} units={units} />
+      <SpacingFigures plants={plants} units={units} />
     </div>
   );
 }

@@ -1,11 +1,13 @@
 import { v7 } from 'uuid';
 import { z } from 'zod';
 import type { OperationInput } from '@/lib/client/use-operation';
+import type { TapeLaid } from '@/lib/schemas/tape-laid';
 import { parseTapePlace, placeInches } from '@/lib/schemas/tape-place';
-import { tapeEntryKinds, tapeUnits, type TapeUnit } from '@/lib/schemas/vocabulary';
+import { tapePositions } from '@/lib/schemas/tape-positions';
+import { tapeEntryKinds, tapeReadFroms, tapeUnits, tapeZeros, type TapeUnit } from '@/lib/schemas/vocabulary';
 import type { SheetCount, SheetTape } from '../count/row-sheet-types';
 
-export const placeDraftSchema = z.object({ typed: z.string(), kind: z.enum(tapeEntryKinds), marker: z.string(), leafStage: z.string() });
+export const placeDraftSchema = z.object({ typed: z.string(), kind: z.enum(tapeEntryKinds), marker: z.string(), leafStage: z.string(), cutBefore: z.boolean().optional() });
 export type PlaceDraft = z.infer<typeof placeDraftSchema>;
 
 /** A tape sheet being typed in, every field as it was typed. */
@@ -16,6 +18,9 @@ export const tapeSheetDraftSchema = z.object({
   date: z.string(),
   personId: z.string(),
   tapeUnit: z.enum(tapeUnits),
+  /** How the tape of the sheet being corrected lay; from the start mark where not given. */
+  readFrom: z.enum(tapeReadFroms).optional(),
+  zeroAt: z.enum(tapeZeros).optional(),
   places: z.array(placeDraftSchema),
   /** The sheet that this one corrects. */
   replaces: z.object({ id: z.string(), date: z.string(), visit: z.object({ id: z.string(), on: z.string(), at: z.string().nullable(), marker: z.string().nullable(), personId: z.string() }) }).nullable(),
@@ -36,12 +41,17 @@ export function correctingTapeSheet(sheet: SheetTape): TapeSheetDraft {
     date: sheet.visitedOn,
     personId: sheet.personId,
     tapeUnit: sheet.tapeUnit,
-    places: sheet.places.map((place) => ({
-      typed: place.typed,
-      kind: place.kind,
-      marker: place.marker ?? '',
-      leafStage: place.leafStage === null ? '' : String(place.leafStage),
-    })),
+    readFrom: sheet.laid.readFrom,
+    zeroAt: sheet.laid.zeroAt,
+    places: [...sheet.places]
+      .sort((a, b) => a.order - b.order)
+      .map((place) => ({
+        typed: place.typed,
+        kind: place.kind,
+        marker: place.marker ?? '',
+        leafStage: place.leafStage === null ? '' : String(place.leafStage),
+        cutBefore: sheet.laid.segmentStarts.includes(place.order),
+      })),
     replaces: {
       id: sheet.id,
       date: sheet.visitedOn,
@@ -50,25 +60,54 @@ export function correctingTapeSheet(sheet: SheetTape): TapeSheetDraft {
   };
 }
 
-/** Each place with where it lies, as far as the tape in hand lets it be read. */
-export function readPlaces(draft: TapeSheetDraft): (PlaceDraft & { positionInches: number | null })[] {
-  return draft.places.map((place) => {
-    const read = parseTapePlace(place.typed, draft.tapeUnit);
-    return { ...place, positionInches: read.ok ? placeInches(read.thousandths, draft.tapeUnit) : null };
+function laidOf({ readFrom, zeroAt }: TapeSheetDraft, places: readonly PlaceDraft[]): TapeLaid {
+  const segmentStarts = places.flatMap((place, index) => (place.cutBefore && index > 0 ? [index] : []));
+  return { readFrom: readFrom ?? 'start', zeroAt: zeroAt ?? 'mark', segmentStarts };
+}
+
+type ReadPlace = PlaceDraft & { inches: number };
+
+/** Each place with what the tape says there; what it cannot be read as is told on saving. */
+function inchesOf(draft: TapeSheetDraft, place: PlaceDraft): number | null {
+  const read = parseTapePlace(place.typed, draft.tapeUnit);
+  return read.ok ? placeInches(read.thousandths, draft.tapeUnit) : null;
+}
+
+function readPlaces(draft: TapeSheetDraft): ReadPlace[] {
+  return draft.places.flatMap((place) => {
+    const inches = inchesOf(draft, place);
+    return inches === null ? [] : [{ ...place, inches }];
+  });
+}
+
+/** The places that can be read, where they lie in the row. */
+export function laidPlaces(draft: TapeSheetDraft, lengthInches: number): (PlaceDraft & { positionInches: number; segment: number })[] {
+  const read = readPlaces(draft);
+  const laid = tapePositions(read.map((place) => place.inches), laidOf(draft, read), lengthInches);
+  return laid.flatMap(({ order, positionInches, segment }) => {
+    const place = read[order];
+    return place ? [{ ...place, positionInches, segment }] : [];
   });
 }
 
 export function isInOrder(draft: TapeSheetDraft): boolean {
-  const positions = readPlaces(draft).flatMap((place) => place.positionInches ?? []);
-  return positions.every((position, index) => position >= (positions[index - 1] ?? 0));
+  const read = readPlaces(draft);
+  return read.every((place, index) => index === 0 || place.cutBefore || place.inches >= (read[index - 1]?.inches ?? 0));
 }
 
-/** In the order of the tape; what cannot be read stays at the end. */
+/** Each piece in the order of the tape; what cannot be read stays at its end. */
 export function inTapeOrder(draft: TapeSheetDraft): TapeSheetDraft {
-  const places = readPlaces(draft)
-    .sort((a, b) => (a.positionInches ?? Number.MAX_VALUE) - (b.positionInches ?? Number.MAX_VALUE))
-    .map(({ typed, kind, marker, leafStage }) => ({ typed, kind, marker, leafStage }));
-  return { ...draft, places };
+  const pieces: PlaceDraft[][] = [];
+  draft.places.forEach((place, index) => (index > 0 && !place.cutBefore ? pieces.at(-1)?.push(place) : pieces.push([place])));
+  const farOf = (place: PlaceDraft) => inchesOf(draft, place) ?? Number.MAX_VALUE;
+  const sorted = pieces.map((piece, at) => [...piece].sort((a, b) => farOf(a) - farOf(b)).map((place, index) => ({ ...place, cutBefore: at > 0 && index === 0 })));
+  return { ...draft, places: sorted.flat() };
+}
+
+/** The places without one of them; the next takes over a cut that lay before it. */
+export function withoutPlace(places: readonly PlaceDraft[], at: number): PlaceDraft[] {
+  const cutBefore = places[at]?.cutBefore;
+  return places.flatMap((place, index) => (index === at ? [] : [index === at + 1 && cutBefore ? { ...place, cutBefore } : place]));
 }
 
 /** A leaf stage as a number; otherwise as typed, for the server to say what is wrong with it. */
@@ -90,11 +129,13 @@ export function tapeSheetOperation(draft: TapeSheetDraft, rowSampleId: string, c
   return {
     noun: 'tape-sheets',
     kind: 'tape-sheet.record',
+    version: 2,
     thingId: draft.sheetId,
     body: {
       rowSampleId,
       visit,
       tapeUnit: draft.tapeUnit,
+      ...laidOf(draft, draft.places),
       places: draft.places.map((place) => ({
         typed: place.typed.trim(),
         kind: place.kind,

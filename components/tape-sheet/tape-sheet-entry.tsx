@@ -17,7 +17,7 @@ import { NextPlace } from './next-place';
 import { PasteReadings } from './paste-readings';
 import { PlaceList } from './place-list';
 import { SpacingFigures } from './spacing-figures';
-import { inTapeOrder, isInOrder, readPlaces, tapeSheetOperation, type PlaceDraft, type TapeSheetDraft } from './tape-sheet-draft';
+import { inTapeOrder, isInOrder, laidPlaces, tapeSheetOperation, withoutPlace, type PlaceDraft, type TapeSheetDraft } from './tape-sheet-draft';
 import { TapeVisit } from './tape-visit';
 
 type TapeSheetEntryProps = {
@@ -37,7 +37,7 @@ export function TapeSheetEntry({ data, draft, onChange, onClear, onSaved }: Tape
   const operation = useAskedOperation({ onApplied: onSaved });
   const { row, counts } = data;
   const markers = [...new Set(counts.flatMap((count) => (count.used && count.marker !== null ? [count.marker] : [])))];
-  const read = readPlaces(draft).flatMap((place) => (place.positionInches === null ? [] : [{ ...place, positionInches: place.positionInches }]));
+  const read = laidPlaces(draft, row.lengthInches);
   const setPlaces = (places: PlaceDraft[]) => onChange({ ...draft, places });
   const add = (readings: readonly PlaceDraft[]) => setPlaces([...draft.places, ...readings]);
   return (
@@ -70,7 +70,7 @@ export function TapeSheetEntry({ data, draft, onChange, onClear, onSaved }: Tape
         orientation="horizontal"
         label={tapeSheetTexts.label(row.label)}
       />
-      <SpacingFigures plantInches={read.filter((place) => place.kind !== 'missing').map((place) => place.positionInches)} units={units} />
+      <SpacingFigures plants={read.filter((place) => place.kind !== 'missing')} units={units} />
       <div className="grid items-start gap-6 lg:grid-cols-2">
         <NextPlace tapeUnit={draft.tapeUnit} markers={markers} onAdd={(place) => add([place])} />
         <PasteReadings tapeUnit={draft.tapeUnit} onAdd={(readings) => add(readings.map((typed) => ({ typed, kind: 'plant', marker: '', leafStage: '' })))} />
@@ -90,7 +90,7 @@ export function TapeSheetEntry({ data, draft, onChange, onClear, onSaved }: Tape
           markers={markers}
           errorOf={(index, field) => fieldError(operation.error, `places.${index}.${field}`)}
           onChange={(index, place) => setPlaces(draft.places.map((each, at) => (at === index ? place : each)))}
-          onRemove={(index) => setPlaces(draft.places.filter((_, at) => at !== index))}
+          onRemove={(index) => setPlaces(withoutPlace(draft.places, index))}
         />
       </div>
       <Refusal operation={operation} />

@@ -4,6 +4,7 @@ import type { UnitSystem } from '@/lib/schemas/vocabulary';
 import { MissingSeed } from './missing-seed';
 import { plantHeight, plantLook } from './plant-height';
 import { Seedling } from './seedling';
+import { TapeCut } from './tape-cut';
 import type { TapeDouble } from './tape-doubles';
 import type { TapeGap } from './tape-gaps';
 import { tapeMarks } from './tape-marks';
@@ -23,6 +24,8 @@ type LyingPieceProps = {
   plants: readonly TapePlant[];
   gaps: readonly TapeGap[];
   doubles: readonly TapeDouble[];
+  /** Where the tape was laid anew. */
+  cuts: readonly number[];
   fromInches: number;
   toInches: number;
   inchSize: number;
@@ -40,6 +43,7 @@ export function LyingPiece({
   plants,
   gaps,
   doubles,
+  cuts,
   fromInches,
   toInches,
   inchSize,
@@ -106,6 +110,9 @@ export function LyingPiece({
           </g>
         );
       })}
+      {cuts.filter(isHere).map((cut) => (
+        <TapeCut key={cut} x={xOf(cut)} y={groundY - 1} across={tapeHeight + 2} lies="along" />
+      ))}
       {pegs.map((x) =>
         x === null ? null : (
           <path

@@ -1,6 +1,7 @@
 import { useId } from 'react';
 import type { UnitSystem } from '@/lib/schemas/vocabulary';
 import { LyingPiece, pieceHeight } from './lying-piece';
+import { tapeCuts } from './tape-cuts';
 import { tapeDoubles } from './tape-doubles';
 import { tapeGaps } from './tape-gaps';
 import type { TapeEnd, TapePlant } from './tape-plant';
@@ -43,6 +44,7 @@ export function LyingTape({
   const pieces = Array.from({ length: Math.ceil(lengthInches / pieceInches) }, (_, index) => index);
   const gaps = tapeGaps(plants, namedGapInches);
   const doubles = tapeDoubles(plants);
+  const cuts = tapeCuts(plants);
   return (
     <svg
       role="img"
@@ -58,6 +60,7 @@ export function LyingTape({
             plants={plants}
             gaps={gaps}
             doubles={doubles}
+            cuts={cuts}
             fromInches={piece * pieceInches}
             toInches={Math.min(lengthInches, (piece + 1) * pieceInches)}
             inchSize={(width - edges) / pieceInches}

@@ -15,7 +15,7 @@ export function tapeDoubles(plants: readonly TapePlant[]): TapeDouble[] {
     if (!plant.double) continue;
     const at = plant.positionInches;
     const partner = standing
-      .filter((other) => other !== plant && Math.abs(other.positionInches - at) <= partnerWithinInches)
+      .filter((other) => other !== plant && (other.segment ?? 0) === (plant.segment ?? 0) && Math.abs(other.positionInches - at) <= partnerWithinInches)
       .sort((a, b) => Math.abs(a.positionInches - at) - Math.abs(b.positionInches - at))[0];
     const fromInches = Math.min(at, partner?.positionInches ?? at);
     const toInches = Math.max(at, partner?.positionInches ?? at);

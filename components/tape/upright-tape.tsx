@@ -5,6 +5,8 @@ import type { UnitSystem } from '@/lib/schemas/vocabulary';
 import { MissingSeed } from './missing-seed';
 import { plantHeight, plantLook } from './plant-height';
 import { Seedling } from './seedling';
+import { TapeCut } from './tape-cut';
+import { tapeCuts } from './tape-cuts';
 import { tapeDoubles } from './tape-doubles';
 import { tapeGaps } from './tape-gaps';
 import { tapeMarks } from './tape-marks';
@@ -99,6 +101,9 @@ export function UprightTape({
           </g>
         );
       })}
+      {tapeCuts(plants).map((cut) => (
+        <TapeCut key={cut} x={tapeLeft - 1} y={yOf(cut)} across={tapeWidth + 2} lies="upright" />
+      ))}
       {pegs.map((y) =>
         y === null ? null : (
           <path

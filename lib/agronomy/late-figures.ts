@@ -1,3 +1,4 @@
+import { bySegment } from './by-segment';
 import type { EmergenceCurve } from './emergence-curve';
 import { emergenceCurve } from './emergence-curve';
 import { emergencePercentile } from './emergence-percentile';
@@ -43,9 +44,15 @@ export function lateFigures(samples: readonly RowSample[], curve: Outcome<Emerge
     lateShareFromCounts: fromCounts,
     latePattern:
       fromTape.kind === 'value'
-        ? latePattern(sheets.map((sheet) => settledClasses(sheet.plants).map(isLate)))
+        ? latePattern(sheets.flatMap(lateRows))
         : fromTape,
   };
+}
+
+/** Whether each plant is late, one list for each piece of the row that the tape did not cut. */
+function lateRows(sheet: ReturnType<typeof sheetDelays>): boolean[][] {
+  const plants = settledClasses(sheet.plants).map((lateClass, index) => ({ late: isLate(lateClass), segment: sheet.segments[index] }));
+  return bySegment(plants, (plant) => plant.segment).map((piece) => piece.map((plant) => plant.late));
 }
 
 function isLate(lateClass: PlantDelay['lateClass']): boolean {
@@ -55,20 +62,20 @@ function isLate(lateClass: PlantDelay['lateClass']): boolean {
 /**
  * How late is each plant of one tape sheet, against the first flush of its own row sample?
  *
- * Takes a row sample and the limits. Returns the delays of its plants in tape order, missing places left out, and whether
- * shares read off them are exact or at least. Never insufficient: a plant whose day is not known is *unknown*, and without
- * a sheet there are none. Throws ImpossibleInput as plantDelays does. Method: plantDelays from the tenth percentile.
+ * Takes a row sample and the limits. Returns the delays of its plants in tape order, missing places left out, the piece of
+ * the tape that each stands on, and whether shares read off them are exact or at least. Never insufficient: a plant whose
+ * day is not known is *unknown*, and without a sheet there are none. Throws ImpossibleInput as plantDelays does. Method:
+ * plantDelays from the tenth percentile.
  * Example: a sheet without visits and marks gives *unknown* throughout.
  */
 export function sheetDelays(
   sample: RowSample,
   limits: LateLimits,
-): { plants: PlantDelay[]; bound: LateShare['bound'] } {
+): { plants: PlantDelay[]; segments: number[]; bound: LateShare['bound'] } {
   const curve = emergenceCurve(sortedCounts(sample));
   const firstFlush = chainOutcome(curve, (fitted) => emergencePercentile(fitted, 0.1));
-  const plants = (sample.tape ?? [])
-    .filter((place) => place.kind !== 'missing')
-    .map((place) => ({ firstSeen: place.firstSeen, markedLate: place.kind === 'late' }));
+  const standing = (sample.tape ?? []).filter((place) => place.kind !== 'missing');
+  const plants = standing.map((place) => ({ firstSeen: place.firstSeen, markedLate: place.kind === 'late' }));
   const delays = plantDelays(plants, firstFlush, limits);
   const restsOnVisits = delays.some((plant) => plant.basis === 'visits');
   const complete =
@@ -76,5 +83,5 @@ export function sheetDelays(
     curve.value.countingEnded &&
     firstFlush.kind === 'value' &&
     firstFlush.value.bound === 'exact';
-  return { plants: delays, bound: restsOnVisits && !complete ? 'at-least' : 'exact' };
+  return { plants: delays, segments: standing.map((place) => place.segment ?? 0), bound: restsOnVisits && !complete ? 'at-least' : 'exact' };
 }

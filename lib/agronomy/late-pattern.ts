@@ -13,7 +13,7 @@ export type LatePattern = {
  *
  * Takes, for each row, whether each plant in tape order is late. Returns the mean number of late plants in
  * an unbroken run and the published pattern nearest to it. Insufficient without a late plant. Throws nothing.
- * Method: mean run length; runs never bridge two rows. Nafziger, Carter and Graham (1991) studied late plants
+ * Method: mean run length; runs never bridge two rows or a cut. Nafziger, Carter and Graham (1991) studied late plants
  * alternating (runs of 1) and in threes (runs of 3); below 2, the middle, is read as alternating, 2 and
  * more as in groups. The limit is our own.
  * Runs lengthen with the share of late plants even where their order is chance: at half, chance gives 2.

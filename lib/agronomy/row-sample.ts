@@ -8,6 +8,8 @@ import type { RowEnd } from './plants-held';
  */
 export type TapePlace = {
   positionInches: number;
+  /** Which piece of a cut row it lies on, from 0; no distance is known from one piece to the next. One piece where not given. */
+  segment?: number;
   kind: 'plant' | 'late' | 'double' | 'missing';
   firstSeen: FirstSeen | null;
 };

@@ -1,3 +1,4 @@
+import { bySegment } from './by-segment';
 import { doublesAndGaps } from './doubles-and-gaps';
 import type { Figures } from './figures';
 import { kachmanSmith } from './kachman-smith';
@@ -23,7 +24,7 @@ export type SpacingFigures = Pick<
  * What do the tape sheets of one or more row samples say about spacing?
  *
  * Takes row samples and the share of seeds standing in them (or insufficient). Returns the spacing figures, the
- * spacings of all sheets joined without bridging rows. Each is insufficient where its own needs are not met.
+ * spacings of all sheets joined without bridging rows or cuts. Each is insufficient where its own needs are not met.
  * Throws ImpossibleInput as its parts do. Method: as each part states; the theoretical spacing shown is the
  * mean over the row samples with a tape sheet. It does not tell planter and emergence apart.
  * Example: places 0 2 17 33 38 39 44 52 55 60 68 in: mean 6.8, SD 5.116 in.
@@ -33,7 +34,7 @@ export function spacingFigures(
   shareStanding: Outcome<number>,
 ): SpacingFigures {
   const sheets = samples.filter((sample) => sample.tape !== null);
-  const rows = sheets.map((sample) => ({ sample, spacings: spacingsInches(plantPositionsInches(sample)) }));
+  const rows = sheets.map((sample) => ({ sample, spacings: plantSpacingsInches(sample) }));
   const spacings = rows.flatMap((row) => row.spacings);
   const none = sheets.length === 0 ? insufficient('no-tape-sheet', '1 tape sheet', 'no tape sheet') : null;
   const theoretical = meanTheoretical(sheets.length > 0 ? sheets : samples);
@@ -67,9 +68,12 @@ export function spacingFigures(
   };
 }
 
-/** The places of the plants alone, missing places left out. */
-export function plantPositionsInches(sample: RowSample): number[] {
-  return (sample.tape ?? []).filter((place) => place.kind !== 'missing').map((place) => place.positionInches);
+/** The spacings between the plants of one sheet, missing places left out; a cut between two pieces of the tape is never bridged. */
+export function plantSpacingsInches(sample: RowSample): number[] {
+  const plants = (sample.tape ?? []).filter((place) => place.kind !== 'missing');
+  return bySegment(plants, (plant) => plant.segment).flatMap((piece) =>
+    spacingsInches(piece.map((plant) => plant.positionInches)),
+  );
 }
 
 function meanTheoretical(samples: readonly RowSample[]): Outcome<number> {

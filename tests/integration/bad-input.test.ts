@@ -17,7 +17,7 @@ const oddValues: readonly unknown[] = [
   null, true, [], {}, [null], { typed: '-3' }, { typed: '999999999999' }, { typed: '' }, { typed: '1', unit: 'furlong' }, v7(), 'not-an-id',
 ];
 
-type Sent = { kind: string; thingId: () => string; body: () => Record<string, unknown>; baseVersion?: number };
+type Sent = { kind: string; version?: number; thingId: () => string; body: () => Record<string, unknown>; baseVersion?: number };
 type Path = readonly (string | number)[];
 
 let own: TestDatabase;
@@ -66,6 +66,7 @@ function writesOf(count: CountScene): Sent[] {
     { kind: 'setting.add', thingId: v7, body: () => ({ ...setting, name: `Setting ${v7()}` }) },
     { kind: 'row-samples.add', thingId: () => count.plantingId, body: () => ({ plantingId: count.plantingId, samples: [{ id: v7(), stripId: null, zoneId: null, label: `L${v7().slice(-6)}`, planterRow: 3, length: { typed: '17 ft 5 in' }, startEnd: 'mark', farEnd: 'mark' }] }) },
     { kind: 'count.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-2'), visit: visit(), countedAs: 'so-far', plants: 20, doubtful: 1, replacesId: null }) },
+    { kind: 'tape-sheet.record', version: 2, thingId: v7, body: () => ({ rowSampleId: count.row('A-3'), readFrom: 'far-end', zeroAt: 'mark', segmentStarts: [1], visit: visit(), tapeUnit: 'in', places: [{ typed: '6', kind: 'plant', marker: 'red', leafStage: 2 }, { typed: '2 1/2', kind: 'late', marker: null, leafStage: null }], replacesId: null }) },
     { kind: 'tape-sheet.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-3'), visit: visit(), tapeUnit: 'in', places: [{ typed: '6', kind: 'plant', marker: 'red', leafStage: 2 }, { typed: '12 1/2', kind: 'late', marker: null, leafStage: null }], replacesId: null }) },
     { kind: 'residue.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-1'), readOn: '2026-05-18', marksRead: 50, marksCovered: 10 }) },
     { kind: 'depth.record', thingId: v7, body: () => ({ rowSampleId: count.row('A-1'), visit: visit(), unit: 'in', depths: ['1 3/4', '2'], replacesId: null }) },
@@ -134,7 +135,7 @@ const shortly = (odd: unknown) => String(JSON.stringify(odd)).slice(0, 40);
 async function complaintsAbout(sent: Sent): Promise<string[]> {
   const complaints: string[] = [];
   const ask = async (what: string, body: unknown) => {
-    const answer = await scene.send(sent.kind === 'decision.sign' ? 'grower' : 'owner', sent.kind, sent.thingId(), body as Record<string, unknown>, sent.baseVersion ? { baseVersion: sent.baseVersion } : {});
+    const answer = await scene.send(sent.kind === 'decision.sign' ? 'grower' : 'owner', sent.kind, sent.thingId(), body as Record<string, unknown>, { version: sent.version ?? 1, ...(sent.baseVersion ? { baseVersion: sent.baseVersion } : {}) });
     if (answer.code === 'unexpected' || answer.code === 'busy') complaints.push(`${what}: ${answer.code}`);
     if (answer.code === 'bad-input' && (answer.fields ?? []).every((field) => field.path === '')) complaints.push(`${what}: refused without the field it means: ${JSON.stringify(answer.fields)}`);
   };
@@ -150,7 +151,7 @@ describe('whatever is typed into a form', () => {
     const told: Record<string, string[]> = {};
     for (const sent of writes) {
       const complaints = await complaintsAbout(sent);
-      if (complaints.length > 0) told[sent.kind] = complaints;
+      if (complaints.length > 0) told[`${sent.kind} ${sent.version ?? 1}`] = complaints;
     }
     expect(told).toEqual({});
   });

@@ -3,6 +3,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { spacingsInches, spacingVariation } from '@/lib/agronomy/spacing';
 import { CountScene, yesTo } from '../support/count-scene';
 import { makeDecideScenes, type DecideScene } from '../support/decide-scene';
+import { scoresOf } from '../support/trial-scene';
 
 let scene: DecideScene;
 let close: () => Promise<void>;
@@ -140,6 +141,71 @@ describe('a tape sheet', () => {
     expect((await sheetsOf(row)).map((sheet) => [sheet.id, sheet.used])).toEqual([[second, true]]);
     expect(await row.tape('A-1', ['3', '11'], { replacesId: first })).toMatchObject({ code: 'conflict' });
     expect((await row.tape('A-2', ['3', '11'], { replacesId: second })).fields?.[0]?.path).toBe('replacesId');
+  });
+
+  it('read from the far end comes back from the start, and as it was typed when it is corrected', async () => {
+    const row = await new CountScene(scene).settle(['C-1'], '100 in');
+    const laid = { readFrom: 'far-end', zeroAt: 'mark', segmentStarts: [] };
+    expect((await row.tape('C-1', ['10', { typed: '30', kind: 'late' }, '36'], { laid })).outcome).toBe('applied');
+    expect((await sheetsOf(row, 'C-1'))[0]).toMatchObject({
+      laid,
+      places: [
+        { typed: '36', order: 2, positionInches: 64, segment: 0 },
+        { typed: '30', order: 1, positionInches: 70, kind: 'late' },
+        { typed: '10', order: 0, positionInches: 90 },
+      ],
+    });
+  });
+
+  it('of a cut row is in order on each piece, and no spacing crosses the cut', async () => {
+    const row = await new CountScene(scene).settle(['C-1'], '100 in');
+    const laid = { readFrom: 'start', zeroAt: 'mark', segmentStarts: [3] };
+    expect((await row.tape('C-1', ['5', '11', '17', '4', '11', '17'], { laid })).outcome).toBe('applied');
+    const [sheet] = await sheetsOf(row, 'C-1');
+    // 17 + 17 of 100 in were measured; the 66 left are shared by the cut and the end.
+    expect(sheet?.places.map((place) => [place.segment, place.positionInches])).toEqual([[0, 5], [0, 11], [0, 17], [1, 54], [1, 61], [1, 67]]);
+    const scores = await scoresOf(scene, row.plantingId, 'row-sample');
+    // Spacings 6 6 and 7 6, by hand: mean 25 / 4.
+    expect(scores.rowSamples[0]?.scored?.figures.spacingInchesMean).toMatchObject({ kind: 'value', value: 6.25 });
+  });
+
+  it('asks about a place that lies beyond the end only once the pieces before it are counted in', async () => {
+    const row = await new CountScene(scene).settle(['C-1'], '40 in');
+    const laid = { readFrom: 'start', zeroAt: 'mark', segmentStarts: [2] };
+    expect((await row.tape('C-1', ['5', '20', '6', '20'], { laid })).outcome).toBe('applied');
+    expect(rules(await row.tape('C-1', ['5', '20', '6', '21'], { laid, on: '2026-05-18' }))).toEqual(['place-outside-length']);
+  });
+
+  it.each<[string, string[], Record<string, unknown>, string]>([
+    ['that falls within a piece', ['3', '9', '4', '2'], { segmentStarts: [2] }, 'places.3.typed'],
+    ['with a cut behind its last place', ['3', '9'], { segmentStarts: [2] }, 'segmentStarts'],
+    ['with its cuts out of order', ['3', '9', '4', '8'], { segmentStarts: [2, 1] }, 'segmentStarts'],
+    ['laid from a plant without that plant', ['3', '9'], { zeroAt: 'plant' }, 'places.0.typed'],
+  ])('%s is refused at its field', async (_, places, laid, path) => {
+    const row = await planted();
+    const answer = await row.tape('A-1', places, { laid: { readFrom: 'start', zeroAt: 'mark', segmentStarts: [], ...laid } });
+    expect(answer.fields?.map((field) => field.path)).toEqual([path]);
+    expect(await sheetsOf(row)).toEqual([]);
+  });
+
+  it('that looks like feet and tenths is asked about before it is taken as inches', async () => {
+    const row = await planted();
+    const places = ['0.4', '1.1', '1.6', '2.3', '2.8'];
+    const asked = await row.tape('A-1', places);
+    expect(asked.questions?.map((question) => question.sentence)).toEqual(['A-1: 0.4 to 2.8 look like feet and tenths, and the tape is given in inches. Are they inches?']);
+    expect((await row.tape('A-1', places, { tapeUnit: 'ft-tenths' })).outcome).toBe('applied');
+  });
+
+  it('of the second version sent again stands once, and turned around under its id changes nothing', async () => {
+    const row = await planted();
+    const laid = { readFrom: 'start', zeroAt: 'mark', segmentStarts: [1] };
+    const sent = { sheetId: v7(), visit: { id: v7() }, laid };
+    expect((await row.tape('A-1', ['3', '9'], sent)).outcome).toBe('applied');
+    expect((await row.tape('A-1', ['3', '9'], sent)).outcome).toBe('applied');
+    for (const other of [{ readFrom: 'far-end' }, { segmentStarts: [] }]) {
+      expect(await row.tape('A-1', ['3', '9'], { ...sent, laid: { ...laid, ...other } })).toMatchObject({ code: 'operation-reused' });
+    }
+    expect(await sheetsOf(row)).toHaveLength(1);
   });
 
   it('of a later visit is the one used, in whatever order they come; of one visit the later recorded', async () => {

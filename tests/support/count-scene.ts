@@ -64,7 +64,7 @@ export class CountScene {
   }
 
   tape(label: string, places: readonly (string | Sent)[], more: Sent = {}, who: Who = 'scout'): Promise<Answer> {
-    const { sheetId = v7(), on = '2026-05-19', tapeUnit = 'in', replacesId = null, confirmations = [], visit = {} } = more;
+    const { sheetId = v7(), on = '2026-05-19', tapeUnit = 'in', replacesId = null, confirmations = [], visit = {}, laid } = more;
     return this.scene.send(
       who,
       'tape-sheet.record',
@@ -74,9 +74,10 @@ export class CountScene {
         visit: { id: v7(), personId: null, visitedOn: on, visitedAt: null, marker: null, ...(visit as Sent) },
         tapeUnit,
         places: places.map((place) => ({ kind: 'plant', marker: null, leafStage: null, ...(typeof place === 'string' ? { typed: place } : place) })),
+        ...(laid as Sent | undefined),
         replacesId,
       },
-      { confirmations },
+      { confirmations, version: laid === undefined ? 1 : 2 },
     );
   }
 

@@ -157,6 +157,7 @@ const spokenFor: Record<string, string> = {
 
 /** Files that calculate nothing a reader is shown: shapes of data, checks, steps inside another calculation. */
 const steps: readonly string[] = [
+  'by-segment',
   'constants',
   'corn-bushel',
   'figures',

@@ -76,7 +76,7 @@ describe('a figure as it is read', () => {
 });
 
 describe('the heights of plants on the tape', () => {
-  const plant = (days: number | null, late = false) => ({ positionInches: 0, days, late, double: false, kind: 'plant' as const });
+  const plant = (days: number | null, late = false) => ({ positionInches: 0, segment: 0, days, late, double: false, kind: 'plant' as const });
 
   it('reach from the first plant to the last that was not late', () => {
     const scale = earlinessScale([plant(9), plant(11), plant(19, true), plant(null)]);

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { plantHeight, plantLook } from '@/components/tape/plant-height';
+import { tapeCuts } from '@/components/tape/tape-cuts';
 import { tapeDoubles } from '@/components/tape/tape-doubles';
 import { tapeGaps } from '@/components/tape/tape-gaps';
 import { tapeMarks } from '@/components/tape/tape-marks';
@@ -88,5 +89,23 @@ describe('the height of a plant', () => {
   it('claims nothing where nobody saw the day', () => {
     expect(plantLook(plant(0, { earliness: null }))).toBe('unknown');
     expect(plantLook(plant(0, { earliness: null, late: true }))).toBe('late');
+  });
+});
+
+describe('a tape laid anew after a cut', () => {
+  const pieces = [plant(4), plant(10), plant(16), plant(60, { segment: 1, double: true }), plant(66, { segment: 1 }), plant(72, { segment: 1 })];
+
+  it('is cut halfway between its pieces', () => {
+    expect(tapeCuts(pieces)).toEqual([38]);
+    expect(tapeCuts([plant(4), plant(10)])).toEqual([]);
+  });
+
+  it('has no gap over the cut', () => {
+    expect(tapeGaps(pieces)).toEqual([]);
+    expect(tapeGaps(pieces.map((each) => ({ ...each, segment: 0 })))).toEqual([{ fromInches: 16, toInches: 60 }]);
+  });
+
+  it('joins no double over the cut', () => {
+    expect(tapeDoubles([plant(10), plant(11, { segment: 1, double: true })])).toEqual([{ fromInches: 11, toInches: 11 }]);
   });
 });

@@ -1,7 +1,10 @@
 import 'server-only';
 import type { Transaction } from '@/db/connection';
 import { momentOf, resolveCounts } from '@/lib/schemas/resolve-counts';
+import { readingIn } from '@/lib/schemas/reading';
+import type { TapeLaid } from '@/lib/schemas/tape-laid';
 import { placeInches } from '@/lib/schemas/tape-place';
+import { tapePositions } from '@/lib/schemas/tape-positions';
 import type { TapeEntryKind, TapeUnit } from '@/lib/schemas/vocabulary';
 import { listCounts } from '../../data/count';
 import { listResidueReadings } from '../../data/residue-reading';
@@ -15,6 +18,11 @@ export type { ObservedCount } from './observed-count';
 
 export type ObservedPlace = {
   typed: string;
+  /** Its number on the sheet in the order read, from 0. */
+  order: number;
+  /** Which piece of the tape it lies on, counted from the row's start; 0 throughout where the tape was laid once. */
+  segment: number;
+  /** From the row's start. */
   positionInches: number;
   kind: TapeEntryKind;
   marker: string | null;
@@ -34,8 +42,10 @@ export type ObservedTapeSheet = {
   personName: string;
   recordedAt: string;
   tapeUnit: TapeUnit;
+  laid: TapeLaid;
   /** The sheet of the newest visit to its row sample, and of two of one visit the one recorded last. */
   used: boolean;
+  /** In the order of the row, from its start; a sheet read from the far end is turned around. */
   places: ObservedPlace[];
 };
 
@@ -74,20 +84,25 @@ function inFirstPlace<Row extends { id: string; replacesId?: string | null }>(as
 
 function observedTapeSheet(row: TapeSheetRow, used: boolean, counts: readonly ObservedCount[]): ObservedTapeSheet {
   const visits = counts.filter((count) => count.used).sort((a, b) => (momentOf(a) < momentOf(b) ? -1 : 1));
-  const places = row.placesThousandths.map((thousandths, index): ObservedPlace => {
-    const marker = row.markers[index] || null;
-    const leafTenths = row.leafStageTenths[index] ?? -1;
+  const laid = { readFrom: row.readFrom, zeroAt: row.zeroAt, segmentStarts: row.segmentStarts };
+  const inchesRead = row.placesThousandths.map((thousandths) => placeInches(thousandths, row.tapeUnit));
+  const lengthInches = readingIn({ unit: row.lengthUnit, thousandths: row.lengthThousandths }, 'in');
+  const places = tapePositions(inchesRead, laid, lengthInches).map(({ order, segment, positionInches }): ObservedPlace => {
+    const marker = row.markers[order] || null;
+    const leafTenths = row.leafStageTenths[order] ?? -1;
     return {
-      typed: row.placesTyped[index] ?? '',
-      positionInches: placeInches(thousandths, row.tapeUnit),
-      kind: (row.kinds[index] ?? 'plant') as TapeEntryKind,
+      typed: row.placesTyped[order] ?? '',
+      order,
+      segment,
+      positionInches,
+      kind: (row.kinds[order] ?? 'plant') as TapeEntryKind,
       marker,
       leafStage: leafTenths < 0 ? null : leafTenths / 10,
       firstSeen: firstSeenBy(marker, visits),
     };
   });
   const { id, rowSampleId, visitId, visitedOn, visitedAt, visitMarker, personId, personName, recordedAt, tapeUnit } = row;
-  return { id, rowSampleId, visitId, visitedOn, visitedAt, visitMarker, personId, personName, recordedAt, tapeUnit, used, places };
+  return { id, rowSampleId, visitId, visitedOn, visitedAt, visitMarker, personId, personName, recordedAt, tapeUnit, laid, used, places };
 }
 
 /** A marker set at several visits says only that the plant came up by the last of them, after the visit before the first. */

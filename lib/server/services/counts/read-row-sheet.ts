@@ -43,8 +43,8 @@ export async function readRowSheet(context: ReadContext, plantingId: string, row
     counts: counts.map(({ id, visitId, visitedOn, visitedAt, marker, personId, personName, countedAs, plants, plantsUp, doubtful, originKind, used, alsoCountedBy }) => ({
       id, visitId, visitedOn, visitedAt, marker, personId, personName, countedAs, plants, plantsUp, doubtful, originKind, used, alsoCountedBy,
     })),
-    tapeSheets: tapeSheets.map(({ id, visitId, visitedOn, visitedAt, visitMarker, personId, personName, tapeUnit, used, places }) => ({
-      id, visitId, visitedOn, visitedAt, visitMarker, personId, personName, tapeUnit, used, places,
+    tapeSheets: tapeSheets.map(({ id, visitId, visitedOn, visitedAt, visitMarker, personId, personName, tapeUnit, laid, used, places }) => ({
+      id, visitId, visitedOn, visitedAt, visitMarker, personId, personName, tapeUnit, laid, used, places,
     })),
     residueReadings: ofRow(all.residueReadings).map(({ id, readOn, marksRead, marksCovered }) => ({ id, readOn, marksRead, marksCovered })),
     findings: rowFindings({ on: planting.plantedOn, at: planting.plantedAt }, counts, tapeSheets.find((sheet) => sheet.used), today),

@@ -17,6 +17,7 @@ const askedTogether: Record<string, string> = {
   'more-places-than-seeds': 'there are more places than seeds were planted. Were there that many?',
   'unknown-marker': 'the marker belongs to no visit of the row, so it tells no day. Keep it all the same?',
   'taped-twice': 'the same person has a tape sheet of the row and day already. Keep both? The newer is used.',
+  'feet-and-tenths': 'the places look like feet and tenths, and the tape is given in inches. Are they inches?',
 };
 
 /**

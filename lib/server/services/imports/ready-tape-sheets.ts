@@ -1,5 +1,6 @@
 import 'server-only';
 import { v7 } from 'uuid';
+import { checkTapeSheet } from '@/lib/schemas/check-tape-sheet';
 import { inOrder } from '@/lib/schemas/import-counts';
 import type { ImportProblem } from '@/lib/schemas/import-table';
 import { readImportTapeSheets, type TapeSheetLines } from '@/lib/schemas/import-tape-sheets';
@@ -9,7 +10,6 @@ import type { WriteContext } from '../../operations/context';
 import { originColumns } from '../../operations/origin-columns';
 import { checkVisit } from '../counts/check-visit';
 import { rowSampleFacts } from '../counts/count-facts';
-import { checkTapeSheet } from '../tape-sheets/check-tape-sheet';
 import { markersOfRow } from '../tape-sheets/markers-of-row';
 import { tapedByOn } from '../tape-sheets/taped-by-on';
 import { tapeSheetColumns } from '../tape-sheets/tape-sheet-columns';

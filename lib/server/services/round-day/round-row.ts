@@ -21,10 +21,10 @@ export function roundRow({ sample, place }: PlacedRow, facts: ReturnType<typeof 
     counts: here(observed.counts).map(({ id, visitId, visitedOn, visitedAt, marker, personId, personName, countedAs, plants, plantsUp, doubtful, used }) => ({
       id, visitId, visitedOn, visitedAt, marker, personId, personName, countedAs, plants, plantsUp, doubtful, used,
     })),
-    tapeSheets: here(observed.tapeSheets).map(({ id, visitId, visitedOn, visitedAt, visitMarker, personId, personName, tapeUnit, places }) => ({
+    tapeSheets: here(observed.tapeSheets).map(({ id, visitId, visitedOn, visitedAt, visitMarker, personId, personName, tapeUnit, laid, places }) => ({
       id, visitId, visitedOn, visitedAt, visitMarker, personId, personName, tapeUnit,
-      readFrom: 'start', zeroAt: 'mark', segmentStarts: [],
-      places: places.map(({ typed, kind, marker, leafStage }) => ({ typed, kind, marker, leafStage })),
+      readFrom: laid.readFrom, zeroAt: laid.zeroAt, segmentStarts: [...laid.segmentStarts],
+      places: [...places].sort((a, b) => a.order - b.order).map(({ typed, kind, marker, leafStage }) => ({ typed, kind, marker, leafStage })),
     })),
     depths: [],
     cover: here(observed.residueReadings).map(({ id, readOn, marksRead, marksCovered }) => ({ id, readOn, marksRead, marksCovered })),

@@ -32,8 +32,9 @@ export function coreSample(
       plantsDoubtful: count.doubtful,
     })),
     tape: tapeSheet
-      ? tapeSheet.places.map(({ positionInches, kind, firstSeen }): TapePlace => ({
+      ? tapeSheet.places.map(({ positionInches, segment, kind, firstSeen }): TapePlace => ({
           positionInches,
+          segment,
           kind,
           firstSeen: firstSeen && {
             afterDays: firstSeen.after && daysOf(firstSeen.after),

@@ -18,6 +18,7 @@ export function drawnPlants(sample: RowSample): DrawnPlant[] {
   );
   return places.map((place, index) => ({
     positionInches: place.positionInches,
+    segment: place.segment ?? 0,
     days: cameUpDays(place),
     late: delays[index]?.lateClass === 'late' || delays[index]?.lateClass === 'very-late',
     double: place.kind === 'double',

@@ -53,7 +53,7 @@ export function scoredRow(
           readOn: sheet.visitedOn,
           personName: sheet.personName,
           tapeUnit: sheet.tapeUnit,
-          places: sheet.places.map(({ typed, kind }) => ({ typed, kind })),
+          places: [...sheet.places].sort((a, b) => a.order - b.order).map(({ typed, kind }) => ({ typed, kind })),
           plants: sample ? drawnPlants(sample) : [],
         }
       : null,

@@ -1,6 +1,6 @@
 import 'server-only';
 import type { OperationHandler } from '../../operations/define-operation';
-import { recordTapeSheet } from './record-tape-sheet';
+import { recordLaidTapeSheet, recordTapeSheet } from './record-tape-sheet';
 
 /** The writes of this noun, by kind and version. A version that has landed stays. */
-export const tapeSheetsOperations: readonly OperationHandler[] = [recordTapeSheet];
+export const tapeSheetsOperations: readonly OperationHandler[] = [recordTapeSheet, recordLaidTapeSheet];
