@@ -3,7 +3,7 @@ import type { Role } from '@/lib/schemas/vocabulary';
 /** Everything that may be asked of a person's role within their own organisation. */
 export const actions = [
   'farms.read', 'farms.write', 'plantings.read', 'plantings.write', 'settings.read', 'settings.write',
-  'trials.read', 'trials.write', 'observations.read', 'observations.write', 'imports.write',
+  'trials.read', 'trials.write', 'observations.read', 'observations.write', 'imports.write', 'kept-files.read-in',
   'scores.read', 'comparison.read', 'replant.read', 'replant.write', 'decision.sign', 'decision.read',
   'people.read', 'people.write', 'changes.read',
 ] as const;

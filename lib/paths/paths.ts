@@ -13,6 +13,7 @@ export const paths = {
   field: (org: string, field: string) => `/o/${org}/fields/${field}`,
   settings: (org: string) => `/o/${org}/settings`,
   people: (org: string) => `/o/${org}/people`,
+  keptFile: (org: string) => `/o/${org}/kept-file`,
   changes: (org: string) => `/o/${org}/changes`,
   plan: (org: string, planting: string) => `/o/${org}/plantings/${planting}/plan`,
   count: (org: string, planting: string) => `/o/${org}/plantings/${planting}/count`,

@@ -10,6 +10,7 @@ export const changeTexts = {
   losingTitle: 'Edits that lost',
   losingLead: 'These came on an older version than the one that stood. They were kept as typed and never applied; make them again where they should hold.',
   content: 'What was sent',
+  readInBy: (name: string) => `read in by ${name} from a file the phone saved`,
   kinds: {
     'person.invite': 'invited somebody',
     'person.joined': 'came in by a link',
@@ -49,6 +50,7 @@ export const changeTexts = {
     'entry-exception.record': 'recorded an entry under an exception',
     'spot-count.start': 'started a spot count',
     'spot-place.add': 'added a place to a spot count',
+    'photo.record': 'took a photo',
     'observation.withdraw': 'took an observation back',
     'import.take': 'took a file in',
     'replant-sheet.save': 'saved the sum behind keep or replant',

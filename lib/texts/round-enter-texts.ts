@@ -25,7 +25,7 @@ export const enterTexts = {
   spraying: 'Record a spraying',
   sprayingHow: 'From a sign at the field or from whoever sprayed. It keeps people out until the interval ends.',
   product: 'Product',
-  endedOn: 'Application ended on',
+  endedOn: 'It ended on',
   endedAt: 'at',
   hours: 'Restricted-entry interval, hours',
   hoursHint: 'As the label says.',

@@ -26,7 +26,7 @@ export const roundTexts = {
   signOut: 'Sign out',
   status: {
     label: 'What is kept on this phone',
-    allSent: 'Everything is sent',
+    allSent: 'All sent',
     sending: (count: number) => `Sending ${count}`,
     kept: (count: number) => `${count} kept on this phone`,
     oldest: (age: string) => `oldest ${age}`,
@@ -96,7 +96,7 @@ export const roundCountTexts = {
   yesterday: (plants: number, doubtful: number) => `Yesterday: ${plants} up${doubtful > 0 ? `, ${doubtful} doubtful` : ''}`,
   today: (time: string | null, plants: number) => `Today${time ? ` at ${time}` : ''}: ${plants} up`,
   never: 'No count of this row yet',
-  seeds: (seeds: number) => `about ${countText(seeds, 'seed')} in this length`,
+  seeds: (seeds: number) => `About ${countText(seeds, 'seed')} in this length`,
   asSum: (before: number, plants: number) => `${before} before, ${before + plants} up now`,
   ended: 'Counting can end here: nothing new at the last two visits.',
   oneWithout: 'Nothing new at the last visit. One more like it and counting can end.',

@@ -2,6 +2,7 @@ import type { DecisionChoice } from '@/lib/schemas/vocabulary';
 
 /** The words of the page one comes to first. */
 export const startTexts = {
+  round: 'Open the round',
   noFarmTitle: 'Begin with a farm',
   noFarmHint: 'Add the first farm, then its fields and what was planted in them.',
   noFarmAction: 'To farms and fields',

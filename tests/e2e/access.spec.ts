@@ -1,7 +1,7 @@
 import { readdirSync } from 'node:fs';
 import { expect, test } from '@playwright/test';
 import { demoId } from '@/db/demo/demo-id';
-import { insiders, pagesOfNobody, pagesOfOrganisation, readsOfOrganisation, routesOfNobody, uploadRoute, type Insider } from './support/access-table';
+import { insiders, pagesOfNobody, pagesOfOrganisation, readsOfOrganisation, keptFileRoute, routesOfNobody, uploadRoute, type Insider } from './support/access-table';
 import { filledIn, inTurn, readable, readQuestions, signInInsiders, writeQuestions, type Question } from './support/ask';
 import { organisations, things } from './support/demo-things';
 import { discoveredPages, discoveredRoutes } from './support/discovered-routes';
@@ -34,7 +34,7 @@ async function surprises(who: string, visitor: Visitor, list: readonly Question[
 
 test('every page and every route of the application stands in the table, and nothing else does', () => {
   expect(discoveredPages()).toEqual([...Object.keys(pagesOfOrganisation), ...Object.keys(pagesOfNobody)].sort());
-  const listed = [...Object.keys(readsOfOrganisation), ...Object.keys(routesOfNobody), ...Object.keys(writesOfOrganisation), batchRoute, uploadRoute];
+  const listed = [...Object.keys(readsOfOrganisation), ...Object.keys(routesOfNobody), ...Object.keys(writesOfOrganisation), batchRoute, uploadRoute, keptFileRoute];
   expect(discoveredRoutes()).toEqual(listed.sort());
 });
 
@@ -105,6 +105,22 @@ test('the batch is for members only, and answers each entry for itself', async (
   }
   expect((await signedOut.post(path, { operations: [{}] })).status).toBe(401);
   expect((await outsider.post(path, { operations: [{}] })).status).toBe(404);
+});
+
+test('a file that a phone saved is read in by owner and agronomist, as its author, and nobody signs for somebody else', async () => {
+  const path = (org: string) => `/api/o/${org}/kept-files`;
+  const entry = (kind: string) => ({
+    operationId: crypto.randomUUID(), organisationId: organisations.own, personId: people.scout.personId, deviceId: crypto.randomUUID(), deviceSequence: 1, kind, version: 1, thingId: crypto.randomUUID(),
+    body: {}, occurred: { date: '2026-05-26', time: null, zone: 'America/Chicago' },
+  });
+  for (const insider of ['scout', 'grower'] as const) expect((await people[insider].post(path(organisations.own), { operations: [entry('note.record')] })).status).toBe(403);
+  for (const insider of ['owner', 'agronomist'] as const) {
+    const reply = await people[insider].post(path(organisations.own), { operations: [entry('note.record'), entry('decision.sign'), entry('farm.add')] });
+    const { answers } = JSON.parse(reply.text) as { answers: { code: string }[] };
+    expect([reply.status, ...answers.map((answer) => answer.code).sort()]).toEqual([200, 'bad-input', 'unknown-kind', 'unknown-kind']);
+    for (const org of [organisations.another, organisations.never]) expect((await people[insider].post(path(org), { operations: [entry('note.record')] })).status).toBe(404);
+  }
+  expect((await signedOut.post(path(organisations.own), { operations: [entry('note.record')] })).status).toBe(401);
 });
 
 test('a photo is taken in only from a member, of a photo that was recorded, and as a picture from our own pages', async () => {

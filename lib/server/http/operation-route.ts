@@ -7,6 +7,8 @@ import { batchSchema, type Answer } from '@/lib/schemas/operation';
 import { inOrganisation } from '@/db/connection';
 import { wallClock } from '../clock';
 import { database } from '../database';
+import { can } from '@/lib/access/can';
+import { withActor } from '../operations/actor-context';
 import { findMembership } from '../data/membership';
 import { applyOperation, operationIdIn, type HandlerOf, type Sender } from '../operations/apply-operation';
 import type { OperationHandler } from '../operations/define-operation';
@@ -54,6 +56,36 @@ export function batchRoute(handlerOf: HandlerOf) {
       return respond({ answers: await answersTo(inDeviceOrder(operations), apply) });
     });
 }
+
+/**
+ * A file that a phone saved, read in at the office: each entry is carried out as its author's, with who brought it in
+ * beside it in the audit. Only what is recorded in the field may come this way: nobody signs for somebody else.
+ */
+export function keptFileRoute(handlerOf: HandlerOf) {
+  const fieldHandlerOf: HandlerOf = (kind, version) => {
+    const handler = handlerOf(kind, version);
+    return handler?.action === 'observations.write' ? handler : undefined;
+  };
+  return (request: Request, context: Context) =>
+    answering(async () => {
+      const { organisationId, sender } = await senderOf(request, context);
+      await withActor(database(), { organisationId, ...sender }, async ({ actor }) => {
+        if (!can(actor, 'kept-files.read-in')) throw new AppError('forbidden');
+      });
+      const { operations } = parse(batchSchema, await readJson(request));
+      const apply = (sent: unknown) => {
+        const author = authorIn(sent);
+        const asAuthor: Sender = { ...sender, personId: author ?? sender.personId, originKind: 'phone', readInBy: sender.personId };
+        return applyOperation(database(), { organisationId, sender: asAuthor, handlerOf: fieldHandlerOf }, sent);
+      };
+      return respond({ answers: await answersTo(inDeviceOrder(operations), apply) });
+    });
+}
+
+const authorIn = (sent: unknown): string | undefined => {
+  const author = sent !== null && typeof sent === 'object' && 'personId' in sent ? z.uuid().safeParse(sent.personId) : undefined;
+  return author?.success ? author.data : undefined;
+};
 
 /**
  * Carries a batch out one by one. After two in a row that the database did not answer, the rest is told so without waiting

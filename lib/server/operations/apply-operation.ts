@@ -15,7 +15,14 @@ import { contentHash } from './content-hash';
 import type { ReadContext } from './context';
 import type { OperationHandler } from './define-operation';
 
-export type Sender = { personId: string; now: () => Date; originKind: OriginKind };
+export type Sender = {
+  /** The author, as whom everything is done. */
+  personId: string;
+  now: () => Date;
+  originKind: OriginKind;
+  /** Who brought it in at the office out of a file that the author's phone saved; left out where the phone sent it. */
+  readInBy?: string;
+};
 export type HandlerOf = (kind: string, version: number) => OperationHandler | undefined;
 
 type Asked = { organisationId: string; sender: Sender; handlerOf: HandlerOf };
@@ -65,7 +72,7 @@ function carryOut(db: Database, asked: Asked, operation: OperationEnvelope): Pro
       { ...context, operation: await onItsBase(context, operation), originKind: asked.sender.originKind },
       body.data,
     );
-    await insertAuditEvent(context.tx, { operation });
+    await insertAuditEvent(context.tx, { operation, readInBy: asked.sender.readInBy ?? null });
     const answer: Answer = { operationId: operation.operationId, outcome: 'applied', thingId: operation.thingId, ...written };
     await answerReceipt(context.tx, { organisationId: asked.organisationId, operationId: operation.operationId, answer });
     return revealed(handler, operation, answer);

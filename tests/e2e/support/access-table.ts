@@ -28,6 +28,7 @@ export const pagesOfOrganisation: Record<string, PageRow> = {
   '/o/[org]':                                            org(anyoneInside,   anyoneInside, anyoneInside,   anyoneInside),
   '/o/[org]/farms':                                      org(anyoneInside,   anyoneInside, anyoneInside,   anyoneInside),
   '/o/[org]/people':                                     org(closedAnywhere, anyoneInside, closedAnywhere, anyoneInside),
+  '/o/[org]/kept-file':                                  org(closedAnywhere, anyoneInside, closedAnywhere, anyoneInside),
   '/o/[org]/changes':                                    org(closedAnywhere, anyoneInside, closedAnywhere, anyoneInside),
   '/o/[org]/settings':                                   org(closedAnywhere, anyoneInside, closedAnywhere, anyoneInside),
   '/o/[org]/farms/[farm]':                               of('farm',      ownFarms, everyFarm, ownFarms, everyFarm),
@@ -76,6 +77,9 @@ export const routesOfNobody: Record<string, { signedOut: number; signedIn: numbe
   'POST /api/password': { signedOut: 401, signedIn: 422 },
   'POST /api/preferences': { signedOut: 401, signedIn: 422 },
 };
+
+/** What a phone saved to a file, read in at the office by owner or agronomist as its author's. */
+export const keptFileRoute = 'POST /api/o/[org]/kept-files';
 
 /** Raw uploads: the one route that takes something other than JSON. */
 export const uploadRoute = 'PUT /api/o/[org]/photos/[photo]';

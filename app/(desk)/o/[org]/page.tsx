@@ -1,6 +1,7 @@
 import { PageHead } from '@/components/shell/page-head';
 import { PlantingList } from '@/components/start/planting-list';
 import { RowsToCount } from '@/components/start/rows-to-count';
+import { RoundLinks } from '@/components/start/round-links';
 import { startHeadline } from '@/components/start/start-headline';
 import { EmptyState } from '@/components/ui/empty-state';
 import { LinkButton } from '@/components/ui/link-button';
@@ -24,7 +25,7 @@ export default async function OrganisationPage({ params }: { params: Promise<{ o
         <PageHead title={organisation.name} />
         <EmptyState
           title={begun ? startTexts.noPlantingTitle : startTexts.noFarmTitle}
-          action={mayWrite ? <LinkButton href={paths.farms(org)}>{startTexts.noFarmAction}</LinkButton> : null}
+          action={mayWrite ? <LinkButton href={paths.farms(org)}>{startTexts.noFarmAction}</LinkButton> : <RoundLinks org={org} actor={actor} />}
         >
           {mayWrite ? (begun ? startTexts.noPlantingHint : startTexts.noFarmHint) : startTexts.noFarmSeen}
         </EmptyState>
@@ -39,6 +40,7 @@ export default async function OrganisationPage({ params }: { params: Promise<{ o
         kicker={organisation.name}
         title={startHeadline(actor.role, plantings)}
         sub={actor.role === 'scout' ? startTexts.scoutLead : undefined}
+        actions={<RoundLinks org={org} actor={actor} />}
       />
       {actor.role === 'scout' ? (
         <RowsToCount org={org} plantings={season} />

@@ -14,7 +14,7 @@ export async function readChanges({ tx, actor }: ReadContext, { before }: { befo
   const shown = events.slice(0, changesAPage);
   return {
     brokenAt: (await findBrokenSeal(tx, organisationId)) ?? null,
-    changes: shown.map(({ id, kind, body, deviceId, recordedAt, personName }) => ({ id, kind, body, deviceId, recordedAt, personName })),
+    changes: shown.map(({ id, kind, body, deviceId, recordedAt, personName, readInByName }) => ({ id, kind, body, deviceId, recordedAt, personName, readInByName })),
     older: events.length > changesAPage ? (shown.at(-1)?.recordedAt ?? null) : null,
     losingEdits: losing.map(({ operationId, kind, body, receivedAt, personName }) => ({ operationId, kind, body, receivedAt, personName })),
   };
