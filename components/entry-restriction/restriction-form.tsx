@@ -47,7 +47,7 @@ export function RestrictionForm({ fieldId, today, corrects, onDone }: Restrictio
         {(wiring) => <TextInput {...wiring} maxLength={80} value={draft.product} onChange={(event) => change({ product: event.target.value })} />}
       </Field>
       <div className="grid grid-cols-[3fr_2fr] items-start gap-3">
-        <Field label={texts.endedOn} id={fieldIdOf('endedOn')} error={fieldError(error, 'endedOn')} hint={texts.endedHint}>
+        <Field label={texts.endedOn} id={fieldIdOf('endedOn')} error={fieldError(error, 'endedOn')}>
           {(wiring) => <DateInput {...wiring} value={draft.endedOn} onChange={(event) => change({ endedOn: event.target.value })} />}
         </Field>
         <Field label={texts.endedAt} id={fieldIdOf('endedAt')} error={fieldError(error, 'endedAt')}>

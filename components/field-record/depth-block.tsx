@@ -19,7 +19,7 @@ export function DepthBlock({ depths, plantedOn, mayWrite }: { depths: readonly D
         return (
           <RecordLine
             key={reading.id}
-            detail={[texts.depthsTyped(reading.typed.join(', ')), ...recordDay(plantedOn, { on: reading.visitedOn, personName: reading.personName })]}
+            detail={[texts.depthsTyped(reading.typed.map((typed) => typed.replaceAll(' ', '\u00A0')).join(', ')), ...recordDay(plantedOn, { on: reading.visitedOn, personName: reading.personName })]}
             takeBack={mayWrite ? { targetKind: 'depth-reading', targetId: reading.id, what: texts.depthOf(dateText(reading.visitedOn)) } : undefined}
           >
             {texts.depthMean(inUnit(reading.mean), inUnit(reading.shallowest), inUnit(reading.deepest), countText(reading.plants, 'plant'))}

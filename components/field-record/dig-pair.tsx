@@ -9,8 +9,8 @@ import type { DigRecord } from './record-types';
 type Line = { name: string; say: (dig: DigRecord) => string | null };
 
 const lines: readonly Line[] = [
-  { name: texts.found, say: (dig) => dig.found.map((finding) => digTexts.findings[finding].found).join('; ') || null },
-  { name: texts.pointsTo, say: (dig) => dig.found.map((finding) => digTexts.findings[finding].pointsTo).join('; ') || null },
+  { name: texts.found, say: (dig) => dig.found.map((finding) => digTexts.findings[finding].found).join('\n') || null },
+  { name: texts.pointsTo, say: (dig) => dig.found.map((finding) => digTexts.findings[finding].pointsTo).join('\n') || null },
   { name: texts.depth, say: (dig) => (dig.depth ? readingText(dig.depth) : null) },
   { name: texts.residue, say: (dig) => (dig.residue ? texts.residues[dig.residue] : null) },
   { name: texts.moisture, say: (dig) => (dig.moisture ? texts.moistures[dig.moisture] : null) },
@@ -25,10 +25,10 @@ export function DigPair({ digs, plantedOn, mayWrite }: { digs: readonly DigRecor
   return (
     <li className="border-t border-rule py-2">
       <div className="overflow-x-auto">
-        <table className="w-full max-w-reading border-collapse text-left text-15">
+        <table className="w-full max-w-reading table-fixed border-collapse text-left text-15">
           <thead>
             <tr>
-              <td className="w-32" />
+              <td className="w-24 sm:w-32" />
               {digs.map((dig) => (
                 <th key={dig.id} scope="col" className="py-1 pr-4 align-bottom font-bold">
                   {digTexts.plants[dig.plant]}
@@ -50,16 +50,19 @@ export function DigPair({ digs, plantedOn, mayWrite }: { digs: readonly DigRecor
                 ))}
               </tr>
             ))}
+            {mayWrite ? (
+              <tr className="border-t border-rule">
+                <td />
+                {digs.map((dig) => (
+                  <td key={dig.id} className="align-top">
+                    <TakeBack targetKind="dig" targetId={dig.id} what={texts.digOf(digTexts.plants[dig.plant].toLowerCase(), dateText(dig.visitedOn))} />
+                  </td>
+                ))}
+              </tr>
+            ) : null}
           </tbody>
         </table>
       </div>
-      {mayWrite ? (
-        <div className="flex flex-wrap gap-x-2">
-          {digs.map((dig) => (
-            <TakeBack key={dig.id} targetKind="dig" targetId={dig.id} what={texts.digOf(digTexts.plants[dig.plant].toLowerCase(), dateText(dig.visitedOn))} />
-          ))}
-        </div>
-      ) : null}
     </li>
   );
 }

@@ -28,7 +28,7 @@ export function PlantingRecords({ org, plantingId, records }: PlantingRecordsPro
       >
         {markersOut.map(({ id, label, left }) => (
           <li key={id} className="border-t border-rule">
-            <Link className="flex min-h-press items-center gap-x-4" href={paths.rowSample(org, plantingId, id)}>
+            <Link className="flex min-h-press items-center gap-x-4 underline underline-offset-4" href={paths.rowSample(org, plantingId, id)}>
               {label}: {texts.markersOutOf(String(left))}
             </Link>
           </li>

@@ -15,7 +15,7 @@ export function RecordLine({ children, detail, takeBack }: RecordLineProps) {
   return (
     <li className="flex flex-wrap items-center justify-between gap-x-4 border-t border-rule py-2">
       <div className="min-w-0 flex-1 basis-64">
-        <div className="text-18 break-words whitespace-pre-line">{children}</div>
+        <div className="text-18 break-words whitespace-pre-line first-letter:uppercase">{children}</div>
         <p className="text-15">{detail.join(', ')}</p>
       </div>
       {takeBack ? <TakeBack {...takeBack} /> : null}

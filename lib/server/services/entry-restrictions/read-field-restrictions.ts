@@ -7,7 +7,7 @@ import { readRestrictions, type FieldRestriction } from './read-restrictions';
 
 const secondsPerHour = 3_600;
 
-/** The applications in a field, the newest first: until when each keeps people out, and who went in under which exception. */
+/** The applications in a field, the one that keeps people out longest first: until when each keeps people out, and who went in under which exception. */
 export async function readFieldRestrictions(context: ReadContext, fieldId: string) {
   const { tx, actor, clock, organisation } = context;
   const { field, farm } = await findSeenField(context, fieldId);
@@ -20,7 +20,7 @@ export async function readFieldRestrictions(context: ReadContext, fieldId: strin
   return {
     today,
     mayWrite: can(actor, 'observations.write'),
-    restrictions: restrictions.map((restriction) => shown(restriction, now)).reverse(),
+    restrictions: restrictions.map((restriction) => shown(restriction, now)).sort((a, b) => (`${a.untilOn} ${a.untilAt}` < `${b.untilOn} ${b.untilAt}` ? 1 : -1)),
   };
 }
 export type FieldRestrictions = Awaited<ReturnType<typeof readFieldRestrictions>>;
