@@ -6,22 +6,24 @@ import { digTexts } from '@/lib/texts/round-dig-texts';
 import { recordDay } from './record-day';
 import type { DigRecord } from './record-types';
 
-type Line = { name: string; say: (dig: DigRecord) => string | null };
+type Line = { name: string; say: (dig: DigRecord) => readonly string[] };
+
+const said = (...words: (string | null)[]) => words.filter((word) => word !== null && word !== '') as string[];
 
 const lines: readonly Line[] = [
-  { name: texts.found, say: (dig) => dig.found.map((finding) => digTexts.findings[finding].found).join('\n') || null },
-  { name: texts.pointsTo, say: (dig) => dig.found.map((finding) => digTexts.findings[finding].pointsTo).join('\n') || null },
-  { name: texts.depth, say: (dig) => (dig.depth ? readingText(dig.depth) : null) },
-  { name: texts.residue, say: (dig) => (dig.residue ? texts.residues[dig.residue] : null) },
-  { name: texts.moisture, say: (dig) => (dig.moisture ? texts.moistures[dig.moisture] : null) },
-  { name: texts.crust, say: (dig) => (dig.crust ? texts.crusts[dig.crust] : null) },
-  { name: texts.place, say: (dig) => [dig.placeTyped, texts.digWhere[dig.dugIn]].filter(Boolean).join(', ') },
-  { name: texts.note, say: (dig) => dig.note },
+  { name: texts.found, say: (dig) => dig.found.map((finding) => digTexts.findings[finding].found) },
+  { name: texts.pointsTo, say: (dig) => dig.found.map((finding) => digTexts.findings[finding].pointsTo) },
+  { name: texts.depth, say: (dig) => said(dig.depth && readingText(dig.depth)) },
+  { name: texts.residue, say: (dig) => said(dig.residue && texts.residues[dig.residue]) },
+  { name: texts.moisture, say: (dig) => said(dig.moisture && texts.moistures[dig.moisture]) },
+  { name: texts.crust, say: (dig) => said(dig.crust && texts.crusts[dig.crust]) },
+  { name: texts.place, say: (dig) => said(dig.placeTyped, texts.digWhere[dig.dugIn]) },
+  { name: texts.note, say: (dig) => said(dig.note) },
 ];
 
 /** A late plant beside its on-time neighbor, line by line: what differs between them is what tells. */
 export function DigPair({ digs, plantedOn, mayWrite }: { digs: readonly DigRecord[]; plantedOn: string; mayWrite: boolean }) {
-  const said = lines.filter(({ say }) => digs.some((dig) => say(dig) !== null));
+  const shown = lines.filter(({ say }) => digs.some((dig) => say(dig).length > 0));
   return (
     <li className="border-t border-rule py-2">
       <div className="overflow-x-auto">
@@ -38,14 +40,18 @@ export function DigPair({ digs, plantedOn, mayWrite }: { digs: readonly DigRecor
             </tr>
           </thead>
           <tbody>
-            {said.map(({ name, say }) => (
+            {shown.map(({ name, say }) => (
               <tr key={name} className="border-t border-rule">
                 <th scope="row" className="py-1 pr-4 align-top font-normal">
                   {name}
                 </th>
                 {digs.map((dig) => (
-                  <td key={dig.id} className="py-1 pr-4 align-top whitespace-pre-line">
-                    {say(dig) ?? texts.notLooked}
+                  <td key={dig.id} className="py-1 pr-4 align-top break-words whitespace-pre-line">
+                    {(say(dig).length > 0 ? say(dig) : [texts.notLooked]).map((line) => (
+                      <span key={line} className="block first-letter:uppercase">
+                        {line}
+                      </span>
+                    ))}
                   </td>
                 ))}
               </tr>

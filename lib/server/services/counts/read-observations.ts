@@ -10,6 +10,7 @@ import { listCounts } from '../../data/count';
 import { listResidueReadings } from '../../data/residue-reading';
 import { listTapeSheets, type TapeSheetRow } from '../../data/tape-sheet';
 import { listWithdrawnIds } from '../../data/withdrawal';
+import { standingRecords } from '../field-records/standing-records';
 import { groupByRowSample } from './group-by-row-sample';
 import type { ObservedCount } from './observed-count';
 
@@ -56,12 +57,7 @@ export type Observations = { counts: ObservedCount[]; tapeSheets: ObservedTapeSh
 /** What stands of everything observed in a planting, or at one of its rows: corrections in the place of what they replaced, withdrawn ones left out. */
 export async function readObservations(tx: Transaction, params: { organisationId: string; plantingId: string; rowSampleId?: string }): Promise<Observations> {
   const withdrawn = await listWithdrawnIds(tx, params);
-  const standing = <Row extends { id: string; importId: string | null; replacesId?: string | null }>(rows: readonly Row[]) => {
-    const present = rows.filter((row) => !withdrawn.has(row.id) && !(row.importId && withdrawn.has(row.importId)));
-    // A correction that was itself taken back no longer replaces anything.
-    const replaced = new Set(present.map((row) => row.replacesId));
-    return inFirstPlace(rows, present.filter((row) => !replaced.has(row.id)));
-  };
+  const standing = <Row extends { id: string; importId: string | null; replacesId?: string | null }>(rows: readonly Row[]) => standingRecords(rows, withdrawn);
   const countRows = standing(await listCounts(tx, params));
   const counts = [...groupByRowSample(countRows).values()].flatMap((rows) =>
     resolveCounts(rows).map(({ replacesId: _replaces, importId: _import, ...count }) => count),
@@ -73,13 +69,6 @@ export async function readObservations(tx: Transaction, params: { organisationId
   );
   const residueReadings = standing(await listResidueReadings(tx, params)).map(({ importId: _import, ...reading }) => reading);
   return { counts, tapeSheets, residueReadings };
-}
-
-/** A correction takes the place of what it corrects in the order recorded, so that the same one of two people's counts stays in use. */
-function inFirstPlace<Row extends { id: string; replacesId?: string | null }>(asRecorded: readonly Row[], standing: readonly Row[]): Row[] {
-  const place = new Map<string, number>();
-  asRecorded.forEach((row, index) => place.set(row.id, (row.replacesId ? place.get(row.replacesId) : undefined) ?? index));
-  return [...standing].sort((a, b) => (place.get(a.id) ?? 0) - (place.get(b.id) ?? 0));
 }
 
 function observedTapeSheet(row: TapeSheetRow, used: boolean, counts: readonly ObservedCount[]): ObservedTapeSheet {

@@ -14,7 +14,7 @@ import { readObservations } from '../counts/read-observations';
 import { readPlacedRows } from '../counts/row-places';
 import { readRestrictions, type FieldRestriction } from '../entry-restrictions/read-restrictions';
 import { readFieldRecords } from '../field-records/read-field-records';
-import { roundPlantingRecords, roundRowRecords } from './round-records';
+import { roundPlantingRecords } from './round-records';
 import { roundRow } from './round-row';
 
 /** A stand is counted within weeks; what was planted longer ago than this nobody walks to any more. */
@@ -75,6 +75,6 @@ async function roundPlanting(context: ReadContext, planting: PlantingRow): Promi
     hasTrial: trial !== undefined,
     strips: strips.map(({ id, number, blockNumber, asPlanted }) => ({ id, number, blockNumber, lost: asPlanted !== null && asPlanted.settingId === null })),
     ...roundPlantingRecords(records),
-    rows: placed.map((each) => ({ ...roundRow(each, rowSampleFacts(planting, each.sample), observed), ...roundRowRecords(each.sample.id, records) })),
+    rows: placed.map((each) => roundRow(each, rowSampleFacts(planting, each.sample), observed, records)),
   };
 }

@@ -2,9 +2,11 @@ import type { RoundRow } from '@/lib/schemas/round-day';
 import type { rowSampleFacts } from '../counts/count-facts';
 import type { Observations } from '../counts/read-observations';
 import type { PlacedRow } from '../counts/row-places';
+import type { FieldRecords } from '../field-records/read-field-records';
+import { roundRowRecords } from './round-records';
 
 /** One row sample as the phone takes it along, written out field by field. */
-export function roundRow({ sample, place }: PlacedRow, facts: ReturnType<typeof rowSampleFacts>, observed: Observations): RoundRow {
+export function roundRow({ sample, place }: PlacedRow, facts: ReturnType<typeof rowSampleFacts>, observed: Observations, records: FieldRecords): RoundRow {
   const here = <Each extends { rowSampleId: string }>(rows: readonly Each[]) => rows.filter((each) => each.rowSampleId === sample.id);
   return {
     id: sample.id,
@@ -26,10 +28,7 @@ export function roundRow({ sample, place }: PlacedRow, facts: ReturnType<typeof 
       readFrom: laid.readFrom, zeroAt: laid.zeroAt, segmentStarts: [...laid.segmentStarts],
       places: [...places].sort((a, b) => a.order - b.order).map(({ typed, kind, marker, leafStage }) => ({ typed, kind, marker, leafStage })),
     })),
-    depths: [],
     cover: here(observed.residueReadings).map(({ id, readOn, marksRead, marksCovered }) => ({ id, readOn, marksRead, marksCovered })),
-    digs: [],
-    crusts: [],
-    markers: [],
+    ...roundRowRecords(sample.id, records),
   };
 }
