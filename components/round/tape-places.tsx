@@ -1,36 +1,54 @@
 'use client';
 
 import { useEffect, useRef } from 'react';
-import { segmentsRead } from '@/lib/schemas/tape-laid';
-import type { TapeDraft, TapePress } from '@/lib/client/round/tape-draft';
+import type { DraftPlace, TapeDraft, TapePress } from '@/lib/client/round/tape-draft';
 import { tapeTexts } from '@/lib/texts/round-tape-texts';
+import { Button } from '@/components/ui/button';
 
-/** The places read so far; pressed, one is changed, taken out, or the tape is cut before it. */
-export function TapePlaces({ draft, onPress }: { draft: TapeDraft; onPress: (pressed: TapePress) => void }) {
+type TapePlacesProps = { draft: TapeDraft; wrong: ReadonlySet<number>; onPress: (pressed: TapePress) => void };
+
+/** Every place read so far, the newest on top as the row goes away from the scout. Pressed, one is changed, taken out, or another put before it. */
+export function TapePlaces({ draft, wrong, onPress }: TapePlacesProps) {
+  const { places, at, toGo } = draft;
+  const chosen = at.put === 'end' ? null : at.index;
   const list = useRef<HTMLOListElement>(null);
-  const { places, changing } = draft;
-  const segments = segmentsRead(places.length, draft.segmentStarts);
   useEffect(() => {
-    // The newest stays in sight.
-    if (changing === null) list.current?.scrollTo(0, list.current.scrollHeight);
-  }, [places.length, changing]);
-  if (places.length === 0) return <p className="grow px-3 pt-2 text-18">{tapeTexts.none}</p>;
+    const shown = list.current?.querySelector('[data-chosen]');
+    // The list alone scrolls: the keys stay where the thumb expects them.
+    if (shown && list.current) list.current.scrollTop = (shown as HTMLElement).offsetTop - list.current.clientHeight / 3;
+    else list.current?.scrollTo(0, 0);
+  }, [places.length, chosen]);
+  if (places.length === 0) return <p className="grow py-2 text-18">{tapeTexts.empty}</p>;
+  const rows = places.map((place, index) => ({ place, index })).reverse();
   return (
-    <ol ref={list} aria-label={tapeTexts.places} className="flex min-h-16 grow flex-wrap content-start gap-1 overflow-y-auto px-3 py-1">
-      {places.map((place, index) => (
-        <li key={index} className={index > 0 && segments[index] !== segments[index - 1] ? 'border-l-4 border-dashed border-ink pl-1' : ''}>
-          <button
-            type="button"
-            aria-label={tapeTexts.place(place.typed, place.kind, place.marker)}
-            aria-pressed={changing === index}
-            onClick={() => onPress({ press: 'select', index })}
-            className={`flex min-h-press min-w-press cursor-pointer flex-col items-center justify-center rounded-press border px-2 font-mono text-18 leading-none font-bold ${changing === index ? 'border-ink bg-ink text-paper' : 'border-rule'} ${place.kind === 'missing' ? 'line-through' : ''}`}
-          >
-            {place.typed}
-            <span className="text-13 font-normal">{[place.kind === 'plant' ? null : tapeTexts.kinds[place.kind].toLowerCase(), place.marker].filter(Boolean).join(' ') || '\u00a0'}</span>
+    <ol ref={list} reversed aria-label={tapeTexts.places} className="relative min-h-0 min-w-0 grow overflow-y-auto overscroll-contain">
+      {rows.map(({ place, index }) => (
+        <li key={index} data-chosen={index === chosen ? '' : undefined} className={`border-b ${index > 0 && place.cutBefore ? 'border-b-4 border-dashed border-ink' : 'border-rule'} ${index === chosen ? 'bg-bone' : ''}`}>
+          <button type="button" aria-pressed={at.put === 'change' && at.index === index} onClick={() => onPress({ press: 'select', index })} className="flex min-h-press w-full cursor-pointer touch-manipulation items-baseline gap-2 px-1 py-3 text-left">
+            <span className="w-6 shrink-0 text-right font-mono text-13">{index + 1}</span>
+            <span className={`shrink-0 font-mono text-21 leading-none ${index >= places.length - toGo ? '' : 'font-bold'}`}>{place.typed}</span>
+            <span className="min-w-0 text-15 leading-tight">
+              {notesOf(place)}
+              {wrong.has(index) ? <span className="font-bold text-flag-text"> {tapeTexts.wrong}</span> : null}
+            </span>
           </button>
+          {at.put === 'change' && at.index === index ? (
+            <div className="grid grid-cols-2 gap-1.5 px-1 pb-1.5">
+              <Button look="secondary" onClick={() => onPress({ press: 'remove' })}>
+                {tapeTexts.remove}
+              </Button>
+              <Button look="secondary" onClick={() => onPress({ press: 'insert' })}>
+                {tapeTexts.insert(place.typed)}
+              </Button>
+            </div>
+          ) : null}
+          {index > 0 && place.cutBefore ? <p className="px-1 pb-1 text-13 leading-tight">{tapeTexts.laidAnew}</p> : null}
         </li>
       ))}
     </ol>
   );
+}
+
+function notesOf({ kind, marker, leafStage }: DraftPlace): string {
+  return [kind === 'plant' ? null : tapeTexts.noted[kind].toLowerCase(), marker, leafStage === null ? null : tapeTexts.leaf(leafStage)].filter(Boolean).join(', ');
 }
