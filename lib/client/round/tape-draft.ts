@@ -29,6 +29,10 @@ type Sheet = TapeHand & {
 
 type Past = { from: number; removed: readonly DraftPlace[]; added: number; rest: Omit<Sheet, 'places'> };
 
+const restOf = ({ unit, step, zeroAt, readFrom, current, at, fresh, toGo, replacesId, surelyInches, refused }: Sheet): Past['rest'] => ({
+  unit, step, zeroAt, readFrom, current, at, fresh, toGo, replacesId, surelyInches, refused,
+});
+
 /** A tape sheet as it is being read, with what the last presses changed, so that each is undone by one. Plain data, as it is stored. */
 export type TapeDraft = Sheet & { past: readonly Past[] };
 
@@ -86,14 +90,13 @@ export function afterTapePress(draft: TapeDraft, pressed: TapePress): TapeDraft 
 
 /** Kept as the difference alone: a whole sheet for each press would make every press slower than the one before. */
 function whatChanged(before: TapeDraft, after: TapeDraft): Past {
-  const { places: was, past: _past, ...rest } = before;
-  const { places: is } = after;
+  const [was, is] = [before.places, after.places];
   const least = Math.min(was.length, is.length);
   let from = 0;
   while (from < least && was[from] === is[from]) from += 1;
   let same = 0;
   while (same < least - from && was[was.length - 1 - same] === is[is.length - 1 - same]) same += 1;
-  return { from, removed: was.slice(from, was.length - same), added: is.length - same - from, rest };
+  return { from, removed: was.slice(from, was.length - same), added: is.length - same - from, rest: restOf(before) };
 }
 
 function undone(draft: TapeDraft): TapeDraft {

@@ -160,9 +160,8 @@ describe('undo', () => {
         const standing = before.reduce(afterTapePress, beginTape(hand));
         const after = JSON.parse(JSON.stringify(afterTapePress(standing, last))) as TapeDraft;
         if (JSON.stringify(after) === JSON.stringify(standing)) return;
-        const { past: _past, ...back } = afterTapePress(after, { press: 'undo' });
-        const { past: _before, ...was } = standing;
-        expect(back).toEqual(JSON.parse(JSON.stringify(was)));
+        const back = afterTapePress(after, { press: 'undo' });
+        expect({ ...back, past: [] }).toEqual(JSON.parse(JSON.stringify({ ...standing, past: [] })));
       }),
     );
   });
