@@ -60,6 +60,12 @@ const nouns: readonly Noun[] = [
     differs: `(t.planting_id, t.row_sample_id, t.noted_on, t.noted_at, t.text) is distinct from ((m.body ->> 'plantingId')::uuid, (m.body ->> 'rowSampleId')::uuid, (m.body ->> 'notedOn')::date, m.body ->> 'notedAt', m.body ->> 'text')`,
   },
   {
+    kind: 'photo.record',
+    table: 'photo',
+    differs: `(t.planting_id, t.row_sample_id, t.taken_on, t.taken_at, t.sha256, t.bytes) is distinct from ((m.body ->> 'plantingId')::uuid, (m.body ->> 'rowSampleId')::uuid, (m.body ->> 'takenOn')::date, m.body ->> 'takenAt', m.body ->> 'sha256', (m.body ->> 'bytes')::int)
+      or (t.latitude_degrees, t.longitude_degrees, t.accuracy_meters) is distinct from ((m.body #>> '{place,latitude}')::float8, (m.body #>> '{place,longitude}')::float8, (m.body #>> '{place,accuracyMeters}')::float8)`,
+  },
+  {
     kind: 'observation.withdraw',
     table: 'withdrawal',
     differs: `(t.target_kind, t.target_id, t.reason) is distinct from (m.body ->> 'targetKind', (m.body ->> 'targetId')::uuid, m.body ->> 'reason')`,

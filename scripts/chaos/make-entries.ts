@@ -1,5 +1,6 @@
 import type { Chance } from './chance';
 import type { Entry, Made } from './entry';
+import type { TakenPhoto } from './photos';
 import type { Scene } from './scene';
 
 export type PhoneOfScout = { personId: string; deviceId: string; made: Made[] };
@@ -21,7 +22,7 @@ const plantsUp = (day: number) => Math.max(0, Math.min(plantsMost, Math.floor((d
  * Everything one phone enters: counts of shared rows and of its own, corrections, in-row cover, tape sheets, depths, crust,
  * markers, notes and withdrawals, with ids of the phone's making and its own sequence.
  */
-export function makeEntries(scene: Scene, index: number, entries: number, chance: Chance): PhoneOfScout {
+export function makeEntries(scene: Scene, index: number, entries: number, chance: Chance, photos: readonly TakenPhoto[] = []): PhoneOfScout {
   const scout = scene.scouts[index % scene.scouts.length];
   const planting = scene.plantings[index % scene.plantings.length];
   if (!scout || !planting) throw new Error('There is a scout and a planting for every phone.');
@@ -48,10 +49,10 @@ export function makeEntries(scene: Scene, index: number, entries: number, chance
     return { visit, day };
   };
 
-  const keep = (kind: string, body: Record<string, unknown>, more: { restsOn?: string; meant?: Record<string, unknown>; on: string; at?: string; version?: number }) => {
+  const keep = (kind: string, body: Record<string, unknown>, more: { restsOn?: string; meant?: Record<string, unknown>; on: string; at?: string; thingId?: string }) => {
     const entry: Entry = {
-      operationId: chance.id(), organisationId: scene.organisationId, personId: scout.personId, deviceId, deviceSequence: made.length + 1, kind, version: more.version ?? 1,
-      thingId: chance.id(), baseVersion: null, follows: null, body, occurred: { date: more.on, time: more.at ?? '12:00', zone }, confirmations: [],
+      operationId: chance.id(), organisationId: scene.organisationId, personId: scout.personId, deviceId, deviceSequence: made.length + 1, kind, version: 1,
+      thingId: more.thingId ?? chance.id(), baseVersion: null, follows: null, body, occurred: { date: more.on, time: more.at ?? '12:00', zone }, confirmations: [],
     };
     made.push({ entry, restsOn: more.restsOn ?? null, meant: more.meant ?? {} });
     return entry;
@@ -129,6 +130,14 @@ export function makeEntries(scene: Scene, index: number, entries: number, chance
     keep('note.record', { plantingId: planting.id, rowSampleId: chance.happens(0.5) ? chance.pick(shared) : null, notedOn, notedAt: '14:05', text }, { on: notedOn, at: '14:05' });
   };
 
+  const photograph = ({ photoId, bytes, sha256 }: TakenPhoto) => {
+    const takenOn = dayAfterPlanting(chance.whole(5, 30));
+    const place = chance.happens(0.5) ? { latitude: 41.5 + chance.whole(0, 999) / 1000, longitude: -93.5 + chance.whole(0, 999) / 1000, accuracyMeters: chance.whole(3, 60) } : null;
+    const body = { plantingId: planting.id, rowSampleId: chance.pick(shared), digId: null, takenOn, takenAt: '09:20', place, sha256, bytes: bytes.length };
+    keep('photo.record', body, { thingId: photoId, on: takenOn, at: '09:20' });
+  };
+
+  for (const photo of photos) photograph(photo);
   for (let n = 0; n < entries; n += 1) {
     const share = chance.next();
     if (share < 0.45) count();

@@ -1,3 +1,4 @@
+import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import pg from 'pg';
 import { throwIfInterrupted } from '../interruption.mjs';
@@ -7,6 +8,7 @@ import { sendingTo, signIn } from './http-send';
 import { balances, countByLedger, type Ledger } from './ledger';
 import { makeEntries } from './make-entries';
 import { Phone, type Habits, type Tally } from './phone';
+import { countPhotos, photosBalance, takePhoto, uploadAll, type PhotoLedger, type TakenPhoto } from './photos';
 import { openPortal } from './portal';
 import type { Cluster } from './prepare';
 import { settleScene } from './scene';
@@ -21,6 +23,7 @@ export type Plan = {
   faultSeconds: number;
   convergeSeconds: number;
   portalShare: number;
+  photosEach: number;
   habits: Partial<Habits>;
   /** The name of the broken server that stands in the place of the product, in a control. */
   broken: string | null;
@@ -28,7 +31,7 @@ export type Plan = {
   breakDatabase: readonly string[];
 };
 
-export type Outcome = { ledger: Ledger; waiting: number; complaints: string[]; convergedSeconds: number; struck: Record<string, number>; tally: Tally; seconds: number; passed: boolean };
+export type Outcome = { ledger: Ledger; photos: PhotoLedger; waiting: number; complaints: string[]; convergedSeconds: number; struck: Record<string, number>; tally: Tally; seconds: number; passed: boolean };
 
 const usual: Habits = { ways: 3, batchMost: 40, resentShare: 0.15, abandonShare: 0.2, twinShare: 0.1, madeWithinMs: 0, calm: () => false, forgetsOnAny2xx: false };
 
@@ -56,7 +59,9 @@ async function withAdmin<T>(url: string, work: (client: pg.Client) => Promise<T>
 export async function play(cluster: Cluster, plan: Plan): Promise<Outcome> {
   const startedAt = performance.now();
   const chance = chanceFrom(plan.seed);
-  const { appUrl, adminUrl, env } = await cluster.database();
+  const { appUrl, adminUrl, env: databaseEnv } = await cluster.database();
+  const photoFolder = join(cluster.folder, `photos-${plan.seed}-${cluster.databases()}`);
+  const env = { ...databaseEnv, PHOTO_FOLDER: photoFolder };
   const stopsBefore = cluster.stops();
   const scene = await settleScene(appUrl, chance, { scouts: plan.phones, plantings: plan.plantings, rowsEach: 40 });
   await withAdmin(adminUrl, async (client) => {
@@ -72,9 +77,16 @@ export async function play(cluster: Cluster, plan: Plan): Promise<Outcome> {
     let faultsEnd = Number.POSITIVE_INFINITY;
     const habits: Habits = { ...usual, madeWithinMs: plan.faultSeconds * 800, calm: () => performance.now() > faultsEnd, ...plan.habits };
     const phones: Phone[] = [];
+    const photos: TakenPhoto[] = [];
+    const uploads: ((over: () => boolean) => Promise<number>)[] = [];
     for (let index = 0; index < plan.phones; index += 1) {
-      const scout = makeEntries(scene, index, plan.entriesEach, chance.branch());
+      const taken = await Promise.all(Array.from({ length: plan.photosEach }, () => takePhoto(chance.id(), chance)));
+      const scout = makeEntries(scene, index, plan.entriesEach, chance.branch(), taken);
+      photos.push(...taken);
       const cookie = plan.broken === null ? await signIn(index % 2 === 0 ? first : second, scene.scouts[index]?.email ?? '') : '';
+      const at = { addresses: [first, second, portal.address], organisationId: scene.organisationId, cookie };
+      const uploading = chance.branch();
+      uploads.push((over) => uploadAll(taken, at, uploading, over));
       phones.push(new Phone(scout, sendingTo([first, second, portal.address], scene, cookie, chance.branch()), habits, chance.branch()));
     }
     faultsEnd = performance.now() + plan.faultSeconds * 1000;
@@ -84,6 +96,7 @@ export async function play(cluster: Cluster, plan: Plan): Promise<Outcome> {
       await phone.walk(() => interrupted() || performance.now() > deadline);
       return performance.now();
     });
+    const uploaded = uploads.map((upload) => upload(() => interrupted() || performance.now() > deadline));
     await strikeUntil(
       faultsOver,
       [
@@ -94,22 +107,26 @@ export async function play(cluster: Cluster, plan: Plan): Promise<Outcome> {
       chance,
     );
     const ends = await Promise.all(walking);
+    const photosLeft = (await Promise.all(uploaded)).reduce((sum, left) => sum + left, 0);
     throwIfInterrupted();
-    const waiting = phones.reduce((sum, phone) => sum + phone.left, 0);
+    const waiting = phones.reduce((sum, phone) => sum + phone.left, photosLeft);
     // What hung up in flight may still be under way on a server; it comes to rest before anything is counted.
     await pause(1_500);
     const made = phones.flatMap((phone) => phone.scout.made);
     const ledger = await withAdmin(adminUrl, (client) => countByLedger(client, scene.organisationId, made));
+    const photoLedger = await withAdmin(adminUrl, (client) => countPhotos(client, scene.organisationId, made, photos, photoFolder));
     const complaints = phones.flatMap((phone) => [...phone.complaints.values()]);
     return {
       ledger,
+      photos: photoLedger,
       waiting,
       complaints,
       convergedSeconds: Math.max(0, (Math.max(...ends) - faultsEnd) / 1000),
       struck: { 'servers killed': servers.reduce((sum, server) => sum + server.kills(), 0), 'PostgreSQL stopped': cluster.stops() - stopsBefore },
       tally: addedUp(phones.map((phone) => phone.tally)),
       seconds: (performance.now() - startedAt) / 1000,
-      passed: balances(ledger) && waiting === 0 && complaints.length === 0,
+      // A run in which nothing was struck holds nothing.
+      passed: balances(ledger) && photosBalance(photoLedger) && waiting === 0 && complaints.length === 0 && servers.every((server) => server.kills() > 0) && cluster.stops() > stopsBefore,
     };
   } finally {
     await portal.close();
@@ -127,12 +144,13 @@ function addedUp(tallies: readonly Tally[]): Tally {
 }
 
 /** What a person reads of one run. */
-export function tell(plan: Plan, { ledger, waiting, complaints, convergedSeconds, struck, tally, seconds }: Outcome): void {
+export function tell(plan: Plan, { ledger, photos, waiting, complaints, convergedSeconds, struck, tally, seconds }: Outcome): void {
   say(`  ${plan.phones} phones × ${plan.entriesEach} entries, seed ${plan.seed}, ${seconds.toFixed(0)} s in all`);
   say(`  faults for ${plan.faultSeconds} s: ${Object.entries(struck).map(([what, times]) => `${what} ${times} times`).join(', ')}`);
   say(`  ${tally.requests} requests with ${tally.sent} entries, ${tally.resent} of them sent before; ${tally.abandoned} hung up in flight, ${tally.unanswered} unanswered; kept because of ${JSON.stringify(tally.kept)}`);
   say(`  converged ${convergedSeconds.toFixed(1)} s after the faults stopped; ${waiting} still waiting`);
   say(`  by SQL, of ${ledger.made} entries and ${ledger.visits} visits: ${ledger.lost} lost, ${ledger.doubled} doubled, ${ledger.invented} invented, ${ledger.altered} altered, ${ledger.apart} receipts or audit events apart`);
+  if (photos.made > 0) say(`  of ${photos.made} photos, by SQL and their files: ${photos.lost} lost, ${photos.doubled} doubled, ${photos.invented} invented, ${photos.altered} altered`);
   for (const each of ledger.told) say(`    ${each}`);
   for (const each of [...new Set(complaints)].slice(0, 5)) say(`    refused: ${each}`);
 }

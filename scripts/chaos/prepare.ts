@@ -15,6 +15,7 @@ export async function makeChaosCluster() {
   return {
     folder,
     stops: () => stops,
+    databases: () => made,
     log: (name: string) => join(folder, `${name}.log`),
     /** A fresh copy of the migrated template: its addresses, and the environment of a server on it. */
     database: async () => {
