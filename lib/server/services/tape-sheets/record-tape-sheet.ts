@@ -25,10 +25,10 @@ async function service(context: WriteContext, body: RecordLaidTapeSheetInput): P
   const { organisationId } = actor;
   const { rowSample, planting, farm } = await findSeenRowSample(context, body.rowSampleId);
   await lockRowSamples(tx, { organisationId, rowSampleIds: [rowSample.id] });
-  const recorded = await listTapeSheets(tx, { organisationId, plantingId: planting.id });
+  const recorded = await listTapeSheets(tx, { organisationId, plantingId: planting.id, rowSampleId: rowSample.id });
   const twin = recorded.find((sheet) => sheet.id === operation.thingId);
   if (twin) return assertSame(twin, body);
-  const { counts, tapeSheets } = await readObservations(tx, { organisationId, plantingId: planting.id });
+  const { counts, tapeSheets } = await readObservations(tx, { organisationId, plantingId: planting.id, rowSampleId: rowSample.id });
   const markers = [...markersOfRow(counts, rowSample.id), ...(body.visit.marker === null ? [] : [body.visit.marker])];
   const personId = body.visit.personId ?? actor.personId;
   const tapedBy = tapedByOn(tapeSheets.filter((sheet) => sheet.id !== body.replacesId), { rowSampleId: rowSample.id, personId, visitedOn: body.visit.visitedOn });
