@@ -62,7 +62,7 @@ function faultyFetch(own: Chance, told: Record<string, number>): typeof fetch {
 const kept = ({ entry }: Made) => ({ ...entry, plantingId: null, rowSampleId: null, state: 'kept' as const, tried: false, keptAt: 0, sentAt: null, answer: null });
 
 describe('the phone as it is built, with a network and servers that fail half of the time', () => {
-  it('brings every entry to the server once and as entered, and keeps each until its own receipt', async () => {
+  it('brings every entry to the server once and as entered, and keeps each until its own receipt', { timeout: 60_000 }, async () => {
     const made: Made[] = [];
     const told: Record<string, number> = {};
     await Promise.all(

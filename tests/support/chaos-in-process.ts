@@ -95,7 +95,7 @@ export async function chaosInProcess(plan: Plan): Promise<ChaosOutcome> {
     startedAt = performance.now();
     const [dropped] = await Promise.all([
       dropConnections(adminUrl.href, () => performance.now() - startedAt > plan.faultMs, chance.branch()),
-      ...phones.map((phone) => phone.walk(() => performance.now() - startedAt > plan.faultMs + 8_000)),
+      ...phones.map((phone) => phone.walk(() => performance.now() - startedAt > plan.faultMs + 30_000)),
     ]);
     await Promise.allSettled([...underWay]);
     const ledger = await countByLedger(client, scene.organisationId, scouts.flatMap(({ made }) => made));
