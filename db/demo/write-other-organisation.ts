@@ -2,6 +2,7 @@ import { layout } from '@/lib/agronomy/layout';
 import { demoId } from './demo-id';
 import type { otherOrganisations } from './demo-people';
 import type { DemoOperation, DemoWriter } from './demo-writer';
+import { writeOtherFieldRecords } from './write-other-field-records';
 
 type Other = (typeof otherOrganisations)[number];
 
@@ -32,6 +33,7 @@ export async function writeOtherOrganisation(write: DemoWriter, other: Other, ba
   await send({ kind: 'planting.add', thingId: ids.plantingId, body: plantingBody(word, ids) });
   await writeTrial(send, word, ids);
   await writeObservations(send, word, ids);
+  await writeOtherFieldRecords(send, word, ids, countedOn);
   await send({ kind: 'replant-sheet.save', thingId: ids.replantSheetId, on: '2026-05-22', body: { plantingId: ids.plantingId, zoneId: ids.zoneId, inputs: replantInputs(word) } });
   const decision = { plantingId: ids.plantingId, zoneId: ids.zoneId, decided: 'keep', signedName: `${word} owner`, basisHash: await basisHashOf(ids.plantingId, ids.zoneId) };
   await send({ kind: 'decision.sign', thingId: ids.decisionId, on: '2026-05-23', body: decision });

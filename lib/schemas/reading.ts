@@ -47,6 +47,8 @@ export const sameQuantity = (one: ReadingUnit, other: ReadingUnit) => perCanonic
 
 /** A reading in another unit of the same quantity. Throws where the two measure different things. */
 export function readingIn(reading: { unit: ReadingUnit; thousandths: number }, unit: ReadingUnit): number {
+  // There and back again would cost the last digit, and with it a value that lies on its limit.
+  if (reading.unit === unit) return reading.thousandths / 1000;
   const from = perCanonical[reading.unit];
   const to = perCanonical[unit];
   if (from.of !== to.of) throw new RangeError(`${reading.unit} cannot be read as ${unit}`);

@@ -123,8 +123,8 @@ describe('the demo as its people read it', () => {
 
 describe('the two organisations beside it', () => {
   /** The columns in which a person writes words; a new one is filled in the demo too, or listed here as free of words. */
-  const withoutWords = /_(typed|unit)$|^(crop|tillage|cleaner|wheels|pressure_direction|adjusted_from|layout|main_figure|comparison_rule|role|origin_kind|counted_as|tape_unit|kind|target_kind|time_zone|planted_at|visited_at|start_end|far_end|chain_hash|content_hash|version|units|password_hash)$/;
-  const withoutWordsIn = ['audit_event.confirmations', 'audit_event.occurred', 'receipt.answer', 'decision.frozen', 'decision.basis_hash', 'decision.recommended', 'decision.decided', 'tape_sheet.kinds', 'tape_sheet.leaf_stage_tenths', 'tape_sheet.places_thousandths'];
+  const withoutWords = /_(typed|unit)$|^(crop|tillage|cleaner|wheels|pressure_direction|adjusted_from|layout|main_figure|comparison_rule|role|origin_kind|counted_as|tape_unit|kind|target_kind|time_zone|planted_at|visited_at|start_end|far_end|chain_hash|content_hash|version|units|password_hash|growth_stage|soil_moisture|moisture|residue|crust|dug_in|plant|found|event|unit|read_from|zero_at|(observed|noted|taken|ended)_at|sha256|(stored|small)_key)$/;
+  const withoutWordsIn = ['audit_event.confirmations', 'audit_event.occurred', 'receipt.answer', 'decision.frozen', 'decision.basis_hash', 'decision.recommended', 'decision.decided', 'tape_sheet.kinds', 'tape_sheet.leaf_stage_tenths', 'tape_sheet.places_thousandths', 'tape_sheet.segment_starts', 'depth_reading.depths_thousandths'];
   /** Nobody lost an edit in the demo, seals are made by the server, and its people needed no link. */
   const unused = ['losing_edit', 'audit_seal', 'one_time_link'];
 
