@@ -1,4 +1,6 @@
-import { inchesRead, type TapeDraft } from '@/lib/client/round/tape-draft';
+import { memo } from 'react';
+import { inchesRead } from '@/lib/client/round/tape-draft';
+import type { SheetSoFar } from '@/lib/client/round/tape-sheet-of-row';
 import { tapePositions } from '@/lib/schemas/tape-positions';
 import type { UnitSystem } from '@/lib/schemas/vocabulary';
 import { MissingSeed } from '@/components/tape/missing-seed';
@@ -10,8 +12,18 @@ import { tapeDoubles } from '@/components/tape/tape-doubles';
 import { tapeMarks } from '@/components/tape/tape-marks';
 import type { TapeEnd, TapePlant } from '@/components/tape/tape-plant';
 import { tapeTexts } from '@/lib/texts/round-tape-texts';
+import type { SheetMarker } from './tape-notes';
 
-type GrowingTapeProps = { draft: TapeDraft; lengthInches: number; startEnd: TapeEnd; farEnd: TapeEnd; earlinessOf: (marker: string | null) => number | null };
+type GrowingTapeProps = {
+  sheet: SheetSoFar;
+  /** The place that is written beside the tape. */
+  inHand: number;
+  /** The markers of the visits, earliest first. */
+  markers: readonly SheetMarker[];
+  lengthInches: number;
+  startEnd: TapeEnd;
+  farEnd: TapeEnd;
+};
 
 const width = 136;
 const height = 236;
@@ -21,33 +33,45 @@ const tapeWidth = 28;
 const leastHeight = 14;
 const mostHeight = 48;
 const numeralDistance = 15;
+/** How wide a seedling's head is at its full size, so that heads in a full row do not run into each other. */
+const headWidth = 12.4;
+const sizeMost = 0.7;
+const sizeLeast = 0.35;
 /** Numerals at every foot or meter that leaves them apart. */
 const everyWhole = [1, 2, 5, 10, 20, 50, 100];
 
-/** The row as it grows, from the scout's feet upward, small enough to leave the keys where they are. One place alone is written beside it: the one in hand. */
-export function GrowingTape({ draft, lengthInches, startEnd, farEnd, earlinessOf }: GrowingTapeProps) {
-  const units: UnitSystem = draft.unit === 'cm' ? 'metric' : 'us';
-  const read = inchesRead(draft).flatMap((inches, index) => (inches === undefined ? [] : [{ inches, index, place: draft.places[index] }]));
+/** The earlier a plant's marker, the taller it is drawn; one without a day is the lowest. */
+function earlinessOf(marker: string | null, markers: readonly SheetMarker[]): number | null {
+  const dated = markers.filter((each) => each.day !== null);
+  const at = dated.findIndex((each) => each.marker.toLowerCase() === marker?.toLowerCase());
+  if (at === -1) return null;
+  return dated.length === 1 ? 1 : 1 - at / (dated.length - 1);
+}
+
+/** The row as it grows, from the scout's feet upward, small enough to leave the keys where they are. One place alone is written beside it: the one in hand. Typing does not draw it anew. */
+export const GrowingTape = memo(function GrowingTape({ sheet, inHand, markers, lengthInches, startEnd, farEnd }: GrowingTapeProps) {
+  const units: UnitSystem = sheet.unit === 'cm' ? 'metric' : 'us';
+  const read = inchesRead(sheet).flatMap((inches, index) => (inches === undefined ? [] : [{ inches, index, place: sheet.places[index] }]));
   const segmentStarts = read.flatMap(({ place }, order) => (order > 0 && place?.cutBefore ? [order] : []));
-  const laid = tapePositions(read.map(({ inches }) => inches), { readFrom: draft.readFrom, zeroAt: draft.zeroAt, segmentStarts }, lengthInches);
+  const laid = tapePositions(read.map(({ inches }) => inches), { readFrom: sheet.readFrom, zeroAt: sheet.zeroAt, segmentStarts }, lengthInches);
   const reach = Math.max(lengthInches, 1, ...laid.map((place) => place.positionInches));
   const inchSize = (height - 2 * edge) / reach;
   const yOf = (inches: number) => height - edge - inches * inchSize;
   const plants = laid.map(({ order, positionInches, segment }) => {
     const { place, index } = read[order] ?? {};
     const plant: TapePlant = {
-      positionInches, segment, earliness: earlinessOf(place?.marker ?? null), late: place?.kind === 'late', double: place?.kind === 'double', kind: place?.kind === 'missing' ? 'missing' : 'plant',
+      positionInches, segment, earliness: earlinessOf(place?.marker ?? null, markers), late: place?.kind === 'late', double: place?.kind === 'double', kind: place?.kind === 'missing' ? 'missing' : 'plant',
     };
     return { plant, index: index ?? 0, typed: place?.typed ?? '' };
   });
-  const inHand = draft.at.put === 'end' ? draft.places.length - 1 : draft.at.index;
+  const size = Math.max(sizeLeast, Math.min(sizeMost, (height - 2 * edge) / Math.max(plants.length, 1) / headWidth));
   const chosen = plants.find(({ index }) => index === inHand);
   const marks = tapeMarks(0, lengthInches, units, inchSize);
   const wholeDistance = (units === 'us' ? 12 : 100 / 2.54) * inchSize;
   const every = everyWhole.find((step) => step * wholeDistance >= numeralDistance) ?? 100;
   const pegs = [startEnd === 'mark' ? 0 : null, farEnd === 'mark' ? lengthInches : null];
   return (
-    <svg role="img" aria-label={tapeTexts.drawing(draft.places.length)} viewBox={`0 0 ${width} ${height}`} preserveAspectRatio="xMinYMid meet" className="block h-full max-h-80 min-h-0 w-auto shrink-0">
+    <svg role="img" aria-label={tapeTexts.drawing(sheet.places.length)} viewBox={`0 0 ${width} ${height}`} preserveAspectRatio="xMinYMid meet" className="block h-full max-h-80 min-h-0 w-auto min-w-0 shrink">
       <rect x={tapeLeft} y={yOf(lengthInches)} width={tapeWidth} height={yOf(0) - yOf(lengthInches)} strokeWidth={1.2} className="fill-bone stroke-ink" />
       {marks.map((mark) => (
         <g key={mark.atInches}>
@@ -65,9 +89,9 @@ export function GrowingTape({ draft, lengthInches, startEnd, farEnd, earlinessOf
       ))}
       {plants.map(({ plant, index }) =>
         plant.kind === 'missing' ? (
-          <MissingSeed key={index} x={tapeLeft - 9} y={yOf(plant.positionInches)} size={0.9} />
+          <MissingSeed key={index} x={tapeLeft - 9} y={yOf(plant.positionInches)} size={Math.min(0.9, size * 1.4)} />
         ) : (
-          <Seedling key={index} x={tapeLeft} y={yOf(plant.positionInches)} height={plantHeight(plant, leastHeight, mostHeight)} grows="left" look={plantLook(plant)} size={index === inHand ? 1.1 : 0.7} />
+          <Seedling key={index} x={tapeLeft} y={yOf(plant.positionInches)} height={plantHeight(plant, leastHeight, mostHeight)} grows="left" look={plantLook(plant)} size={index === inHand ? 1.1 : size} />
         ),
       )}
       {tapeDoubles(plants.map(({ plant }) => plant)).map((double) => (
@@ -83,4 +107,4 @@ export function GrowingTape({ draft, lengthInches, startEnd, farEnd, earlinessOf
       ) : null}
     </svg>
   );
-}
+});

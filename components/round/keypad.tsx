@@ -11,7 +11,7 @@ export function Key({ label, onPress, children, look = 'plain', wide = 1, tall =
       type="button"
       aria-label={label}
       onClick={onPress}
-      className={`min-h-press cursor-pointer touch-manipulation rounded-press border-2 border-ink px-1 leading-tight select-none active:bg-ink active:text-paper ${look === 'plain' ? 'font-mono text-27' : 'text-15 font-bold'} ${wide === 2 ? 'col-span-2' : ''} ${tallClass[tall]}`}
+      className={`min-h-press cursor-pointer touch-manipulation rounded-press border-2 border-ink px-1 leading-tight select-none active:bg-ink active:text-paper ${look === 'plain' ? 'font-mono text-27' : 'text-15 font-bold [overflow-wrap:normal]'} ${wide === 2 ? 'col-span-2' : ''} ${tallClass[tall]}`}
     >
       {children}
     </button>

@@ -16,7 +16,7 @@ function partsOf(unit: TapeUnit, step: TapeStep): readonly Part[] {
 
 /** The keys of a tape sheet, at the bottom where the thumb is: a place takes its digits, its part and Next. */
 export function TapeKeys({ draft, onPress }: { draft: TapeDraft; onPress: (pressed: TapePress) => void }) {
-  const { unit, step, current, at, fresh } = draft;
+  const { unit, step, current, at, fresh, places, toGo } = draft;
   const parts = partsOf(unit, step);
   const digit = (number: number) => (
     <Key key={number} onPress={() => onPress({ press: 'key', text: String(number) })}>
@@ -29,8 +29,9 @@ export function TapeKeys({ draft, onPress }: { draft: TapeDraft; onPress: (press
         {text}
       </Key>
     );
+  const untouched = fresh ? (at.put === 'change' && toGo > 0 && at.index === places.length - toGo ? tapeTexts.stands : tapeTexts.done) : tapeTexts.put;
   return (
-    <div role="group" aria-label={tapeTexts.keys} className="grid grid-cols-5 gap-1.5">
+    <div role="group" aria-label={tapeTexts.keys} className="grid grid-cols-[repeat(4,minmax(var(--press),1fr))_minmax(min-content,1fr)] gap-[6px]">
       {[1, 2, 3].map(digit)}
       {part(parts[0])}
       <Key look="word" onPress={() => onPress({ press: 'back' })}>
@@ -46,9 +47,9 @@ export function TapeKeys({ draft, onPress }: { draft: TapeDraft; onPress: (press
       <button
         type="button"
         onClick={() => onPress({ press: 'next' })}
-        className="row-span-2 min-h-press cursor-pointer touch-manipulation rounded-press border-2 border-ink bg-ink px-1 text-18 leading-tight font-bold text-paper select-none active:bg-bone active:text-ink"
+        className="row-span-2 min-h-press cursor-pointer touch-manipulation rounded-press border-2 border-ink bg-ink px-1 text-18 leading-tight font-bold text-paper [overflow-wrap:normal] select-none active:bg-bone active:text-ink"
       >
-        {at.put === 'end' ? tapeTexts.next : at.put === 'change' && fresh ? tapeTexts.stands : tapeTexts.put}
+        {at.put === 'end' ? tapeTexts.next : untouched}
       </button>
       {unit === 'ft-in' ? (
         <Key label={tapeTexts.feet} onPress={() => onPress({ press: 'key', text: "'" })}>

@@ -6,7 +6,7 @@ import { tapeTexts } from '@/lib/texts/round-tape-texts';
 export type SheetMarker = { marker: string; day: number | null };
 type TapeNotesProps = { draft: TapeDraft; markers: readonly SheetMarker[]; onPress: (pressed: TapePress) => void };
 
-const press = 'min-h-press cursor-pointer touch-manipulation rounded-press border-2 border-ink px-0.5 text-15 leading-tight font-bold select-none';
+const press = 'min-h-press cursor-pointer touch-manipulation rounded-press border-2 border-ink px-0.5 text-15 leading-tight font-bold [overflow-wrap:normal] select-none';
 const kinds = ['late', 'double', 'missing'] as const;
 
 /** What is noted of the place in the entry line: its marker, and late, double or missing. Each is one press, and all are in sight. */
@@ -16,7 +16,7 @@ export function TapeNotes({ draft, markers, onPress }: TapeNotesProps) {
   return (
     <>
       {choices.length > 0 ? (
-        <div role="radiogroup" aria-label={tapeTexts.marker} className="grid grid-cols-[repeat(auto-fit,minmax(4.25rem,1fr))] gap-1.5">
+        <div role="radiogroup" aria-label={tapeTexts.marker} className="grid grid-cols-[repeat(auto-fit,minmax(3.5rem,1fr))] gap-[6px]">
           {choices.map((each) => {
             const on = current.marker?.toLowerCase() === each?.marker.toLowerCase();
             return (
@@ -26,7 +26,7 @@ export function TapeNotes({ draft, markers, onPress }: TapeNotesProps) {
                 role="radio"
                 aria-checked={on}
                 onClick={() => onPress({ press: 'marker', marker: each?.marker ?? null })}
-                className={`${press} [overflow-wrap:anywhere] ${on ? 'bg-ink text-paper' : ''}`}
+                className={`${press} overflow-hidden ${on ? 'bg-ink text-paper' : ''}`}
               >
                 {each?.marker ?? tapeTexts.noMarker}
                 {each && each.day !== null ? (
@@ -40,7 +40,7 @@ export function TapeNotes({ draft, markers, onPress }: TapeNotesProps) {
           })}
         </div>
       ) : null}
-      <div role="group" aria-label={tapeTexts.whatIs} className="grid grid-cols-3 gap-1.5">
+      <div role="group" aria-label={tapeTexts.whatIs} className="grid grid-cols-[repeat(3,minmax(min-content,1fr))] gap-[6px]">
         {kinds.map((kind) => (
           <button
             key={kind}

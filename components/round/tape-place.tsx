@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { useCallback, useState } from 'react';
 import { v7 } from 'uuid';
 import type { RoundPlace } from '@/lib/client/round/round';
 import { goTo, useAddress } from '@/lib/client/round/round-place';
@@ -26,15 +26,20 @@ export function TapePlace({ planting, row }: RoundPlace) {
   const draft = round.draft<TapeDraft>(name);
   const [choosing, setChoosing] = useState(false);
   const { me } = round;
+  const standing = useCallback(() => round.draft<TapeDraft>(name), [round, name]);
+  // At the visit of this walk, so that a count and its sheet are one stop; without one, at a visit that set no marker.
+  const visit = useCallback(() => visitOfRow(round.entriesOf(row.id), round.now(), round.markerOf(planting)) ?? round.visit(row, null), [round, row, planting]);
+  const store = useCallback(
+    (next: TapeDraft) => {
+      void round.setDraft(name, next);
+      const before = round.draft<Pick<TapeHand, 'unit' | 'step'>>(handPreference);
+      if (next.unit !== before?.unit || next.step !== before.step) void round.setPreference(handPreference, { unit: next.unit, step: next.step });
+    },
+    [round, name],
+  );
   if (!me) return null;
   const remembered = round.draft<Pick<TapeHand, 'unit' | 'step'>>(handPreference);
   const hand = draft ?? { unit: null, step: 'half' as const, readFrom: 'start' as const, zeroAt: row.startEnd, ...remembered };
-  // At the visit of this walk, so that a count and its sheet are one stop; without one, at a visit that set no marker.
-  const visit = () => visitOfRow(round.entriesOf(row.id), round.now(), round.markerOf(planting)) ?? round.visit(row, null);
-  const store = (next: TapeDraft) => {
-    void round.setDraft(name, next);
-    if (next.unit !== remembered?.unit || next.step !== remembered.step) void round.setPreference(handPreference, { unit: next.unit, step: next.step });
-  };
   const keep = async (sheet: TapeDraft, confirmations: Confirmation[]) => {
     await round.keep(
       [{
@@ -76,7 +81,7 @@ export function TapePlace({ planting, row }: RoundPlace) {
         row={row}
         planting={planting}
         draft={draft}
-        standing={() => round.draft<TapeDraft>(name) ?? draft}
+        standing={standing}
         me={me}
         visit={visit}
         onDraft={store}

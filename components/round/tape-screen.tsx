@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useState } from 'react';
+import { useCallback, useEffect, useMemo, useState } from 'react';
 import { dayNumber, usedCounts } from '@/lib/client/round/due-row';
 import { checkSheetOfRow, markersOfSheet } from '@/lib/client/round/tape-sheet-of-row';
 import { afterTapePress, isPending, type TapeDraft, type TapePress } from '@/lib/client/round/tape-draft';
@@ -23,7 +23,7 @@ type TapeScreenProps = {
   planting: RoundPlanting;
   draft: TapeDraft;
   /** The draft as it stands at this moment, which quick presses may have carried beyond what was drawn last. */
-  standing: () => TapeDraft;
+  standing: () => TapeDraft | undefined;
   me: { id: string; name: string };
   visit: () => EntryVisit;
   onDraft: (next: TapeDraft) => void;
@@ -37,26 +37,31 @@ type Asking = { questions: Question[]; problems: string[]; toGo: boolean };
 export function TapeScreen({ row, planting, draft, standing, me, visit, onDraft, onKeep, onTape }: TapeScreenProps) {
   const [asking, setAsking] = useState<Asking>();
   const [keeping, setKeeping] = useState(false);
-  const press = (pressed: TapePress) => {
-    setAsking(undefined);
-    onDraft(afterTapePress(standing(), pressed));
-  };
+  const press = useCallback(
+    (pressed: TapePress) => {
+      setAsking(undefined);
+      const before = standing();
+      if (before) onDraft(afterTapePress(before, pressed));
+    },
+    [standing, onDraft],
+  );
   const counted = usedCounts(row).at(-1)?.plantsUp ?? null;
   const plants = draft.places.filter((place) => place.kind !== 'missing').length;
-  const markers = markersOfSheet(row, draft).map(({ marker, on }) => ({ marker, day: on === null ? null : dayNumber(planting.plantedOn, on) }));
-  // The earlier a plant's marker, the taller it is drawn; one without a day is the lowest.
-  const earlinessOf = (marker: string | null) => {
-    const dated = markers.filter((each) => each.day !== null);
-    const at = dated.findIndex((each) => each.marker.toLowerCase() === marker?.toLowerCase());
-    return at === -1 ? null : dated.length === 1 ? 1 : 1 - at / (dated.length - 1);
-  };
-  const checked = checkSheetOfRow(row, draft, visit(), me);
-  const wrong = new Set(checked.fields.map((field) => Number(field.path.split('.')[1])));
-  const tape = draft.surelyInches ? undefined : checked.tape;
+  // Held as they are while a number is being typed: a key then draws its line anew and nothing else.
+  const { places, unit, readFrom, zeroAt, surelyInches, replacesId } = draft;
+  const { marker } = draft.current;
+  const markers = useMemo(
+    () => markersOfSheet(row, [...places, { marker }]).map((each) => ({ marker: each.marker, day: each.on === null ? null : dayNumber(planting.plantedOn, each.on) })),
+    [row, places, marker, planting.plantedOn],
+  );
+  const sheet = useMemo(() => ({ places, unit, readFrom, zeroAt, surelyInches, replacesId }), [places, unit, readFrom, zeroAt, surelyInches, replacesId]);
+  const checked = useMemo(() => checkSheetOfRow(row, sheet, visit(), me), [row, sheet, visit, me]);
+  const wrong = useMemo(() => new Set(checked.fields.map((field) => Number(field.path.split('.')[1]))), [checked]);
+  const tape = surelyInches ? undefined : checked.tape;
 
   const keep = async (answered: readonly Question[], wentThrough: boolean) => {
-    if (keeping) return;
     let sheet = standing();
+    if (keeping || !sheet) return;
     if (isPending(sheet)) {
       sheet = afterTapePress(sheet, { press: 'next' });
       onDraft(sheet);
@@ -95,23 +100,23 @@ export function TapeScreen({ row, planting, draft, standing, me, visit, onDraft,
 
   return (
     <div className="flex min-h-0 grow flex-col">
-      <div className="grid grid-cols-[1fr_auto_auto] items-center gap-x-2 border-b border-ink px-3 py-1">
-        <h1 aria-label={tapeTexts.title(row.label)} className="min-w-0 text-21 leading-tight">
+      <div className="flex flex-wrap items-center justify-end gap-x-2 border-b border-ink px-3 py-1">
+        <h1 aria-label={tapeTexts.title(row.label)} className="mr-auto text-21 leading-tight [overflow-wrap:normal]">
           {row.label}
         </h1>
-        <button type="button" aria-label={tapeTexts.change(draft.unit)} onClick={onTape} className="min-h-press max-w-28 cursor-pointer px-1 text-15 leading-tight font-bold underline underline-offset-4">
+        <button type="button" aria-label={tapeTexts.change(draft.unit)} onClick={onTape} className="min-h-press min-w-press max-w-28 cursor-pointer px-1 text-15 leading-tight font-bold underline underline-offset-4">
           {tapeTexts.inHand(draft.unit)}
         </button>
         <Button aria-label={tapeTexts.keepLabel(draft.places.length)} pending={keeping} onClick={() => void keep([], false)}>
           {tapeTexts.keep(draft.places.length)}
         </Button>
-        <p role="status" className="col-span-3 text-15 leading-tight">
+        <p role="status" className="w-full text-15 leading-tight">
           {tapeTexts.plants(plants, counted)}
         </p>
       </div>
-      <div className="flex h-0 min-h-36 grow gap-2 px-3">
-        <GrowingTape draft={draft} lengthInches={row.length.inches} startEnd={row.startEnd} farEnd={row.farEnd} earlinessOf={earlinessOf} />
-        <TapePlaces draft={draft} wrong={wrong} onPress={press} />
+      <div className="flex h-0 min-h-36 grow gap-2 [@media(max-height:700px)]:min-h-24 px-3">
+        <GrowingTape sheet={sheet} inHand={draft.at.put === 'end' ? places.length - 1 : draft.at.index} markers={markers} lengthInches={row.length.inches} startEnd={row.startEnd} farEnd={row.farEnd} />
+        <TapePlaces places={places} at={draft.at} toGo={draft.toGo} wrong={wrong} onPress={press} />
       </div>
       {asking ? (
         <TapeAsked label={roundCountTexts.asked} sentences={[...asking.problems, ...asking.questions.map((question) => question.sentence), ...(asking.toGo ? [tapeTexts.toGo(draft.toGo)] : [])]}>
@@ -128,7 +133,7 @@ export function TapeScreen({ row, planting, draft, standing, me, visit, onDraft,
           </Button>
         </TapeAsked>
       ) : (
-        <div className="flex flex-col gap-1.5 border-t-2 border-ink px-3 pt-1 pb-2">
+        <div className="flex flex-col gap-[6px] border-t-2 border-ink px-[12px] pt-1 pb-2">
           <TapeLine draft={draft} onPress={press} />
           {draft.refused === null ? null : (
             <div role="alert" className="flex items-center gap-2">

@@ -265,7 +265,7 @@ export function inchesFromLast(draft: TapeDraft): number | undefined {
 export const inchesRead = ({ places, unit }: Pick<Sheet, 'places' | 'unit'>) => places.map((place) => inchesOf(place, unit));
 
 /** The sheet as it is kept. */
-export function sheetBody({ unit, readFrom, zeroAt, places }: TapeDraft) {
+export function sheetBody({ unit, readFrom, zeroAt, places }: Pick<TapeDraft, 'unit' | 'readFrom' | 'zeroAt' | 'places'>) {
   return {
     tapeUnit: unit,
     readFrom,

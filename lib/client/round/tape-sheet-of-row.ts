@@ -8,8 +8,11 @@ import type { EntryVisit } from './visit-of-row';
 type Me = { id: string; name: string };
 export type CheckedSheet = { fields: FieldProblem[]; questions: Question[]; /** That it looks like feet and tenths, asked as soon as it can be known. */ tape: Question | undefined };
 
+/** As much of a draft as its checks need; what is being typed is not among it. */
+export type SheetSoFar = Pick<TapeDraft, 'places' | 'unit' | 'readFrom' | 'zeroAt' | 'surelyInches' | 'replacesId'>;
+
 /** The same questions that the server asks, before the sheet is kept. What the scout has said about the tape is not asked again. */
-export function checkSheetOfRow(row: RoundRow, draft: TapeDraft, visit: EntryVisit, me: Me): CheckedSheet {
+export function checkSheetOfRow(row: RoundRow, draft: SheetSoFar, visit: EntryVisit, me: Me): CheckedSheet {
   const body = sheetBody(draft);
   const markers = [...row.counts.flatMap((count) => count.marker ?? []), ...(visit.marker === null ? [] : [visit.marker])];
   const twin = row.tapeSheets.find((sheet) => sheet.id !== draft.replacesId && sheet.personId === me.id && sheet.visitedOn === visit.visitedOn);
@@ -20,11 +23,11 @@ export function checkSheetOfRow(row: RoundRow, draft: TapeDraft, visit: EntryVis
 }
 
 /** The markers to choose from, each with the day it was last set at this row, in the order of the days; others that the sheet has come last. */
-export function markersOfSheet(row: RoundRow, draft: Pick<TapeDraft, 'places' | 'current'>): { marker: string; on: string | null }[] {
+export function markersOfSheet(row: RoundRow, places: readonly { marker: string | null }[]): { marker: string; on: string | null }[] {
   const found = new Map<string, { marker: string; on: string | null }>();
   for (const { marker, visitedOn } of usedCounts(row)) if (marker !== null) found.set(marker.toLowerCase(), { marker, on: visitedOn });
   const dated = [...found.values()].sort((a, b) => ((a.on ?? '') < (b.on ?? '') ? -1 : 1));
-  const others = [...draft.places, draft.current].flatMap(({ marker }) => (marker === null || found.has(marker.toLowerCase()) ? [] : [marker]));
+  const others = places.flatMap(({ marker }) => (marker === null || found.has(marker.toLowerCase()) ? [] : [marker]));
   return [...dated, ...[...new Set(others)].map((marker) => ({ marker, on: null }))];
 }
 

@@ -192,7 +192,8 @@ const count = (visitedOn: string, name: string | null) => ({ id: visitedOn, visi
 describe('a sheet held against its row', () => {
   it('chooses among the markers of the visits, by day, and those the sheet has besides', () => {
     const row = rowOf({ counts: [count('2026-05-16', 'red'), count('2026-05-17', 'blue'), count('2026-05-18', null), count('2026-05-19', 'Red')] });
-    expect(markersOfSheet(row, pressed(beginTape(hand), marker('BLUE'), '4', 'next', marker('pink')))).toEqual([
+    const draft = pressed(beginTape(hand), marker('BLUE'), '4', 'next', marker('pink'));
+    expect(markersOfSheet(row, [...draft.places, draft.current])).toEqual([
       { marker: 'blue', on: '2026-05-17' },
       { marker: 'Red', on: '2026-05-19' },
       { marker: 'pink', on: null },
