@@ -165,6 +165,17 @@ describe('what a phone sends', () => {
   });
 });
 
+describe('a correction of a tape sheet', () => {
+  it('that was corrected meanwhile is shown how many plants the standing sheet has, and whose it is', async () => {
+    await settled();
+    const [first, second] = [v7(), v7()];
+    expect(await counted.tape('A-1', ['6', '12', '18'], { sheetId: first })).toMatchObject({ outcome: 'applied' });
+    expect(await counted.tape('A-1', ['6', '12', { typed: '15', kind: 'missing' }, '18', '24'], { sheetId: second, replacesId: first })).toMatchObject({ outcome: 'applied' });
+    const late = await counted.tape('A-1', ['6', '12', '19'], { replacesId: first }, 'agronomist');
+    expect(late).toMatchObject({ outcome: 'conflict', standing: { id: second, plants: 4, personName: 'Test scout', visitedOn: '2026-05-19' } });
+  });
+});
+
 describe('the desk', () => {
   it('marks a count dated after today on the table and the sheet, and no other', async () => {
     await settled();
