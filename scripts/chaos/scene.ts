@@ -42,7 +42,7 @@ export async function settleScene(databaseUrl: string, chance: Chance, size: Siz
   }
 }
 
-async function insertPeople(db: Database, organisationId: string, people: readonly (Scout & { role: string })[]) {
+export async function insertPeople(db: Database, organisationId: string, people: readonly (Scout & { role: string })[]) {
   const passwordHash = await hashPassword(password);
   await inOrganisation(db, { organisationId }, async (tx) => {
     await tx.execute(sql`insert into organisation (id, name, time_zone) values (${organisationId}, 'Harness account', 'America/Chicago')`);
@@ -53,9 +53,9 @@ async function insertPeople(db: Database, organisationId: string, people: readon
   });
 }
 
-type Must = (kind: string, thingId: string, body: Record<string, unknown>) => Promise<void>;
+export type Must = (kind: string, thingId: string, body: Record<string, unknown>) => Promise<void>;
 
-function mustApply(db: Database, who: { organisationId: string; personId: string; deviceId: string }, chance: Chance): Must {
+export function mustApply(db: Database, who: { organisationId: string; personId: string; deviceId: string }, chance: Chance): Must {
   let deviceSequence = 0;
   return async (kind, thingId, body) => {
     deviceSequence += 1;
