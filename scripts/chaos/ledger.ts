@@ -74,11 +74,12 @@ const nouns: readonly Noun[] = [
 
 /**
  * Holds the database against what the phones made, by SQL alone: rows, receipts and audit events each against the entries,
- * one to one, and every value. The phones' own counters have no say.
+ * one to one, and every value. The phones' own counters have no say. What a phone still keeps is no loss yet; a run in
+ * which something waits at the end is red for that.
  */
-export async function countByLedger(client: pg.Client, organisationId: string, made: readonly Made[]): Promise<Ledger> {
-  await client.query(`create temp table made (operation_id uuid primary key, person_id uuid, device_id uuid, device_sequence bigint, kind text, version int, thing_id uuid, body jsonb, occurred jsonb, meant jsonb)`);
-  const rows = made.map(({ entry: e, meant }) => ({ operation_id: e.operationId, person_id: e.personId, device_id: e.deviceId, device_sequence: e.deviceSequence, kind: e.kind, version: e.version, thing_id: e.thingId, body: e.body, occurred: e.occurred, meant }));
+export async function countByLedger(client: pg.Client, organisationId: string, made: readonly Made[], stillKept: ReadonlySet<string> = new Set()): Promise<Ledger> {
+  await client.query(`create temp table made (operation_id uuid primary key, person_id uuid, device_id uuid, device_sequence bigint, kind text, version int, thing_id uuid, body jsonb, occurred jsonb, meant jsonb, still_kept boolean)`);
+  const rows = made.map(({ entry: e, meant }) => ({ operation_id: e.operationId, person_id: e.personId, device_id: e.deviceId, device_sequence: e.deviceSequence, kind: e.kind, version: e.version, thing_id: e.thingId, body: e.body, occurred: e.occurred, meant, still_kept: stillKept.has(e.operationId) }));
   await client.query(`insert into made select * from jsonb_populate_recordset(null::made, $1)`, [JSON.stringify(rows)]);
   await client.query('analyze made');
   const ledger: Ledger = { made: made.length, visits: 0, lost: 0, doubled: 0, invented: 0, altered: 0, apart: 0, told: [] };
@@ -93,20 +94,20 @@ export async function countByLedger(client: pg.Client, organisationId: string, m
 
   for (const { kind, table, differs } of nouns) {
     const pair = `from made m join ${table} t on t.organisation_id = $1 and t.id = m.thing_id where m.kind = '${kind}'`;
-    await note('lost', table, `select count(*) as n from made m where m.kind = '${kind}' and not exists (select 1 from ${table} t where t.organisation_id = $1 and t.id = m.thing_id)`);
+    await note('lost', table, `select count(*) as n from made m where m.kind = '${kind}' and not m.still_kept and not exists (select 1 from ${table} t where t.organisation_id = $1 and t.id = m.thing_id)`);
     await note('doubled', table, `select count(*) - count(distinct id) as n from ${table} where organisation_id = $1`);
     await note('invented', table, `select count(*) as n from ${table} t where t.organisation_id = $1 and not exists (select 1 from made m where m.thing_id = t.id and m.kind = '${kind}')`);
     await note('altered', table, `select count(*) as n ${pair} and (t.operation_id <> m.operation_id or t.created_by <> m.person_id or t.origin_kind <> 'phone' or ${differs})`);
   }
-  const named = `(select distinct (body -> 'visit' ->> 'id')::uuid as id from made where body -> 'visit' is not null)`;
-  await note('lost', 'visit', `select count(*) as n from ${named} m where not exists (select 1 from visit t where t.organisation_id = $1 and t.id = m.id)`);
+  const named = `(select (body -> 'visit' ->> 'id')::uuid as id, bool_and(still_kept) as still_kept from made where body -> 'visit' is not null group by 1)`;
+  await note('lost', 'visit', `select count(*) as n from ${named} m where not m.still_kept and not exists (select 1 from visit t where t.organisation_id = $1 and t.id = m.id)`);
   await note('doubled', 'visit', `select count(*) - count(distinct id) as n from visit where organisation_id = $1`);
   await note('invented', 'visit', `select count(*) as n from visit t where t.organisation_id = $1 and not exists (select 1 from ${named} m where m.id = t.id)`);
 
   // The plan was made through operations of other kinds.
   const ofPhones = `organisation_id = $1 and kind in (${nouns.map(({ kind }) => `'${kind}'`).join(', ')})`;
   for (const [table, id] of [['receipt', 'operation_id'], ['audit_event', 'id']] as const) {
-    await note('lost', table, `select count(*) as n from made m where not exists (select 1 from ${table} t where t.organisation_id = $1 and t.${id} = m.operation_id)`);
+    await note('lost', table, `select count(*) as n from made m where not m.still_kept and not exists (select 1 from ${table} t where t.organisation_id = $1 and t.${id} = m.operation_id)`);
     await note('doubled', table, `select count(*) - count(distinct ${id}) as n from ${table} where ${ofPhones}`);
     await note('invented', table, `select count(*) as n from ${table} t where ${ofPhones} and not exists (select 1 from made m where m.operation_id = t.${id})`);
     await note('altered', table, `select count(*) as n from made m join ${table} t on t.organisation_id = $1 and t.${id} = m.operation_id where (t.person_id, t.device_id, t.device_sequence, t.kind, t.thing_id) is distinct from (m.person_id, m.device_id, m.device_sequence, m.kind, m.thing_id)`);

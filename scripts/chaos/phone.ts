@@ -48,6 +48,11 @@ export class Phone {
     return this.waiting.size + this.unmade.length;
   }
 
+  /** What it still has, sent or unsent, without a receipt. */
+  get stillKept(): string[] {
+    return [...this.waiting.keys(), ...this.unmade.map(({ entry }) => entry.operationId)];
+  }
+
   /** Goes on until everything has its receipt, or until it is told to stop. */
   async walk(over: () => boolean): Promise<void> {
     while (this.left > 0 && !over()) {

@@ -8,7 +8,8 @@ import type { Chance } from './chance';
 import { httpRequest } from './http-request';
 import type { Made } from './entry';
 
-export type TakenPhoto = { photoId: string; bytes: Buffer; sha256: string };
+/** Sent is said by the answer that names it; until then its bytes stay on the phone. */
+export type TakenPhoto = { photoId: string; bytes: Buffer; sha256: string; sent: boolean };
 export type PhotoLedger = { made: number; lost: number; doubled: number; invented: number; altered: number };
 
 const digest = (bytes: Buffer) => createHash('sha256').update(bytes).digest('hex');
@@ -17,7 +18,7 @@ const digest = (bytes: Buffer) => createHash('sha256').update(bytes).digest('hex
 export async function takePhoto(photoId: string, chance: Chance): Promise<TakenPhoto> {
   const background = { r: chance.whole(0, 255), g: chance.whole(0, 255), b: chance.whole(0, 255) };
   const bytes = await sharp({ create: { width: 320, height: 240, channels: 3, background } }).jpeg({ quality: 80 }).toBuffer();
-  return { photoId, bytes, sha256: digest(bytes) };
+  return { photoId, bytes, sha256: digest(bytes), sent: false };
 }
 
 /** Uploads photos one at a time, each until an answer names it; anything else leaves its bytes on the phone. */
@@ -33,7 +34,10 @@ export async function uploadAll(photos: readonly TakenPhoto[], at: { addresses: 
         hangUpAfterMs: chance.happens(0.2) ? chance.whole(0, 300) : 20_000,
       });
       const told = (answer.headers['content-type'] ?? '').startsWith('application/json') && answer.status === 200 ? (JSON.parse(answer.text) as { photoId?: unknown }) : {};
-      if (told.photoId === next.photoId) waiting.splice(waiting.indexOf(next), 1);
+      if (told.photoId === next.photoId) {
+        next.sent = true;
+        waiting.splice(waiting.indexOf(next), 1);
+      }
       // Its entry may not have arrived yet.
       else await pause(200);
     } catch {
@@ -45,7 +49,7 @@ export async function uploadAll(photos: readonly TakenPhoto[], at: { addresses: 
 
 /** Each photo has one record of its file, and what lies in the store under that key is what was recorded, and that picture. */
 export async function countPhotos(client: pg.Client, organisationId: string, made: readonly Made[], photos: readonly TakenPhoto[], folder: string): Promise<PhotoLedger> {
-  const ids = photos.map(({ photoId }) => photoId);
+  const ids = photos.filter(({ sent }) => sent).map(({ photoId }) => photoId);
   const { rows } = await client.query<{ photo_id: string; stored_key: string; small_key: string; sha256: string; bytes: number; width: number; height: number }>(
     'select photo_id, stored_key, small_key, sha256, bytes, width, height from photo_file where organisation_id = $1',
     [organisationId],

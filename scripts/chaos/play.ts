@@ -113,7 +113,7 @@ export async function play(cluster: Cluster, plan: Plan): Promise<Outcome> {
     // What hung up in flight may still be under way on a server; it comes to rest before anything is counted.
     await pause(1_500);
     const made = phones.flatMap((phone) => phone.scout.made);
-    const ledger = await withAdmin(adminUrl, (client) => countByLedger(client, scene.organisationId, made));
+    const ledger = await withAdmin(adminUrl, (client) => countByLedger(client, scene.organisationId, made, new Set(phones.flatMap((phone) => phone.stillKept))));
     const photoLedger = await withAdmin(adminUrl, (client) => countPhotos(client, scene.organisationId, made, photos, photoFolder));
     const complaints = phones.flatMap((phone) => [...phone.complaints.values()]);
     return {

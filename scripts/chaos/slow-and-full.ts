@@ -62,7 +62,7 @@ async function playTrouble(cluster: Cluster, seed: number, make: (at: { adminUrl
     const answeredAfter = await secondsUntilAnswered(server.address);
     await walking;
     const convergedAfter = (performance.now() - endedAt) / 1000;
-    const ledger = await countByLedger(admin, scene.organisationId, phones.flatMap((phone) => phone.scout.made));
+    const ledger = await countByLedger(admin, scene.organisationId, phones.flatMap((phone) => phone.scout.made), new Set(phones.flatMap((phone) => phone.stillKept)));
     const waiting = phones.reduce((sum, phone) => sum + phone.left, 0);
     const complaints = phones.flatMap((phone) => [...phone.complaints.values()]);
     const refusedForNow = watch.statuses['503'] ?? 0;

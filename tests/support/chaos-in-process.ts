@@ -98,7 +98,7 @@ export async function chaosInProcess(plan: Plan): Promise<ChaosOutcome> {
       ...phones.map((phone) => phone.walk(() => performance.now() - startedAt > plan.faultMs + 30_000)),
     ]);
     await Promise.allSettled([...underWay]);
-    const ledger = await countByLedger(client, scene.organisationId, scouts.flatMap(({ made }) => made));
+    const ledger = await countByLedger(client, scene.organisationId, scouts.flatMap(({ made }) => made), new Set(phones.flatMap((phone) => phone.stillKept)));
     await client.end();
     return {
       ledger,
