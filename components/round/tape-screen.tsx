@@ -8,10 +8,11 @@ import type { EntryVisit } from '@/lib/client/round/visit-of-row';
 import type { Question } from '@/lib/errors/app-error';
 import type { Confirmation } from '@/lib/schemas/operation';
 import type { RoundPlanting, RoundRow } from '@/lib/schemas/round-day';
+import { GrowingTape } from '@/components/tape/growing-tape';
 import { Button } from '@/components/ui/button';
 import { tapeTexts } from '@/lib/texts/round-tape-texts';
 import { roundCountTexts } from '@/lib/texts/round-texts';
-import { GrowingTape } from './growing-tape';
+import { grownPlants } from './grown-plants';
 import { TapeAsked } from './tape-asked';
 import { TapeKeys } from './tape-keys';
 import { TapeLine } from './tape-line';
@@ -57,6 +58,7 @@ export function TapeScreen({ row, planting, draft, standing, me, visit, onDraft,
   const sheet = useMemo(() => ({ places, unit, readFrom, zeroAt, surelyInches, replacesId }), [places, unit, readFrom, zeroAt, surelyInches, replacesId]);
   const checked = useMemo(() => checkSheetOfRow(row, sheet, visit(), me), [row, sheet, visit, me]);
   const wrong = useMemo(() => new Set(checked.fields.map((field) => Number(field.path.split('.')[1]))), [checked]);
+  const grown = useMemo(() => grownPlants(sheet, markers, row.length.inches), [sheet, markers, row.length.inches]);
   const tape = surelyInches ? undefined : checked.tape;
 
   const keep = async (answered: readonly Question[], wentThrough: boolean) => {
@@ -115,7 +117,15 @@ export function TapeScreen({ row, planting, draft, standing, me, visit, onDraft,
         </p>
       </div>
       <div className="flex h-0 min-h-36 grow gap-2 [@media(max-height:700px)]:min-h-24 px-3">
-        <GrowingTape sheet={sheet} inHand={draft.at.put === 'end' ? places.length - 1 : draft.at.index} markers={markers} lengthInches={row.length.inches} startEnd={row.startEnd} farEnd={row.farEnd} />
+        <GrowingTape
+          plants={grown}
+          inHand={draft.at.put === 'end' ? places.length - 1 : draft.at.index}
+          lengthInches={row.length.inches}
+          startEnd={row.startEnd}
+          farEnd={row.farEnd}
+          units={unit === 'cm' ? 'metric' : 'us'}
+          label={tapeTexts.drawing(places.length)}
+        />
         <TapePlaces places={places} at={draft.at} toGo={draft.toGo} wrong={wrong} onPress={press} />
       </div>
       {asking ? (

@@ -63,7 +63,7 @@ export const tapeTexts = {
   before: (place: string) => `Before ${place}`,
   ofAll: (order: number, all: number) => `Place ${order} of ${all}, as it was`,
   changing: (order: number) => `Place ${order}, being changed`,
-  onFrom: (distance: string) => `${distance} on`,
+  onFrom: (distance: string) => `${distance} farther`,
   here: 'Typed',
   nothingTyped: 'nothing typed',
   laidAnew: 'Cut: the tape was laid anew here',
