@@ -2,6 +2,7 @@
 //   npm run field-day              16 strips, 2 row samples each, 9 visits, 3 tape sheets a strip, power lost three times
 //   npm run field-day -- --short   8 strips and 4 visits
 import { setTimeout as pause } from 'node:timers/promises';
+import type { Page } from '@playwright/test';
 import { chanceFrom, type Chance } from './chaos/chance';
 import { ensureBuild, makeChaosCluster } from './chaos/prepare';
 import { password } from './chaos/scene';
@@ -23,11 +24,15 @@ type Plan = { blocks: number; visitDays: number[]; losses: number; photos: numbe
 const full: Plan = { blocks: 4, visitDays: [6, 7, 8, 9, 10, 11, 12, 13, 14], losses: 3, photos: 20, transects: 3, digPairs: 4, covers: 4 };
 const short: Plan = { blocks: 2, visitDays: [8, 9, 10, 11], losses: 3, photos: 4, transects: 1, digPairs: 1, covers: 1 };
 
-async function signIn(phone: PhoneBrowser, scene: FieldScene): Promise<void> {
-  const page = await phone.open('/sign-in?to=round');
+async function typePassword(page: Page, scene: FieldScene): Promise<void> {
   await page.getByLabel('E-mail').fill(scene.scout.email);
   await page.getByLabel('Password').fill(password);
-  await page.getByRole('button', { name: 'Sign in' }).click();
+  await page.getByRole('button', { name: 'Sign in', exact: true }).click();
+}
+
+async function signIn(phone: PhoneBrowser, scene: FieldScene): Promise<void> {
+  const page = await phone.open('/sign-in?to=round');
+  await typePassword(page, scene);
   await page.getByRole('heading', { level: 1, name: /rows? due today|Nothing is due/ }).waitFor();
   // The worker has the page before the network goes.
   await page.evaluate(() => navigator.serviceWorker.ready.then((ready) => new Promise((done) => (ready.active?.state === 'activated' ? done(true) : ready.active?.addEventListener('statechange', () => done(true))))));
@@ -116,6 +121,18 @@ async function comeHome(phone: PhoneBrowser, gate: Gate, scene: FieldScene): Pro
   if (/Everything is sent/.test(waiting ?? '')) throw new Error('The phone took a network’s own page for an answer.');
   gate.set('open');
   await phone.page.getByRole('button', { name: 'Send now' }).click();
+  const everything = phone.page.getByRole('heading', { level: 1, name: 'Everything is sent' });
+  const signedOut = phone.page.getByRole('link', { name: 'Sign in to send' });
+  await everything.or(signedOut).waitFor({ timeout: 60_000 });
+  // A browser that was killed soon after signing in has not written its cookie down. What was entered waits all the same.
+  if (await signedOut.isVisible()) {
+    say('  the sign-in was lost with the power; signing in again');
+    await signedOut.click();
+    await typePassword(phone.page, scene);
+    await phone.page.waitForURL(/\/round/);
+    await phone.page.getByRole('heading', { level: 1 }).filter({ hasNotText: 'Opening' }).waitFor();
+    await phone.page.goto(`${gate.address}/round?org=${scene.organisationId}&at=kept`);
+  }
   await phone.page.getByRole('heading', { level: 1, name: 'Everything is sent' }).waitFor({ timeout: 60_000 });
 }
 
