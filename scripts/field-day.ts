@@ -2,15 +2,14 @@
 //   npm run field-day              16 strips, 2 row samples each, 9 visits, 3 tape sheets a strip, power lost three times
 //   npm run field-day -- --short   8 strips and 4 visits
 import { setTimeout as pause } from 'node:timers/promises';
-import type { Page } from '@playwright/test';
 import { chanceFrom, type Chance } from './chaos/chance';
 import { ensureBuild, makeChaosCluster } from './chaos/prepare';
-import { password } from './chaos/scene';
 import { standingServer } from './chaos/web-servers';
 import { differences } from './field-day/compare';
 import { makeGate, type Gate } from './field-day/gate';
 import { PhoneBrowser } from './field-day/phone-browser';
 import { settleTrial, type FieldScene } from './field-day/scene';
+import { signIn, typePassword } from './field-day/sign-in';
 import { nothingEntered, Walk, type Entered } from './field-day/walk';
 import { Interrupted, leave, listenForSignals } from './interruption.mjs';
 import { Stop, say } from './say.mjs';
@@ -23,20 +22,6 @@ const markers = ['red', 'blue', 'white', 'yellow', 'pink', 'black', 'orange', 'p
 type Plan = { blocks: number; visitDays: number[]; losses: number; photos: number; transects: number; digPairs: number; covers: number };
 const full: Plan = { blocks: 4, visitDays: [6, 7, 8, 9, 10, 11, 12, 13, 14], losses: 3, photos: 20, transects: 3, digPairs: 4, covers: 4 };
 const short: Plan = { blocks: 2, visitDays: [8, 9, 10, 11], losses: 3, photos: 4, transects: 1, digPairs: 1, covers: 1 };
-
-async function typePassword(page: Page, scene: FieldScene): Promise<void> {
-  await page.getByLabel('E-mail').fill(scene.scout.email);
-  await page.getByLabel('Password').fill(password);
-  await page.getByRole('button', { name: 'Sign in', exact: true }).click();
-}
-
-async function signIn(phone: PhoneBrowser, scene: FieldScene): Promise<void> {
-  const page = await phone.open('/sign-in?to=round');
-  await typePassword(page, scene);
-  await page.getByRole('heading', { level: 1, name: /rows? due today|Nothing is due/ }).waitFor();
-  // The worker has the page before the network goes.
-  await page.evaluate(() => navigator.serviceWorker.ready.then((ready) => new Promise((done) => (ready.active?.state === 'activated' ? done(true) : ready.active?.addEventListener('statechange', () => done(true))))));
-}
 
 /** The days of one row: rising until all are up, then nothing new twice. */
 function countsOf(chance: Chance, days: number): (number | 'none-new')[] {
@@ -72,6 +57,7 @@ async function walkAll(phone: PhoneBrowser, gate: Gate, scene: FieldScene, plan:
     say(`  lost power after ${kept} things kept, and went on`);
   });
   const plans = new Map(scene.rows.map(({ label }) => [label, countsOf(chance, plan.visitDays.length)]));
+  const doubtful = new Map<string, number>();
   gate.set('closed');
   for (const [visit, day] of plan.visitDays.entries()) {
     phone.clockOffset = planted + day * dayMilliseconds - Date.now();
@@ -81,7 +67,12 @@ async function walkAll(phone: PhoneBrowser, gate: Gate, scene: FieldScene, plan:
     const on = dayOf(planted + day * dayMilliseconds);
     const order = walked(scene);
     await walk.go(walk.address('count', order[0]));
-    for (const label of order) await walk.count(label, on, markers[visit] ?? null, plans.get(label)?.[visit] ?? 0, chance.happens(0.1) ? 1 : 0);
+    for (const label of order) {
+      const plants = plans.get(label)?.[visit] ?? 0;
+      // "Looked, none new" leaves the doubtful as they were at the visit before.
+      if (plants !== 'none-new') doubtful.set(label, chance.happens(0.1) ? 1 : 0);
+      await walk.count(label, on, markers[visit] ?? null, plants, doubtful.get(label) ?? 0);
+    }
   }
   const on = dayOf(planted + (plan.visitDays.at(-1) ?? 0) * dayMilliseconds);
   const sheets = new Map<string, string[]>();

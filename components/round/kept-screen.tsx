@@ -9,6 +9,7 @@ import { useRound } from '@/lib/client/round/use-round';
 import { waitingState } from '@/lib/client/round/waiting-state';
 import { Button } from '@/components/ui/button';
 import { saveFile } from '@/components/ui/save-file';
+import { paths } from '@/lib/paths/paths';
 import { ageText } from '@/lib/format/age-text';
 import { keptTexts } from '@/lib/texts/kept-texts';
 import { roundTexts } from '@/lib/texts/round-texts';
@@ -50,7 +51,7 @@ export function KeptScreen() {
           </Button>
         </div>
         {last === 'signed-out' ? (
-          <a href="/sign-in?to=round" className="min-h-press text-18 font-bold underline underline-offset-4">
+          <a href={`${paths.signIn}?to=round`} className="min-h-press text-18 font-bold underline underline-offset-4">
             {keptTexts.signInToSend}
           </a>
         ) : null}

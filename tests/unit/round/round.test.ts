@@ -262,9 +262,9 @@ describe('the store of an earlier version', () => {
         const drafts = db.createObjectStore('drafts', { keyPath: 'key' });
         drafts.createIndex('[personId+organisationId]', ['personId', 'organisationId']);
         db.createObjectStore('facts', { keyPath: 'name' });
-        const { about: _about, ...entry } = countOf(row, planting, 28);
+        const { kind, thingId, body } = countOf(row, planting, 28);
         entries.put({
-          ...entry, operationId: v7(), personId: me.id, organisationId, deviceId: v7(), deviceSequence: 7, version: 1, baseVersion: null, follows: null, occurred: { date: '2026-05-20', time: '09:00', zone: 'America/Chicago' },
+          kind, thingId, body, operationId: v7(), personId: me.id, organisationId, deviceId: v7(), deviceSequence: 7, version: 1, baseVersion: null, follows: null, occurred: { date: '2026-05-20', time: '09:00', zone: 'America/Chicago' },
           confirmations: [], plantingId: planting.id, rowSampleId: row.id, state: 'kept', tried: false, keptAt: 1, sentAt: null, answer: null,
         });
         asked.transaction!.objectStore('facts').put({ name: 'device-sequence', value: 7 });
