@@ -32,7 +32,7 @@ async function enter(page: Page): Promise<void> {
 test('a scout counts without a network, undoes after moving on, loses nothing over a reload, and it arrives once', async ({ page, context }, { project }) => {
   const complaints = collectComplaints(page);
   const day = await takeAlong(page, 'Pell');
-  const planting = day.plantings.find((each) => !each.hasTrial && each.rows.some((row) => row.label === 'C7'));
+  const planting = day.plantings.find((each) => !each.hasTrial && each.rows.some((row) => row.label === 'C5'));
   const rows = planting?.rows.filter((row) => (project.name === 'phone' ? ['C1', 'C2'] : ['C3', 'C4']).includes(row.label)) ?? [];
   const [first] = rows;
   if (!planting || !first) throw new Error('The demo has no spot count rows.');
