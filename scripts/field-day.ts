@@ -1,6 +1,7 @@
 // npm run field-day: a scripted scout counts a whole trial on a real phone browser without a network, loses power, and comes home.
 //   npm run field-day              16 strips, 2 row samples each, 9 visits, 3 tape sheets a strip, power lost three times
 //   npm run field-day -- --short   8 strips and 4 visits
+//   npm run field-day -- --kill-each   the short one, with the browser killed after the first of each of twelve kinds of press
 import { setTimeout as pause } from 'node:timers/promises';
 import { chanceFrom, type Chance } from './chaos/chance';
 import { ensureBuild, makeChaosCluster } from './chaos/prepare';
@@ -10,7 +11,7 @@ import { makeGate, type Gate } from './field-day/gate';
 import { PhoneBrowser } from './field-day/phone-browser';
 import { settleTrial, type FieldScene } from './field-day/scene';
 import { signIn, typePassword } from './field-day/sign-in';
-import { nothingEntered, Walk, type Entered } from './field-day/walk';
+import { nothingEntered, Walk, type Entered, type PressKind } from './field-day/walk';
 import { Interrupted, leave, listenForSignals } from './interruption.mjs';
 import { Stop, say } from './say.mjs';
 
@@ -19,7 +20,7 @@ const dayOf = (instant: number) => new Date(instant).toISOString().slice(0, 10);
 const plantedDaysAgo = 20;
 const markers = ['red', 'blue', 'white', 'yellow', 'pink', 'black', 'orange', 'purple', 'green'];
 
-type Plan = { blocks: number; visitDays: number[]; losses: number; photos: number; transects: number; digPairs: number; covers: number };
+type Plan = { blocks: number; visitDays: number[]; losses: number; photos: number; transects: number; digPairs: number; covers: number; killEach?: boolean };
 const full: Plan = { blocks: 4, visitDays: [6, 7, 8, 9, 10, 11, 12, 13, 14], losses: 3, photos: 20, transects: 3, digPairs: 4, covers: 4 };
 const short: Plan = { blocks: 2, visitDays: [8, 9, 10, 11], losses: 3, photos: 4, transects: 1, digPairs: 1, covers: 1 };
 
@@ -48,13 +49,18 @@ async function walkAll(phone: PhoneBrowser, gate: Gate, scene: FieldScene, plan:
   let kept = 0;
   const total = scene.rows.length * plan.visitDays.length + scene.strips * 4;
   const lossesAt = new Set(Array.from({ length: plan.losses }, (_, index) => Math.floor((total * (index + 0.6)) / plan.losses)));
-  const walk = new Walk(scene, entered, chance, () => phone.page, async () => {
-    kept += 1;
-    if (!lossesAt.has(kept)) return;
+  const tried = new Set<PressKind>();
+  const walk = new Walk(scene, entered, chance, () => phone.page, async (press) => {
+    const firstOfKind = plan.killEach && !tried.has(press);
+    tried.add(press);
+    if (press !== 'typed' && press !== 'place-typed') kept += 1;
+    else if (!firstOfKind) return;
+    if (!firstOfKind && !lossesAt.has(kept)) return;
     const address = new URL(phone.page.url());
     await phone.losePower();
     await phone.open(address.pathname + address.search);
-    say(`  lost power after ${kept} things kept, and went on`);
+    await phone.page.getByRole('heading', { level: 1 }).filter({ hasNotText: 'Opening' }).waitFor();
+    say(`  lost power after ${kept} things kept (${press}), and went on`);
   });
   const plans = new Map(scene.rows.map(({ label }) => [label, countsOf(chance, plan.visitDays.length)]));
   const doubtful = new Map<string, number>();
@@ -128,7 +134,8 @@ async function comeHome(phone: PhoneBrowser, gate: Gate, scene: FieldScene): Pro
 }
 
 async function main(): Promise<boolean> {
-  const plan = process.argv.includes('--short') ? short : full;
+  const killEach = process.argv.includes('--kill-each');
+  const plan: Plan = killEach ? { ...short, losses: 0, killEach } : process.argv.includes('--short') ? short : full;
   const seed = Number(process.argv[process.argv.indexOf('--seed') + 1]) || 20_260_507;
   await ensureBuild();
   const cluster = await makeChaosCluster();

@@ -29,7 +29,8 @@ export function KeptScreen() {
   const { kept, needsLook, oldestAgeMinutes } = waitingState(round, now);
   const waiting = round.entriesIn('kept');
   const look = round.entriesIn('needs-look');
-  const photos = round.photos;
+  const photos = round.photos.filter((photo) => photo.state === 'kept');
+  const refusedPhotos = round.photos.filter((photo) => photo.state === 'needs-look');
   const save = async () => {
     const text = await keptFile(round.store, round.me, now);
     saveFile(keptFileName(round.now()), text, 'application/json');
@@ -56,10 +57,24 @@ export function KeptScreen() {
           </a>
         ) : null}
         {saved ? <p role="status" className="text-15">{keptTexts.saved}</p> : null}
-        {look.length > 0 ? (
+        {look.length + refusedPhotos.length > 0 ? (
           <section className="border-t-2 border-ink pt-3">
-            <h2 className="text-21">{roundTexts.status.needsLook(look.length)}</h2>
+            <h2 className="text-21">{roundTexts.status.needsLook(look.length + refusedPhotos.length)}</h2>
             <ul className="flex flex-col gap-4 pt-2">
+              {refusedPhotos.map((photo) => (
+                <li key={photo.photoId} className="flex flex-col gap-2 border-l-6 border-flag pl-3">
+                  <p className="text-18 font-bold">{[keptTexts.kinds['photo.record'], photo.takenOn, photo.takenAt].filter(Boolean).join(', ')}</p>
+                  <p className="text-18">{photo.sentence ?? keptTexts.notSent}</p>
+                  <div className="flex flex-wrap gap-2">
+                    <Button look="secondary" onClick={() => void round.settlePhoto(photo, 'send-again')}>
+                      {keptTexts.again}
+                    </Button>
+                    <Button look="secondary" onClick={() => void round.settlePhoto(photo, 'let-go')}>
+                      {keptTexts.letGo}
+                    </Button>
+                  </div>
+                </li>
+              ))}
               {look.map((entry) => (
                 <li key={entry.operationId}>
                   <NeedsLook entry={entry} />

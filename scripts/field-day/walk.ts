@@ -15,6 +15,10 @@ export type Entered = {
 };
 export const nothingEntered = (): Entered => ({ counts: [], tapeSheets: [], depths: [], cover: [], transects: [], digs: [], photos: 0 });
 
+/** The kinds of press after which a phone may go off: typed and not kept yet, or kept. */
+export const pressKinds = ['typed', 'count', 'none-new', 'place-typed', 'tape-sheet', 'tape-sheet-again', 'depth', 'cover', 'transect', 'dig', 'neighbor', 'photo'] as const;
+export type PressKind = (typeof pressKinds)[number];
+
 const button = (page: Page, name: string | RegExp): Locator => page.getByRole('button', { name, exact: typeof name === 'string' });
 
 /** One scripted scout at the phone's screens. Every press is one that a thumb would make. */
@@ -24,8 +28,8 @@ export class Walk {
     readonly entered: Entered,
     readonly chance: Chance,
     private readonly pageOf: () => Page,
-    /** Called after each thing that the screen has said is kept; may lose power and open the phone again. */
-    private readonly afterKept: () => Promise<void>,
+    /** Called after each thing that the screen has said is kept or typed; may lose power and open the phone again. */
+    private readonly after: (press: PressKind) => Promise<void>,
   ) {}
 
   private get page() {
@@ -66,6 +70,10 @@ export class Walk {
     if (plants === 'none-new') await button(this.page, 'Looked, none new').click();
     else {
       for (const digit of String(plants)) await button(this.page, digit).click();
+      await this.page.locator('output').filter({ hasText: new RegExp(`^${plants}$`) }).waitFor();
+      await this.after('typed');
+      // What was typed and not kept stands there again.
+      await this.page.locator('output').filter({ hasText: new RegExp(`^${plants}$`) }).waitFor();
       if (doubtful > 0) {
         await button(this.page, 'Type doubtful').click();
         for (const digit of String(doubtful)) await button(this.page, digit).click();
@@ -74,7 +82,7 @@ export class Walk {
     }
     await this.page.waitForFunction((url) => window.location.href !== url, before);
     this.entered.counts.push({ label, on, countedAs: plants === 'none-new' ? 'new' : 'so-far', plants: plants === 'none-new' ? 0 : plants, doubtful, marker });
-    await this.afterKept();
+    await this.after(plants === 'none-new' ? 'none-new' : 'count');
   }
 
   async tape(label: string, on: string, address: string, places: readonly string[]): Promise<void> {
@@ -87,18 +95,23 @@ export class Walk {
       await this.page.keyboard.type(place.replace('½', ''));
       if (place.endsWith('½')) await this.page.keyboard.press('/');
       await this.page.keyboard.press('Enter');
+      if (place === places[4]) {
+        await button(this.page, 'Keep the sheet with 5 places').waitFor();
+        await this.after('place-typed');
+        await button(this.page, 'Keep the sheet with 5 places').waitFor();
+      }
     }
-    await this.keep(`Keep the sheet with ${places.length} places`, () => this.entered.tapeSheets.push({ label, on, places: [...places] }));
+    await this.keep('tape-sheet', `Keep the sheet with ${places.length} places`, () => this.entered.tapeSheets.push({ label, on, places: [...places] }));
   }
 
   /** A newer sheet starts from the last one of the row and is kept as it stands. */
   async tapeAgain(label: string, on: string, address: string, places: readonly string[]): Promise<void> {
     await this.go(address);
     await button(this.page, `Correct today's sheet, ${places.length} places`).click();
-    await this.keep(`Keep the sheet with ${places.length} places`, () => this.entered.tapeSheets.push({ label, on, places: [...places] }));
+    await this.keep('tape-sheet-again', `Keep the sheet with ${places.length} places`, () => this.entered.tapeSheets.push({ label, on, places: [...places] }));
   }
 
-  private async keep(name: RegExp | string, note: () => void): Promise<void> {
+  private async keep(kind: PressKind, name: RegExp | string, note: () => void): Promise<void> {
     const before = this.page.url();
     await button(this.page, name).click();
     const yes = button(this.page, 'Yes, keep it');
@@ -106,7 +119,7 @@ export class Walk {
     if (await yes.isVisible().catch(() => false)) await yes.click();
     await this.page.waitForFunction((url) => window.location.href !== url, before);
     note();
-    await this.afterKept();
+    await this.after(kind);
   }
 
   async depths(label: string, address: string, depths: readonly string[]): Promise<void> {
@@ -117,13 +130,13 @@ export class Walk {
       if (fraction) await button(this.page, fraction).click();
       await button(this.page, 'Next plant').click();
     }
-    await this.keep(new RegExp(`^Keep ${depths.length} depths$`), () => this.entered.depths.push({ label, depths: [...depths] }));
+    await this.keep('depth', new RegExp(`^Keep ${depths.length} depths$`), () => this.entered.depths.push({ label, depths: [...depths] }));
   }
 
   async cover(label: string | null, address: string, marks: number, covered: number): Promise<void> {
     await this.go(address);
     for (let mark = 0; mark < marks; mark += 1) await button(this.page, mark < covered ? 'Residue' : 'Bare').click();
-    await this.keep(new RegExp(`^Keep ${marks} marks$`), () => {
+    await this.keep(label === null ? 'transect' : 'cover', new RegExp(`^Keep ${marks} marks$`), () => {
       if (label === null) this.entered.transects.push({ marksRead: marks, marksCovered: covered });
       else this.entered.cover.push({ label, marksRead: marks, marksCovered: covered });
     });
@@ -141,10 +154,10 @@ export class Walk {
         await button(this.page, keep).click();
         await this.page.getByText('Now its on-time neighbor').waitFor();
         this.entered.digs.push({ label, plant, depth });
-        await this.afterKept();
+        await this.after('dig');
         // After a loss of power the page comes back where it was, with the pair still open.
         await this.passGate();
-      } else await this.keep(keep, () => this.entered.digs.push({ label, plant, depth }));
+      } else await this.keep('neighbor', keep, () => this.entered.digs.push({ label, plant, depth }));
     }
   }
 
@@ -157,7 +170,7 @@ export class Walk {
       await this.page.locator('input[type=file]').setInputFiles({ name: 'field.jpg', mimeType: 'image/jpeg', buffer: picture });
       await this.page.waitForFunction((count) => document.querySelectorAll('main li').length > count, before);
       this.entered.photos += 1;
-      await this.afterKept();
+      await this.after('photo');
     }
   }
 }

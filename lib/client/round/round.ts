@@ -397,6 +397,15 @@ export class Round {
     this.tell();
   }
 
+  /** Sends a photo again that the server would not have, or lets it go after the scout has seen it and said so. */
+  async settlePhoto(photo: KeptPhoto, how: 'send-again' | 'let-go'): Promise<void> {
+    if (how === 'let-go') await this.store.photos.delete(photo.photoId);
+    else await this.store.photos.update(photo.photoId, { state: 'kept' });
+    this.photos = this.photos.flatMap((each) => (each.photoId !== photo.photoId ? [each] : how === 'let-go' ? [] : [{ ...each, state: 'kept' as const }]));
+    this.tell();
+    this.wakeSoon();
+  }
+
   private tellOtherTabs(entries: readonly KeptEntry[]) {
     this.channel?.postMessage({ store: this.store.name, changed: entries.map((entry) => entry.operationId) });
   }
