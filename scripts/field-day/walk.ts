@@ -66,6 +66,13 @@ export class Walk {
   /** Counts the row on the screen with the keys, and waits until the screen has gone on, which it does only once it is kept. */
   async count(label: string, on: string, marker: string | null, plants: number | 'none-new', doubtful: number): Promise<void> {
     await this.page.getByRole('heading', { level: 1, name: label, exact: true }).waitFor();
+    // A row whose counting may end already opens on what else is due there; this scout counts it all the same.
+    const count = button(this.page, 'Count');
+    await count.or(button(this.page, 'Looked, none new')).waitFor();
+    if (await count.isVisible()) {
+      await count.click();
+      await button(this.page, 'Looked, none new').waitFor();
+    }
     const before = this.page.url();
     if (plants === 'none-new') await button(this.page, 'Looked, none new').click();
     else {
