@@ -110,6 +110,8 @@ test('a network that answers with its own page takes nothing from the phone', as
 
 for (const theme of ['light', 'dark']) {
   test(`every field screen reads out cleanly, in ${theme}: contrast 7 to 1, targets of 56 pixels, nothing sideways`, async ({ page }) => {
+    // Seventeen screens, each loaded anew and read through.
+    test.setTimeout(420_000);
     const day = await takeAlong(page, 'Pell');
     await page.evaluate((chosen) => localStorage.setItem('rowrise-theme', chosen), theme);
     const planting = day.plantings.find((each) => each.hasTrial);
